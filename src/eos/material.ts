@@ -1,0 +1,29 @@
+import type { EosCurve } from "./curve.ts";
+
+/** Where a number comes from. */
+export interface Source {
+  readonly citation: string;
+  readonly doi?: string;
+  readonly note?: string;
+}
+
+/** One phase of a material, stable from `fromPressure` to `untilPressure` [Pa]. */
+export interface Phase {
+  readonly name: string;
+  /** Name of the equation-of-state form, as in composition files. */
+  readonly form: string;
+  readonly curve: EosCurve;
+  readonly fromPressure: number;
+  /** Infinity for the last phase, even where its form breaks earlier (`curve.maxPressure`). */
+  readonly untilPressure: number;
+  /** Top of the data behind the parameters [Pa]; a result that used the phase beyond it is extrapolated. */
+  readonly calibratedTo: number;
+  readonly source: Source;
+}
+
+/** A substance as a stack of phases, lowest pressure first, without gaps. */
+export interface Material {
+  readonly name: string;
+  readonly title: string;
+  readonly phases: readonly Phase[];
+}

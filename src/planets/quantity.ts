@@ -1,0 +1,84 @@
+/** What a number in a planet list really is. Only `measured` may be used as a measurement. */
+export type QuantityKind =
+  | "measured"
+  | "upper-limit"
+  | "lower-limit"
+  /** M sin i. */
+  | "minimum"
+  /** Computed from another quantity by a relation, e.g. a mass from a radius. */
+  | "from-relation"
+  | "theoretical"
+  /** A value without a usable error on both sides: none, one, or zero. */
+  | "no-uncertainty";
+
+/** Where a value stands in the user's file; lines count from 1, `column` is the header as written. */
+export interface Origin {
+  readonly file: string;
+  readonly line: number;
+  readonly column: string;
+}
+
+/** A number from a planet list, in SI, with one-sigma errors as positive sizes. */
+export interface MeasuredQuantity {
+  readonly value: number;
+  readonly minus?: number;
+  readonly plus?: number;
+  readonly kind: QuantityKind;
+  readonly origin: Origin;
+}
+
+/** Quantities Bulkwright knows; the unit is the one held inside. */
+export type QuantityName =
+  | "mass" // kg
+  | "minimumMass" // kg
+  | "radius" // m
+  | "density" // kg m^-3
+  | "period" // s
+  | "semiMajorAxis" // m
+  | "eccentricity"
+  | "inclination" // rad
+  | "equilibriumTemperature" // K
+  | "insolation" // W m^-2
+  | "surfaceGravity" // m s^-2
+  | "radiusRatio" // planet over star
+  | "scaledAxis" // a over stellar radius
+  | "velocityAmplitude" // m s^-1
+  | "starMass" // kg
+  | "starRadius" // m
+  | "starTemperature" // K
+  | "starDensity" // kg m^-3
+  | "starMetallicity" // dex
+  | "starAge"; // s
+
+export type TextName =
+  | "name"
+  | "host"
+  | "status"
+  | "massProvenance"
+  | "radiusProvenance"
+  | "reference"
+  | "discoveryMethod"
+  | "preferred";
+
+/** One row of a planet list: every input row becomes exactly one of these, in order. */
+export interface PlanetRow {
+  /** Data row number, from 1. */
+  readonly row: number;
+  readonly line: number;
+  /** Verbatim; may be empty. */
+  readonly name: string;
+  readonly quantities: Readonly<Partial<Record<QuantityName, MeasuredQuantity>>>;
+  readonly texts: Readonly<Partial<Record<TextName, string>>>;
+  /** The row's cells verbatim, in the order of the list's header. */
+  readonly cells: readonly string[];
+  /** What is wrong with this row alone, e.g. text in a number cell. */
+  readonly issues: readonly RowIssue[];
+}
+
+export interface RowIssue {
+  /** Stable, e.g. `not-a-number`, `negative-mass`, `ragged-row`. */
+  readonly code: string;
+  readonly origin: Origin;
+  readonly found: string;
+  readonly message: string;
+}
