@@ -18,12 +18,17 @@ export interface Origin {
   readonly column: string;
 }
 
+/** A way in which lists say "this is a limit": a flag column, typed `<5`, `0.0 +0.15 -0.0`, `5 ± 5`, an infinite error. */
+export type LimitCoding = "flag" | "typed" | "zero-with-error" | "error-equals-value" | "infinite-error";
+
 /** A number from a planet list, in SI, with one-sigma errors as positive sizes. */
 export interface MeasuredQuantity {
   readonly value: number;
   readonly minus?: number;
   readonly plus?: number;
   readonly kind: QuantityKind;
+  /** How the list marked a limit; `minus` and `plus` are kept beside it where the list gives them, for the cross-check. */
+  readonly limitCoding?: LimitCoding;
   readonly origin: Origin;
 }
 
@@ -48,15 +53,21 @@ export type QuantityName =
   | "starTemperature" // K
   | "starDensity" // kg m^-3
   | "starMetallicity" // dex
-  | "starAge"; // s
+  | "starAge" // s
+  | "rightAscension" // rad
+  | "declination"; // rad
 
 export type TextName =
   | "name"
   | "host"
+  /** Other names of the planet, separated by commas or semicolons. */
+  | "aliases"
   | "status"
   | "massProvenance"
   | "radiusProvenance"
   | "reference"
+  /** When the row's reference appeared; ISO order, so that text sorts by time. */
+  | "publicationDate"
   | "discoveryMethod"
   | "preferred";
 
@@ -68,6 +79,8 @@ export interface PlanetRow {
   /** Verbatim; may be empty. */
   readonly name: string;
   readonly quantities: Readonly<Partial<Record<QuantityName, MeasuredQuantity>>>;
+  /** Further columns that give the same quantity, e.g. Jupiter units beside Earth units, for the cross-check to compare. */
+  readonly twins?: Readonly<Partial<Record<QuantityName, readonly MeasuredQuantity[]>>>;
   readonly texts: Readonly<Partial<Record<TextName, string>>>;
   /** The row's cells verbatim, in the order of the list's header. */
   readonly cells: readonly string[];
