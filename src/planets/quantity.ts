@@ -29,6 +29,8 @@ export interface MeasuredQuantity {
   readonly kind: QuantityKind;
   /** How the list marked a limit; `minus` and `plus` are kept beside it where the list gives them, for the cross-check. */
   readonly limitCoding?: LimitCoding;
+  /** The number as typed, so that a value copied from another column shows whatever the units. */
+  readonly written?: string;
   readonly origin: Origin;
 }
 

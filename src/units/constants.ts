@@ -15,6 +15,7 @@ export const constants = {
   gravitational: { value: 6.6743e-11, unit: "m3 kg-1 s-2", uncertainty: 1.5e-15, source: codata2022 },
   atomicMass: { value: 1.66053906892e-27, unit: "kg", uncertainty: 5.2e-37, source: codata2022 },
   gasConstant: { value: 8.31446261815324, unit: "J mol-1 K-1", uncertainty: 0, source: codata2022 },
+  stefanBoltzmann: { value: 5.6703744191844314e-8, unit: "W m-2 K-4", uncertainty: 0, source: codata2022 },
   earthMassParameter: nominal(3.986004e14, "m3 s-2"),
   jupiterMassParameter: nominal(1.2668653e17, "m3 s-2"),
   sunMassParameter: nominal(1.3271244e20, "m3 s-2"),
