@@ -1,0 +1,12 @@
+import { fileURLToPath } from "node:url";
+import { defineConfig } from "vitest/config";
+
+// biome-ignore lint/style/noDefaultExport: vitest reads its configuration from the default export
+export default defineConfig({
+  root: fileURLToPath(new URL("../../", import.meta.url)),
+  test: {
+    include: ["test/**/*.test.ts"],
+    allowOnly: false,
+    testTimeout: 30_000,
+  },
+});
