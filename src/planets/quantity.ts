@@ -31,6 +31,8 @@ export interface MeasuredQuantity {
   readonly limitCoding?: LimitCoding;
   /** The number as typed, so that a value copied from another column shows whatever the units. */
   readonly written?: string;
+  /** What the value was computed from, where the list does not hold it itself, e.g. `radius ratio and stellar radius`. */
+  readonly derivedFrom?: string;
   readonly origin: Origin;
 }
 
@@ -54,6 +56,7 @@ export type QuantityName =
   | "starRadius" // m
   | "starTemperature" // K
   | "starDensity" // kg m^-3
+  | "starSurfaceGravity" // m s^-2
   | "starMetallicity" // dex
   | "starAge" // s
   | "rightAscension" // rad
@@ -62,9 +65,13 @@ export type QuantityName =
 export type TextName =
   | "name"
   | "host"
+  /** The planet's letter, for lists that give host and letter instead of a name. */
+  | "letter"
   /** Other names of the planet, separated by commas or semicolons. */
   | "aliases"
   | "status"
+  /** `1` marks a disputed planet, where a list has such a flag beside or instead of a status. */
+  | "controversial"
   | "massProvenance"
   | "radiusProvenance"
   | "reference"
