@@ -1,0 +1,76 @@
+import type { z } from "zod";
+import { InputError } from "../errors.ts";
+import { suggestion } from "./nearest.ts";
+
+/** The value as the schema reads it, or all that is wrong with it, each with file, key path and what is allowed. */
+export function validate<Schema extends z.ZodType>(
+  schema: Schema,
+  file: string,
+  value: unknown,
+): { value: z.output<Schema>; problems?: never } | { value?: never; problems: InputError[] } {
+  const result = schema.safeParse(value, { error: describe, reportInput: true });
+  return result.success
+    ? { value: result.data }
+    : { problems: result.error.issues.map((issue) => problem(file, issue)) };
+}
+
+function problem(file: string, issue: z.core.$ZodIssue): InputError {
+  const keyPath = issue.path
+    .map((key) => (typeof key === "number" ? `[${key}]` : `.${String(key)}`))
+    .join("")
+    .slice(1);
+  const code =
+    issue.code === "unrecognized_keys" ? "unknown-key" : issue.code === "custom" ? customCode(issue) : "wrong-value";
+  return new InputError(code, `${file}: ${keyPath === "" ? "" : `${keyPath}: `}${issue.message}`, {
+    file,
+    column: keyPath,
+    found: shown(issue.input),
+  });
+}
+
+const customCode = (issue: z.core.$ZodIssueCustom): string => String(issue.params?.code ?? "wrong-value");
+
+const articles: Readonly<Record<string, string>> = {
+  number: "a number",
+  string: "text in quotes",
+  object: "an object { … }",
+  array: "a list [ … ]",
+};
+
+/** What is wrong and what is allowed, for the kinds of issue our schemas can raise. */
+function describe(issue: z.core.$ZodRawIssue): string | undefined {
+  const received = issue.input === undefined ? "missing" : `${shown(issue.input)} is not allowed`;
+  switch (issue.code) {
+    case "invalid_type":
+      return `${received}; ${articles[issue.expected] ?? issue.expected} is needed.`;
+    case "too_small":
+    case "too_big": {
+      const low = issue.code === "too_small";
+      const bound = low ? issue.minimum : issue.maximum;
+      if (issue.origin !== "number") return `${received}; it must not be empty.`;
+      return `${received}; a number ${low ? "above" : "below"}${issue.inclusive ? " or equal to" : ""} ${bound} is needed.`;
+    }
+    case "invalid_value":
+      return `${received}; allowed: ${issue.values.map((value) => JSON.stringify(value)).join(", ")}.`;
+    case "invalid_union":
+      return issue.discriminator === undefined ? undefined : unknownChoice(issue.discriminator, issue);
+    default:
+      return undefined;
+  }
+}
+
+function unknownChoice(key: string, issue: z.core.$ZodRawIssue & { options?: readonly unknown[] }): string {
+  const found = (issue.input as Record<string, unknown>)[key];
+  const options = issue.options ?? [];
+  const allowed = options.map((option) => JSON.stringify(option)).join(", ");
+  if (found === undefined) return `missing; allowed: ${allowed}.`;
+  return `${shown(found)} is not known.${suggestion(String(found), options.map(String))} Allowed: ${allowed}.`;
+}
+
+const LONGEST_SHOWN = 60;
+
+/** A value of the file as it stands there, cut where it is long. */
+function shown(value: unknown): string {
+  const text = JSON.stringify(value) ?? "nothing";
+  return text.length > LONGEST_SHOWN ? `${text.slice(0, LONGEST_SHOWN)}…` : text;
+}
