@@ -2,11 +2,8 @@ import type { QuantityName } from "../planets/quantity.ts";
 import { constants, EARTH_MASS, EARTH_RADIUS, SUN_MASS, SUN_RADIUS } from "../units/constants.ts";
 import type { Subject } from "./finding.ts";
 
-const DAY = 86400;
 const DEGREE = Math.PI / 180;
-const GIGAYEAR = 1e9 * 365.25 * DAY;
-/** 1361 W/m², the nominal total solar irradiance of IAU 2015 B3 (from memory). */
-const EARTH_INSOLATION = 1361;
+const GIGAYEAR = 1e9 * constants.julianYear.value;
 
 /** Name, with its unit, under which a quantity leaves the program, and the size of that unit in SI. */
 const displayUnits: Readonly<Record<QuantityName, readonly [name: string, unit: number]>> = {
@@ -14,12 +11,12 @@ const displayUnits: Readonly<Record<QuantityName, readonly [name: string, unit: 
   minimumMass: ["minimum_mass_earth", EARTH_MASS],
   radius: ["radius_earth", EARTH_RADIUS],
   density: ["density_kg_m3", 1],
-  period: ["period_days", DAY],
+  period: ["period_days", constants.day.value],
   semiMajorAxis: ["semi_major_axis_au", constants.astronomicalUnit.value],
   eccentricity: ["eccentricity", 1],
   inclination: ["inclination_deg", DEGREE],
   equilibriumTemperature: ["equilibrium_temperature_k", 1],
-  insolation: ["insolation_earth", EARTH_INSOLATION],
+  insolation: ["insolation_earth", constants.solarIrradiance.value],
   surfaceGravity: ["surface_gravity_m_s2", 1],
   radiusRatio: ["radius_ratio", 1],
   scaledAxis: ["scaled_axis", 1],

@@ -40,7 +40,7 @@ function describe(
   otherwise: string,
   remedy: string,
 ): Discrepancy {
-  const slips = slipsThatRepair(relation, row);
+  const slips = slipsThatRepair(relation, row, comparison);
   const cause = slips.length > 0 ? `would fit if ${slips.map((slip) => slip.words).join(", or if ")}` : otherwise;
   return {
     row,

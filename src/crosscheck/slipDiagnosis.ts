@@ -1,9 +1,6 @@
 import type { PlanetRow } from "../planets/quantity.ts";
-import { compare, type Relation } from "./relation.ts";
+import { type Comparison, compare, isViolated, type Relation } from "./relation.ts";
 import { type UnitSlip, unitSlips } from "./unitSlips.ts";
-
-/** A slip explains a disagreement if what remains after undoing it would surprise nobody [standard errors]. */
-const UNSURPRISING = 2;
 
 /** The row as it would read with the slip undone. */
 export function undoSlip(row: PlanetRow, slip: UnitSlip): PlanetRow {
@@ -19,13 +16,16 @@ export function undoSlip(row: PlanetRow, slip: UnitSlip): PlanetRow {
   return { ...row, quantities: { ...row.quantities, [slip.quantity]: corrected } };
 }
 
-/** The unit slips that would make a row obey a relation. */
-export function slipsThatRepair(relation: Relation, row: PlanetRow): UnitSlip[] {
-  const involved = [relation.quantity, ...Object.keys(relation.powers)];
-  return unitSlips.filter((slip) => involved.includes(slip.quantity) && holds(relation, undoSlip(row, slip)));
+/** Whether undoing a slip explains a disagreement: what remains is no finding, and a small part of what was. */
+export function isRepaired(before: Comparison, after: Comparison): boolean {
+  return !isViolated(after) && Math.abs(after.logRatio) < Math.abs(before.logRatio) / 3;
 }
 
-function holds(relation: Relation, row: PlanetRow): boolean {
-  const comparison = compare(relation, row);
-  return comparison !== undefined && comparison.significanceSigma < UNSURPRISING;
+/** The unit slips that would make a row obey a relation that it breaks. */
+export function slipsThatRepair(relation: Relation, row: PlanetRow, broken: Comparison): UnitSlip[] {
+  const involved = [relation.quantity, ...Object.keys(relation.powers)];
+  return unitSlips.filter((slip) => {
+    const after = involved.includes(slip.quantity) && compare(relation, undoSlip(row, slip));
+    return after && isRepaired(broken, after);
+  });
 }

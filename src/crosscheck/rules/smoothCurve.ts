@@ -1,11 +1,11 @@
 import type { MeasuredQuantity, PlanetRow } from "../../planets/quantity.ts";
 import type { Discrepancy } from "../finding.ts";
-import { groupBy } from "../groupBy.ts";
 import type { ListRule } from "../rule.ts";
 import { hasBothErrors } from "../significance.ts";
 
-/** Width in ln R of the bins looked at one by one: any smooth curve is straight over it. */
-const BIN = 0.2;
+/** Least width in ln R, and least number of rows, of the bins looked at one by one; a smooth curve is straight over 20 %. */
+const WIDTH = 0.2;
+const ROWS = 15;
 /** Rows on one line, and their share of the bin, that are beyond chance. */
 const ENOUGH = 10;
 const SHARE = 1 / 3;
@@ -38,7 +38,7 @@ function onOneLine(bin: readonly Point[]): Point[] {
   for (const a of anchors) {
     for (const b of anchors) {
       const slope = (b.mass - a.mass) / (b.radius - a.radius);
-      if (!(b.radius - a.radius > BIN / 3) || Math.abs(slope) > STEEPEST) continue;
+      if (!(b.radius - a.radius > WIDTH / 3) || Math.abs(slope) > STEEPEST) continue;
       const tolerance = ROUNDING * (1 + Math.abs(slope));
       const members = bin.filter((p) => Math.abs(p.mass - a.mass - slope * (p.radius - a.radius)) <= tolerance);
       if (members.length > best.length) best = members;
@@ -47,9 +47,27 @@ function onOneLine(bin: readonly Point[]): Point[] {
   return best.length >= Math.max(ENOUGH, SHARE * bin.length) ? best : [];
 }
 
+/** Cuts points, sorted by radius, into bins; what is left at the end joins the last bin. */
+function binned(points: readonly Point[]): Point[][] {
+  const bins: Point[][] = [[]];
+  for (const [i, point] of points.entries()) {
+    const current = bins.at(-1) as Point[];
+    const width = point.radius - (current[0]?.radius ?? point.radius);
+    const full = width > WIDTH && current.length >= ROWS && points.length - i >= ROWS;
+    if (full) bins.push([point]);
+    else current.push(point);
+  }
+  return bins;
+}
+
 function test(rows: readonly PlanetRow[]): readonly Discrepancy[] {
-  const bins = groupBy(rows.flatMap(candidate), ({ radius }) => String(Math.floor(radius / BIN)));
-  const found = [...bins.values()].flatMap(onOneLine).map(({ row }) => row);
+  const points = rows.flatMap(candidate).sort((a, b) => a.radius - b.radius);
+  const found =
+    points.length < ROWS
+      ? []
+      : binned(points)
+          .flatMap(onOneLine)
+          .map(({ row }) => row);
   return found.map((row) => ({
     row,
     quantity: row.quantities.mass && hasBothErrors(row.quantities.mass) ? "radius" : "mass",

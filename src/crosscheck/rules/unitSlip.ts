@@ -3,7 +3,7 @@ import type { Discrepancy } from "../finding.ts";
 import { compare, isViolated } from "../relation.ts";
 import { relationRules } from "../relationRules.ts";
 import type { RowRule } from "../rule.ts";
-import { undoSlip } from "../slipDiagnosis.ts";
+import { isRepaired, undoSlip } from "../slipDiagnosis.ts";
 import { type UnitSlip, unitSlips } from "../unitSlips.ts";
 
 const violations = (row: PlanetRow) =>
@@ -11,16 +11,13 @@ const violations = (row: PlanetRow) =>
     .map(({ relation }) => compare(relation, row))
     .filter((found) => found !== undefined && isViolated(found));
 
-/** What is left of the gravest disagreement once it would surprise nobody [standard errors]. */
-const UNSURPRISING = 2;
-
 function repairsAll(row: PlanetRow, slip: UnitSlip): boolean {
   const corrected = undoSlip(row, slip);
   return relationRules.every(({ relation }) => {
     const before = compare(relation, row);
     const after = compare(relation, corrected);
     if (!before || !after) return true;
-    return isViolated(before) ? after.significanceSigma < UNSURPRISING : !isViolated(after);
+    return isViolated(before) ? isRepaired(before, after) : !isViolated(after);
   });
 }
 
