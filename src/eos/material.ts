@@ -19,8 +19,8 @@ export interface Phase {
   /** Top of the data behind the parameters [Pa]; a result that used the phase beyond it is extrapolated. */
   readonly calibratedTo: number;
   readonly source: Source;
-  /** The phases mixed, if this is a mixture; their sources are its sources. */
-  readonly components?: readonly Phase[];
+  /** What is mixed, if this is a mixture; the sources of its parts are its sources. */
+  readonly components?: readonly { readonly material: string; readonly phase: Phase }[];
 }
 
 /** A substance as a stack of phases, lowest pressure first, without gaps. */

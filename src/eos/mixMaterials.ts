@@ -28,16 +28,17 @@ export function mixMaterials(parts: readonly MaterialPart[]): Material {
 const percent = (fraction: number): string => `${Number((100 * fraction).toPrecision(6))} %`;
 
 function mixPhases(parts: readonly MaterialPart[], fromPressure: number, untilPressure: number): Phase {
-  const components = parts.map(({ material }) => phaseAt(material, fromPressure));
+  const components = parts.map(({ material }) => ({ material: material.name, phase: phaseAt(material, fromPressure) }));
+  const phases = components.map(({ phase }) => phase);
   return {
-    name: components.map(({ name }) => name).join("+"),
+    name: phases.map(({ name }) => name).join("+"),
     form: "mixture",
-    curve: mixCurves(components.map(({ curve }, i) => ({ curve, massFraction: parts[i].massFraction }))),
+    curve: mixCurves(phases.map(({ curve }, i) => ({ curve, massFraction: parts[i].massFraction }))),
     fromPressure,
     untilPressure,
-    calibratedTo: Math.min(...components.map(({ calibratedTo }) => calibratedTo)),
+    calibratedTo: Math.min(...phases.map(({ calibratedTo }) => calibratedTo)),
     source: {
-      citation: [...new Set(components.map(({ source }) => source.citation))].join("; "),
+      citation: [...new Set(phases.map(({ source }) => source.citation))].join("; "),
       note: "volumes add at equal pressure",
     },
     components,

@@ -1,4 +1,5 @@
 import { InputError } from "../errors.ts";
+import { nearest } from "./nearest.ts";
 import { parseJson } from "./parseJson.ts";
 
 /** A file of a library. A JSON file in a folder `materials` defines a material, any other a composition. */
@@ -29,10 +30,12 @@ export function entryOf({ path, text }: LibraryFile): Entry {
   const { [kind]: name, title } = fields;
   if (typeof name === "string" && typeof title === "string") return { kind, name, title, path, content };
   const key = typeof name === "string" ? "title" : kind;
+  const misspelt = nearest(key, Object.keys(fields));
   throw new InputError(
     "library-name",
-    `${path}: a ${kind} file is an object with "${kind}": its name, and "title"; here "${key}" is missing or not text ` +
-      `(files in a folder "materials" are materials, all others compositions).`,
+    `${path}: "${key}" is missing or not text; a ${kind} file is an object with "${kind}" (its name) and "title".` +
+      `${misspelt === undefined ? "" : ` Is "${misspelt}" meant for it?`} Files in a folder "materials" are materials, ` +
+      "all others compositions.",
     { file: path, column: key },
   );
 }

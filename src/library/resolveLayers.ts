@@ -32,8 +32,12 @@ function mix(parts: readonly PartEntry[], key: string, lookup: NameLookup): Mate
   return mixMaterials(normalised(resolved.filter(({ massFraction }) => massFraction > 0)));
 }
 
+/** Beyond what adding a few fractions in binary loses. */
+const ROUNDING = 1e-14;
+
 /** Takes out what the check of the file tolerates, so that the fractions sum to 1 to rounding. */
-function normalised<Part extends { massFraction: number }>(parts: readonly Part[]): Part[] {
+function normalised<Part extends { massFraction: number }>(parts: Part[]): Part[] {
   const sum = parts.reduce((total, { massFraction }) => total + massFraction, 0);
+  if (Math.abs(sum - 1) <= ROUNDING) return parts;
   return parts.map((part) => ({ ...part, massFraction: part.massFraction / sum }));
 }

@@ -1,6 +1,7 @@
 import type { z } from "zod";
 import { InputError } from "../errors.ts";
 import { suggestion } from "./nearest.ts";
+import { shown } from "./shown.ts";
 
 /** The value as the schema reads it, or all that is wrong with it, each with file, key path and what is allowed. */
 export function validate<Schema extends z.ZodType>(
@@ -9,26 +10,36 @@ export function validate<Schema extends z.ZodType>(
   value: unknown,
 ): { value: z.output<Schema>; problems?: never } | { value?: never; problems: InputError[] } {
   const result = schema.safeParse(value, { error: describe, reportInput: true });
-  return result.success
-    ? { value: result.data }
-    : { problems: result.error.issues.map((issue) => problem(file, issue)) };
+  if (result.success) return { value: result.data };
+  // A misspelt key is first an unknown one and then a missing one; the former says more.
+  const unknownFirst = [...result.error.issues].sort((a, b) => Number(isUnknownKey(b)) - Number(isUnknownKey(a)));
+  return { problems: unknownFirst.flatMap((issue) => problemsOf(file, issue)) };
 }
 
-function problem(file: string, issue: z.core.$ZodIssue): InputError {
-  const keyPath = issue.path
+const isUnknownKey = (issue: z.core.$ZodIssue): issue is z.core.$ZodIssueUnrecognizedKeys =>
+  issue.code === "unrecognized_keys";
+
+function problemsOf(file: string, issue: z.core.$ZodIssue): InputError[] {
+  if (isUnknownKey(issue)) {
+    const messages = issue.message.split("\n");
+    const values = issue.input as Record<string, unknown>;
+    return issue.keys.map((key, i) => problem("unknown-key", file, [...issue.path, key], values[key], messages[i]));
+  }
+  const code = issue.code === "custom" ? String(issue.params?.code ?? "wrong-value") : "wrong-value";
+  return [problem(code, file, issue.path, issue.input, issue.message)];
+}
+
+function problem(code: string, file: string, path: PropertyKey[], found: unknown, message: string): InputError {
+  const keyPath = path
     .map((key) => (typeof key === "number" ? `[${key}]` : `.${String(key)}`))
     .join("")
     .slice(1);
-  const code =
-    issue.code === "unrecognized_keys" ? "unknown-key" : issue.code === "custom" ? customCode(issue) : "wrong-value";
-  return new InputError(code, `${file}: ${keyPath === "" ? "" : `${keyPath}: `}${issue.message}`, {
+  return new InputError(code, `${file}: ${keyPath === "" ? "" : `${keyPath}: `}${message}`, {
     file,
     column: keyPath,
-    found: shown(issue.input),
+    found: shown(found),
   });
 }
-
-const customCode = (issue: z.core.$ZodIssueCustom): string => String(issue.params?.code ?? "wrong-value");
 
 const articles: Readonly<Record<string, string>> = {
   number: "a number",
@@ -65,12 +76,4 @@ function unknownChoice(key: string, issue: z.core.$ZodRawIssue & { options?: rea
   const allowed = options.map((option) => JSON.stringify(option)).join(", ");
   if (found === undefined) return `missing; allowed: ${allowed}.`;
   return `${shown(found)} is not known.${suggestion(String(found), options.map(String))} Allowed: ${allowed}.`;
-}
-
-const LONGEST_SHOWN = 60;
-
-/** A value of the file as it stands there, cut where it is long. */
-function shown(value: unknown): string {
-  const text = JSON.stringify(value) ?? "nothing";
-  return text.length > LONGEST_SHOWN ? `${text.slice(0, LONGEST_SHOWN)}…` : text;
 }
