@@ -106,13 +106,13 @@ export class CentralBall {
     const v = w[edge] * s;
     state[0] = v;
     state[1] = y[edge];
-    state[2] = v * wLogPrime[edge];
-    state[3] = yPrime[edge];
+    state[4] = v * wLogPrime[edge];
+    state[5] = yPrime[edge];
     // I = ∫ v √s ds and U = ∫ (3/2) G s²/√v ds = ∫ (3/2) G √s (s/√w) ds.
     for (let i = 0; i < NODES; i++) work[i] = w[i] * nodes[i];
-    state[4] = s ** 2.5 * dot(ballMean[edge], work);
+    state[2] = s ** 2.5 * dot(ballMean[edge], work);
     for (let i = 0; i < NODES; i++) work[i] = nodes[i] / Math.sqrt(w[i]);
-    state[5] = 1.5 * G * s ** 2.5 * dot(ballMean[edge], work);
+    state[3] = 1.5 * G * s ** 2.5 * dot(ballMean[edge], work);
   }
 }
 

@@ -111,7 +111,10 @@ function checkTable({ radius, density }: DensityTable): void {
     });
   };
   if (radius.length < 2 || radius.length !== density.length) {
-    throw new InputError("density-table-radius", `A density table needs at least two rows; this one has ${radius.length}.`);
+    throw new InputError(
+      "density-table-radius",
+      `A density table needs at least two rows; this one has ${radius.length}.`,
+    );
   }
   radius.forEach((r, i) => {
     if (i === 0 && r !== 0) {

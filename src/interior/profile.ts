@@ -3,7 +3,7 @@ import { RungeKutta8 } from "../numerics/rungeKutta8.ts";
 import { G } from "../units/constants.ts";
 import { CentralBall } from "./centralBall.ts";
 import type { Planet } from "./planet.ts";
-import { STATE_SIZE, StructureEquations } from "./structureEquations.ts";
+import { CONTROLLED, STATE_SIZE, StructureEquations } from "./structureEquations.ts";
 import { DEFAULT_TOLERANCE, StructureSolver } from "./structureSolver.ts";
 import { type Stretch, TrialIntegration } from "./trialIntegration.ts";
 
@@ -87,7 +87,7 @@ function radiusOf({ state, byMass }: Waypoint): number {
 /** Turns waypoints, and radii between them, into profile points. */
 class Sampler {
   private readonly equations: StructureEquations;
-  private readonly stepper = new RungeKutta8(STATE_SIZE, 2);
+  private readonly stepper = new RungeKutta8(STATE_SIZE, CONTROLLED);
   private readonly state = new Float64Array(STATE_SIZE);
   private readonly slope = new Float64Array(STATE_SIZE);
   private readonly centralPressure: number;

@@ -13,7 +13,7 @@ const COARSE_TOLERANCE = 1e-6;
 /** Below this Newton step the coarse tolerance would only waste a round. */
 const NEARLY_THERE = 1e-3;
 /** A Newton step below this in ln P_c ends the search. */
-const ACCEPTED_STEP = 1e-8;
+const ACCEPTED_STEP = 1e-9;
 const MAX_ROUNDS = 200;
 /** A mass excess below this many times the summed error estimate has no trustworthy sign. */
 const SIGN_MARGIN = 30;

@@ -147,19 +147,25 @@ export class StructureSolver {
   private findMaximum(unsolvable: number, excess: number): number {
     let solvable = 0;
     let above = unsolvable;
-    let candidate = unsolvable * Math.exp(excess);
+    let candidate = unsolvable * held(excess);
     for (let round = 0; round < ROUNDS && above > solvable * (1 + 2 * MAXIMUM_MASS_PRECISION); round++) {
       const shot = this.shoot(candidate);
       if (shot.outcome === "found") {
+        // The first one found is often the maximum itself: look just above it before halving the gap.
+        const justAbove = solvable === 0;
         solvable = candidate;
-        const justAbove = candidate * (1 + MAXIMUM_MASS_PRECISION);
-        candidate = round < 3 ? justAbove : Math.sqrt(solvable * above);
+        candidate = justAbove ? solvable * (1 + MAXIMUM_MASS_PRECISION) : Math.sqrt(solvable * above);
       } else {
         above = candidate;
-        const held = shot.outcome === "above-maximum" ? candidate * Math.exp(shot.excess) : candidate / 2;
-        candidate = solvable > 0 ? Math.sqrt(solvable * above) : Math.min(held, candidate * (1 - MAXIMUM_MASS_PRECISION));
+        const share = shot.outcome === "above-maximum" ? held(shot.excess) : 0.5;
+        candidate = solvable > 0 ? Math.sqrt(solvable * above) : candidate * share;
       }
     }
     return solvable;
   }
+}
+
+/** Share of the mass asked for that the best trial held; half where no trial reached a surface at all. */
+function held(excess: number): number {
+  return excess === -Infinity ? 0.5 : Math.min(Math.exp(excess), 1 - MAXIMUM_MASS_PRECISION);
 }

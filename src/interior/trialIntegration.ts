@@ -3,7 +3,7 @@ import type { Composition, Layer } from "../library/composition.ts";
 import { AdaptiveIntegrator } from "../numerics/adaptiveIntegrator.ts";
 import { CentralBall } from "./centralBall.ts";
 import type { Boundary } from "./planet.ts";
-import { STATE_SIZE, StructureEquations } from "./structureEquations.ts";
+import { CONTROLLED, STATE_SIZE, StructureEquations } from "./structureEquations.ts";
 
 /** What one integration from the centre with a trial central pressure found. */
 export type TrialOutcome =
@@ -28,7 +28,7 @@ export interface Stretch {
  */
 export class TrialIntegration {
   readonly composition: Composition;
-  readonly integrator = new AdaptiveIntegrator(STATE_SIZE, 2);
+  readonly integrator = new AdaptiveIntegrator(STATE_SIZE, CONTROLLED);
   readonly equations: StructureEquations;
   private readonly centralBall = new CentralBall();
   private readonly layers: readonly Layer[];
@@ -175,11 +175,11 @@ export class TrialIntegration {
     }
     this.boundary("surface", stretch, state[0] ** 1.5, state[1], surfacePressure);
     this.logMassExcess = 1.5 * Math.log(state[0] / totalS);
-    this.logMassExcessSlope = (1.5 * state[2]) / state[0];
+    this.logMassExcessSlope = (1.5 * state[4]) / state[0];
     this.radiusSquared = state[1];
-    this.radiusSquaredSlope = state[3];
-    this.inertia = state[4];
-    this.bindingEnergy = state[5];
+    this.radiusSquaredSlope = state[5];
+    this.inertia = state[2];
+    this.bindingEnergy = state[3];
     return "surface";
   }
 
@@ -206,4 +206,3 @@ export class TrialIntegration {
     });
   }
 }
-
