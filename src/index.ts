@@ -1,0 +1,1 @@
+export { StructureSolver } from "./interior/structureSolver.ts";
