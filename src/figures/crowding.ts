@@ -1,7 +1,7 @@
 import type { DensityMap, Estimate, LogAxis, PlanetMark } from "./figureSpec.ts";
 
 /** Drawn one by one at most; beyond this a page becomes slow to open and to move about in. */
-export const singlePlanetLimit = 4000;
+export const singlePlanetLimit = 3000;
 
 /** Up to here every planet has room for its error bars. */
 const fadeAbove = 60;

@@ -62,7 +62,10 @@ export interface FigurePlanet {
   readonly mass: Estimate | null;
   /** Earth radii. */
   readonly radius: Estimate | null;
+  /** One of `FigureSpec.verdicts`: decides symbol and colour, and is what the legend calls them. */
   readonly verdict: string | null;
+  /** The verdict on this planet in one plain sentence; null where `verdict` says it all. */
+  readonly statement: string | null;
   /** Why there is no verdict, or why the planet is not drawn. */
   readonly reason: string | null;
   readonly note: string | null;

@@ -1,5 +1,6 @@
 import { escapeHtml } from "./escape.ts";
 import type { FigureSpec } from "./figureSpec.ts";
+import { formatCount } from "./formatValue.ts";
 import {
   curveColour,
   curveGroup,
@@ -34,14 +35,14 @@ function verdictEntries({ marks, verdicts }: FigureSpec): string[] {
     const count = counts.get(verdict);
     if (count === undefined) return [];
     const label = verdict === null ? "no verdict" : (verdicts[verdict] ?? "");
-    return [entry(verdictGroup(verdict), markSwatch(verdictStyle(verdict)), `${label} (${count})`)];
+    return [entry(verdictGroup(verdict), markSwatch(verdictStyle(verdict)), `${label} (${formatCount(count)})`)];
   });
 }
 
 function densityEntry({ density }: FigureSpec): string[] {
   if (density === null) return [];
   const swatch = svg('<rect x="1" y="1" width="22" height="14" fill="var(--density-high)"/>');
-  return [entry(densityGroup, swatch, `counted, not drawn one by one (${density.total})`)];
+  return [entry(densityGroup, swatch, `counted, not drawn one by one (${formatCount(density.total)})`)];
 }
 
 const lineSwatch = (curve: number): string =>

@@ -1,5 +1,6 @@
 import { markPlanets, type PlacedPlanet } from "./crowding.ts";
 import type { FigureCaption, FigureCurve, FigurePlanet, FigureSpec } from "./figureSpec.ts";
+import { formatCount } from "./formatValue.ts";
 import { logRange } from "./logRange.ts";
 import { extrapolationWarning, figureCurves, layersInWords } from "./massRadiusCurves.ts";
 import type { MassRadiusInput } from "./massRadiusInput.ts";
@@ -61,11 +62,11 @@ function summary(curves: number, planets: number, drawn: number): string {
   const first = `${count(curves, "mass–radius curve")} computed from equations of state`;
   if (planets === 0) return `${first}.`;
   const rest = planets - drawn;
-  const left = rest === 0 ? "" : ` and ${rest} only in the table, with the reason`;
-  return `${first}, and ${count(planets, "planet")}: ${drawn} in the diagram${left}.`;
+  const left = rest === 0 ? "" : ` and ${formatCount(rest)} only in the table, with the reason`;
+  return `${first}, and ${count(planets, "planet")}: ${formatCount(drawn)} in the diagram${left}.`;
 }
 
-const count = (n: number, noun: string): string => `${n} ${noun}${n === 1 ? "" : "s"}`;
+const count = (n: number, noun: string): string => `${formatCount(n)} ${noun}${n === 1 ? "" : "s"}`;
 
 function caption(
   input: MassRadiusInput,
@@ -97,6 +98,8 @@ function notes(planets: boolean, { faded, shaded }: { faded: boolean; shaded: nu
           "Fainter planets are less precise: relative errors of mass and radius, added in quadrature, above 15 % and above 35 %.",
         ]
       : []),
-    ...(shaded > 0 ? [`Shading counts the ${shaded} least precise planets, which are not drawn one by one.`] : []),
+    ...(shaded > 0
+      ? [`Shading counts the ${formatCount(shaded)} least precise planets, which are not drawn one by one.`]
+      : []),
   ];
 }

@@ -11,11 +11,11 @@ export function planetTable({ planets, columns, axes }: FigureSpec): PageTable {
     ...columns.map((column) => ({ ...column, numeric: true })),
     { title: "Note", wide: true },
   ];
-  const rows = planets.map(({ name, mass, radius, verdict, reason, values, note }): FigureValue[] => [
+  const rows = planets.map(({ name, mass, radius, verdict, statement, reason, values, note }): FigureValue[] => [
     name,
     mass,
     radius,
-    verdict ?? `none: ${reason ?? "not classified"}`,
+    statement ?? verdict ?? `none: ${reason ?? "not classified"}`,
     ...values,
     note,
   ]);
@@ -36,8 +36,8 @@ export function curveTable({ curves, axes }: FigureSpec): PageTable {
     id: "curves",
     caption: `Radius (${axes.radius.unit}) of each composition; blank where no planet was found`,
     columns: [
-      { title: "Mass", unit: axes.mass.unit, numeric: true },
-      ...curves.map(({ label }) => ({ title: label, numeric: true })),
+      { title: "Mass", unit: axes.mass.unit, numeric: true, digits: 6 },
+      ...curves.map(({ label }) => ({ title: label, numeric: true, digits: 5 })),
     ],
     rows: masses.map((mass) => [mass, ...radii.map((radius) => radius.get(mass) ?? null)]),
   };

@@ -6,7 +6,7 @@ import { tickCount } from "./tickCount.ts";
 
 export type PlotlyLayout = Readonly<Record<string, unknown>>;
 
-const wideHeight = 640;
+const wideHeight = 660;
 const compactHeight = 440;
 const widestMargin = 190;
 /** Plotting widths at which labels must be clear: the narrowest page that shows them, and the widest. */
@@ -14,14 +14,14 @@ const labelledWidths = [500, 1050];
 
 /** With curve names beside the curves; for pages that have the room. */
 export function wideLayout(spec: FigureSpec): PlotlyLayout {
-  const height = wideHeight - 70;
+  const height = wideHeight - 90;
   const frames = labelledWidths.map((width) => ({ width, height, margin: widestMargin }));
   const labels = curveLabels(spec, frames);
   const widest = Math.max(0, ...labels.map(({ curve }) => labelWidth(spec.curves[curve]?.label ?? "")));
   return {
     ...sharedLayout(spec, { width: 560, height }),
     height: wideHeight,
-    margin: { l: 64, r: Math.min(widestMargin, widest + 12) || 16, t: 14, b: 56 },
+    margin: { l: 64, r: Math.min(widestMargin, widest + 12) || 16, t: 34, b: 56 },
     annotations: labels.map((label) => annotation(spec, label)),
     dragmode: "zoom",
   };

@@ -6,13 +6,17 @@ import { curveColour, curveGroup, densityGroup, symbolScale, verdictGroup, verdi
 /** A Plotly trace; colours are CSS variables that the drawing script resolves. */
 export type PlotlyTrace = Readonly<Record<string, unknown>>;
 
-/** Everything drawn, from the back to the front: shading, curves, faint planets, precise planets. */
+/**
+ * Everything drawn, from the back to the front: shading, curves, faint planets, precise planets. Where planets crowd,
+ * the curves come last, with a margin of paper, or they would be buried.
+ */
 export function plotlyTraces(spec: FigureSpec): PlotlyTrace[] {
-  return [
-    ...(spec.density ? [densityTrace(spec.density)] : []),
-    ...spec.curves.flatMap(curveTraces),
-    ...([2, 1, 0] as const).flatMap((fade) => planetTraces(spec, fade)),
-  ];
+  const crowded = spec.marks.some(({ fade }) => fade > 0);
+  const shading = spec.density ? [densityTrace(spec.density)] : [];
+  const planets = ([2, 1, 0] as const).flatMap((fade) => planetTraces(spec, fade));
+  const curves = spec.curves.flatMap(curveTraces);
+  if (!crowded) return [...shading, ...curves, ...planets];
+  return [...shading, ...planets, ...spec.curves.map(curveMargin), ...curves];
 }
 
 /** A curve of few points shows where they are. */
@@ -38,6 +42,19 @@ function curveTraces(curve: FigureCurve, index: number): PlotlyTrace[] {
   const solid = beyond > 0 ? [part(0, beyond, "solid")] : [];
   const dashed = beyond < mass.length ? [part(Math.max(0, beyond - 1), mass.length, "7px,3px")] : [];
   return [...solid, ...dashed];
+}
+
+function curveMargin({ mass, radius }: FigureCurve, index: number): PlotlyTrace {
+  const line = { color: "var(--paper)", width: 5 };
+  return {
+    type: "scatter",
+    mode: "lines",
+    legendgroup: curveGroup(index),
+    x: mass,
+    y: radius,
+    line,
+    hoverinfo: "skip",
+  };
 }
 
 function curveHover({ label, mass, radius, extrapolatedFrom }: FigureCurve, i: number): string {
@@ -105,7 +122,10 @@ function errorBars(estimates: readonly Estimate[], color: string): PlotlyTrace {
   };
 }
 
-function planetHover({ name, mass, radius, verdict, reason, note, values }: FigurePlanet, spec: FigureSpec): string {
+function planetHover(
+  { name, mass, radius, verdict, statement, reason, note, values }: FigurePlanet,
+  spec: FigureSpec,
+): string {
   const lines = values.flatMap((value, i) => {
     const column = spec.columns[i];
     if (value === null || value === "" || !column) return [];
@@ -115,7 +135,7 @@ function planetHover({ name, mass, radius, verdict, reason, note, values }: Figu
     name,
     `${formatValue(mass)} ${spec.axes.mass.unit}`,
     `${formatValue(radius)} ${spec.axes.radius.unit}`,
-    verdict ?? `no verdict: ${reason ?? "not classified"}`,
+    statement ?? verdict ?? `no verdict: ${reason ?? "not classified"}`,
     ...lines,
     ...(note ? [note] : []),
   ]);

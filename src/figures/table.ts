@@ -1,6 +1,6 @@
 import { escapeHtml } from "./escape.ts";
 import type { FigureValue } from "./figureSpec.ts";
-import { formatValue } from "./formatValue.ts";
+import { formatCount, formatValue } from "./formatValue.ts";
 
 /** A page stays usable with this many rows; the output file of the same run holds all. */
 export const tableRowLimit = 10_000;
@@ -19,6 +19,8 @@ export interface TableColumn {
   readonly unit?: string;
   /** Numbers line up on the right. */
   readonly numeric?: boolean;
+  /** Significant digits of plain numbers. */
+  readonly digits?: number;
   /** Sentences need room. */
   readonly wide?: boolean;
 }
@@ -29,7 +31,8 @@ export interface TableColumn {
  */
 export function tableHtml({ id, caption, columns, rows }: PageTable): string {
   const shown = rows.slice(0, tableRowLimit);
-  const cut = shown.length < rows.length ? `; the first ${shown.length} of ${rows.length} rows` : "";
+  const cut =
+    shown.length < rows.length ? `; the first ${formatCount(shown.length)} of ${formatCount(rows.length)} rows` : "";
   const head = columns.map((column) => `<th scope="col"${cellClass(column)}>${columnTitle(column)}</th>`).join("");
   const body = shown.map((row) => rowHtml(row, columns)).join("\n");
   const long = shown.length > 300 ? " long" : "";
@@ -50,7 +53,7 @@ function columnTitle({ title, unit }: TableColumn): string {
 
 function rowHtml(row: readonly FigureValue[], columns: readonly TableColumn[]): string {
   const cells = row.map((value, i) => {
-    const text = `<bdi>${escapeHtml(formatValue(value))}</bdi>`;
+    const text = `<bdi>${escapeHtml(formatValue(value, columns[i]?.digits))}</bdi>`;
     if (i === 0) return `<th scope="row"${cellClass(columns[0])}>${text}</th>`;
     return value === null ? "<td></td>" : `<td${cellClass(columns[i])}>${text}</td>`;
   });

@@ -5,7 +5,7 @@
  */
 export function tickCount(spanDecades: number, pixels: number, labelPixels: number): number {
   const fits = (closestDecades: number) => (pixels / spanDecades) * closestDecades >= labelPixels;
-  if (spanDecades < 1) return Math.max(2, Math.floor(pixels / (2.5 * labelPixels)));
+  if (spanDecades < 1) return Math.max(2, Math.floor(pixels / (5 * labelPixels)));
   if (fits(Math.log10(10 / 9))) return Math.ceil(spanDecades / 0.28);
   if (fits(Math.log10(2))) return Math.ceil(spanDecades / 0.5);
   return Math.max(1, Math.floor(spanDecades / 0.75));

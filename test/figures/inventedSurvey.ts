@@ -89,6 +89,7 @@ const planets: FigurePlanet[] = rows.map(([name, mass, radius, verdict, reason],
   mass: reason === "mass has no error" ? null : mass,
   radius,
   verdict: verdict === null ? null : (verdicts[verdict] as string),
+  statement: verdict === null ? null : `${verdicts[verdict]} (p = 0.94)`,
   reason,
   note: name === "Cobalt c" ? "radius from two transits only" : null,
   values:
