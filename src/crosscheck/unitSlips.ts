@@ -29,20 +29,23 @@ const thousandfold: readonly QuantityName[] = [
 
 const masses = ["mass", "minimumMass"] as const;
 
+/** `minimumMass` as people write it. */
+const inWords = (quantity: QuantityName) => quantity.replace(/[A-Z]/g, (capital) => ` ${capital.toLowerCase()}`);
+
 /** The confusions that planet lists are known for. */
 export const unitSlips: readonly UnitSlip[] = [
   ...masses.flatMap((quantity) => [
     ...bothWays(
       quantity,
       JUPITER_MASS / EARTH_MASS,
-      `${quantity} is in Jupiter masses and was read as Earth masses`,
-      `${quantity} is in Earth masses and was read as Jupiter masses`,
+      `${inWords(quantity)} is in Jupiter masses and was read as Earth masses`,
+      `${inWords(quantity)} is in Earth masses and was read as Jupiter masses`,
     ),
     ...bothWays(
       quantity,
       SUN_MASS / JUPITER_MASS,
-      `${quantity} is in solar masses and was read as Jupiter masses`,
-      `${quantity} is in Jupiter masses and was read as solar masses`,
+      `${inWords(quantity)} is in solar masses and was read as Jupiter masses`,
+      `${inWords(quantity)} is in Jupiter masses and was read as solar masses`,
     ),
   ]),
   ...bothWays(
@@ -72,6 +75,11 @@ export const unitSlips: readonly UnitSlip[] = [
     "surface gravity is in cm/s² and was read as m/s²",
   ),
   ...thousandfold.flatMap((quantity) =>
-    bothWays(quantity, 1000, `${quantity} is a factor 1000 too small`, `${quantity} is a factor 1000 too large`),
+    bothWays(
+      quantity,
+      1000,
+      `${inWords(quantity)} is a factor 1000 too small`,
+      `${inWords(quantity)} is a factor 1000 too large`,
+    ),
   ),
 ];

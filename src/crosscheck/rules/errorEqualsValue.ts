@@ -1,19 +1,10 @@
-import type { PlanetRow, QuantityName } from "../../planets/quantity.ts";
+import type { PlanetRow } from "../../planets/quantity.ts";
 import type { Discrepancy } from "../finding.ts";
+import { nonZeroQuantities } from "../nonZeroQuantities.ts";
 import type { RowRule } from "../rule.ts";
 
-/** Quantities that cannot be negative and whose errors are far below them once measured. */
-const positiveQuantities: readonly QuantityName[] = [
-  "mass",
-  "minimumMass",
-  "radius",
-  "density",
-  "semiMajorAxis",
-  "period",
-];
-
 function test(row: PlanetRow): readonly Discrepancy[] {
-  return positiveQuantities.flatMap((name) => {
+  return nonZeroQuantities.flatMap((name) => {
     const quantity = row.quantities[name];
     const coded = quantity?.limitCoding === "error-equals-value";
     if (!quantity || !(coded || (quantity.value > 0 && quantity.minus === quantity.value))) return [];

@@ -1,13 +1,14 @@
 import type { PlanetRow } from "../../planets/quantity.ts";
 import type { Discrepancy } from "../finding.ts";
 import type { RowRule } from "../rule.ts";
+import { isSilentMinimum } from "../silentMinimum.ts";
 
 /** At this inclination and above, mass and minimum mass agree within a per cent and equality says nothing. */
 const EDGE_ON = Math.asin(0.99);
 
 function test(row: PlanetRow): readonly Discrepancy[] {
   const { mass, minimumMass, inclination } = row.quantities;
-  if (!mass || !minimumMass || mass.kind === "minimum" || mass.value !== minimumMass.value) return [];
+  if (!mass || !minimumMass || !isSilentMinimum(row)) return [];
   if (inclination && Math.abs(inclination.value - Math.PI / 2) < Math.PI / 2 - EDGE_ON) return [];
   return [
     {

@@ -1,10 +1,11 @@
 import type { PlanetRow } from "../../planets/quantity.ts";
 import type { Discrepancy } from "../finding.ts";
 import type { RowRule } from "../rule.ts";
+import { isSilentMinimum } from "../silentMinimum.ts";
 
 function test(row: PlanetRow): readonly Discrepancy[] {
   const { mass } = row.quantities;
-  if (mass?.kind !== "minimum") return [];
+  if (mass?.kind !== "minimum" || isSilentMinimum(row)) return [];
   return [
     {
       row,

@@ -44,7 +44,7 @@ function compareTwins(
 function test(row: PlanetRow): readonly Discrepancy[] {
   return Object.entries(row.twins ?? {}).flatMap(([name, twins]) => {
     const used = row.quantities[name as QuantityName];
-    return used ? twins.flatMap((twin) => compareTwins(row, name as QuantityName, used, twin)) : [];
+    return used && twins ? twins.flatMap((twin) => compareTwins(row, name as QuantityName, used, twin)) : [];
   });
 }
 

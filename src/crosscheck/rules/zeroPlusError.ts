@@ -1,21 +1,22 @@
-import type { PlanetRow, QuantityName } from "../../planets/quantity.ts";
+import type { PlanetRow } from "../../planets/quantity.ts";
 import type { Discrepancy } from "../finding.ts";
+import { nonZeroQuantities } from "../nonZeroQuantities.ts";
 import type { RowRule } from "../rule.ts";
 
 function test(row: PlanetRow): readonly Discrepancy[] {
-  return Object.entries(row.quantities).flatMap(([name, { value, limitCoding }]) =>
-    limitCoding === "zero-with-error"
-      ? [
-          {
-            row,
-            quantity: name as QuantityName,
-            value,
-            explanation: "0 with an upper error only: an upper limit written as a measurement",
-            remedy: "use it as the upper limit that it is",
-          },
-        ]
-      : [],
-  );
+  return nonZeroQuantities.flatMap((name) => {
+    const quantity = row.quantities[name];
+    if (quantity?.limitCoding !== "zero-with-error") return [];
+    return [
+      {
+        row,
+        quantity: name,
+        value: quantity.value,
+        explanation: "0 with an upper error only: an upper limit written as a measurement",
+        remedy: "use it as the upper limit that it is",
+      },
+    ];
+  });
 }
 
 export const zeroPlusError: RowRule = {

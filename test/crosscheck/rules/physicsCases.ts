@@ -66,12 +66,18 @@ export const physicsCases: readonly RuleCase[] = [
     fires: [
       { why: "equal", rows: one({ mass: [3.21, 0.1], minimumMass: [3.21, 0.1] }), severity: "warning" },
       {
+        why: "equal, and the reader noticed",
+        rows: one({ mass: [3.21, 0.1, { kind: "minimum" }], minimumMass: [3.21, 0.1] }),
+        severity: "warning",
+      },
+      {
         why: "equal at 45°",
         rows: one({ mass: [3.21, 0.1], minimumMass: [3.21, 0.1], inclination: 45 }),
         severity: "warning",
       },
     ],
     silent: [
+      { why: "equal as stated", rows: one({ mass: 3.21, minimumMass: 3.21 }, { massProvenance: "Msini" }) },
       { why: "different", rows: one({ mass: [3.41, 0.1], minimumMass: [3.21, 0.1] }) },
       { why: "edge-on", rows: one({ mass: [3.21, 0.1], minimumMass: [3.21, 0.1], inclination: 90.4 }) },
     ],
