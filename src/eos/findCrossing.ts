@@ -25,8 +25,8 @@ export function findCrossing(lower: EosCurve, upper: EosCurve, fromPressure: num
     const here = excess(above);
     if (Math.abs(here) < closest.excess) closest = { excess: Math.abs(here), pressure: above };
     const startsLighter = above === below && here < 0;
+    if (here <= 0 && !startsLighter) break;
     if (above >= end || startsLighter) throw neverCross(fromPressure, closest);
-    if (here <= 0) break;
     below = above;
     above = Math.min(above * SCAN_RATIO, end);
   }
