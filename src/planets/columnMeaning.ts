@@ -18,6 +18,9 @@ export interface TextMeaning {
   readonly rank: number;
 }
 
+/** No column name is longer; what is longer is not searched for meanings. */
+const NAME_LIMIT = 200;
+
 const quantityNames = Object.keys(quantityColumns) as QuantityName[];
 const words = (list = ""): string[] => list.split(" ").filter((word) => word !== "");
 
@@ -55,6 +58,7 @@ function addIfNew(name: string, quantity: QuantityName): void {
 
 /** All readings of a column name as a quantity: none, one, or two where the name alone cannot tell. */
 export function quantityMeanings(name: string, known?: KnownList): QuantityMeaning[] {
+  if (name.length > NAME_LIMIT) return [];
   const { base, unitText } = splitUnitText(name);
   const keys = [columnKey(name), columnKey(base), camelKey(base)];
   for (const key of new Set([...keys, ...keys.map(renamed)])) {
@@ -75,7 +79,7 @@ export function quantityMeanings(name: string, known?: KnownList): QuantityMeani
 }
 
 export const textMeaning = (name: string): TextMeaning | undefined =>
-  textNames.get(columnKey(name)) ?? textNames.get(renamed(columnKey(name)));
+  name.length > NAME_LIMIT ? undefined : textNames.get(columnKey(name)) ?? textNames.get(renamed(columnKey(name)));
 
 export const isKnownColumn = (name: string): boolean =>
   quantityMeanings(name).length > 0 || textMeaning(name) !== undefined;

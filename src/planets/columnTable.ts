@@ -311,7 +311,7 @@ export const knownLists: readonly KnownList[] = [
   {
     title: "the exoplanet.eu catalogue",
     signature: "name mass mass_error_min mass_error_max radius orbital_period semi_major_axis star_name star_mass",
-    units: jupiterUnits,
+    units: { ...jupiterUnits, surfaceGravity: "log-cgs" },
     names: { log_g: "surfaceGravity" },
   },
   {
@@ -332,7 +332,7 @@ export const knownLists: readonly KnownList[] = [
   {
     title: "the exoplanets.org table",
     signature: "name mass msini umass mstar per",
-    units: jupiterUnits,
+    units: { ...jupiterUnits, surfaceGravity: "log-cgs" },
     names: { r: "radius" },
   },
   {

@@ -104,8 +104,9 @@ function readErrors(typed: TypedNumber, source: QuantitySource, context: Measure
   }
   if (plus === -1) plus = undefined;
   if (minus === -1 && (plus === undefined || !context.lowerErrorsAreSigned)) minus = undefined;
-  if (plus !== undefined && plus < 0) {
-    context.issue("upper-error-negative", source.plus ?? source.value, `the upper error ${plus} is negative; its size is used`);
+  if (plus !== undefined && plus < 0 && minus !== undefined && minus > 0) {
+    const message = `the upper error ${plus} is negative and the lower one ${minus} positive; they may be swapped`;
+    context.issue("error-signs-swapped", source.plus ?? source.value, message);
   }
   return { plus: plus === undefined ? undefined : Math.abs(plus), minus: minus === undefined ? undefined : Math.abs(minus) };
 }

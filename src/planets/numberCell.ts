@@ -8,10 +8,14 @@ export interface TypedNumber {
 
 const missing = new Set(["", "null", "nan", "none", "na", "n/a", "-", "--", "---", "...", "…", "—", "?", '""', "\\n", "masked"]);
 
+/** Longer cells hold no number, and the patterns would be slow on them. */
+const NUMBER_LIMIT = 100;
+
 export const isMissing = (text: string): boolean => missing.has(text.trim().toLowerCase());
 
 /** The common case, much faster than the patterns below; `Number` alone would take blanks for 0 and `0x10` for 16. */
 export function readPlainNumber(text: string): number | undefined {
+  if (text.length > NUMBER_LIMIT) return undefined;
   const value = Number(text);
   return Number.isFinite(value) && /^\s*[-+.\d][.\deE]*(?:[-+]\d+)?\s*$/.test(text) ? value : undefined;
 }
@@ -33,6 +37,7 @@ const infinite = /^[+-]?inf(?:inity)?$/i;
  * `decimalComma` also `5,2`. Undefined for anything else: the reader never takes a number out of a text that holds more.
  */
 export function readTypedNumber(text: string, decimalComma = false): TypedNumber | undefined {
+  if (text.length > NUMBER_LIMIT) return undefined;
   let trimmed = text.trim().replace(/^\$|\$$/g, "").replace(/[−–]/g, "-");
   if (decimalComma) trimmed = trimmed.replace(/(\d),(?=\d)/g, "$1.");
   if (plain.test(trimmed)) return { value: toNumber(trimmed) };

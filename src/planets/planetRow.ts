@@ -97,7 +97,8 @@ function applyProvenance({ quantities, twins }: FoundQuantities, texts: PlanetRo
   };
   mark("mass", kindOfProvenance(texts.massProvenance ?? ""));
   mark("radius", kindOfProvenance(texts.radiusProvenance ?? ""));
-  if (quantities.mass?.kind === "measured" && isMinimumInDisguise(quantities)) mark("mass", "minimum");
+  const { kind } = quantities.mass ?? {};
+  if ((kind === "measured" || kind === "no-uncertainty") && isMinimumInDisguise(quantities)) mark("mass", "minimum");
 }
 
 /** Nearly edge-on, M sin i is the mass within this; then the list may rightly give one number for both. */

@@ -6,7 +6,7 @@ const meanings: readonly (readonly [RegExp, QuantityKind | "measured"])[] = [
   [/\bm\s*[-–/]?\s*r\b|relation|forecast|estimat|predict/i, "from-relation"],
   // M sin i divided by a known sin i is the mass itself.
   [/sin\s*\(?\s*i\s*\)?\s*\/\s*sin/i, "measured"],
-  [/sin|minimum/i, "minimum"],
+  [/sin\s*\(?\s*i(?![a-z])|minimum/i, "minimum"],
 ];
 
 const remembered = new Map<string, QuantityKind>();

@@ -36,7 +36,11 @@ const isBlank = (line: Line): boolean => line.text.trim() === "";
 const isComment = (text: string): boolean => /^\s*"?#/.test(text);
 
 /** A commented line without its mark, and without the delimiters that a spreadsheet pads it with. */
-const uncomment = (text: string): string => text.replace(/^\s*"?#+\s*/, "").replace(/[,;\t]+\s*$/, "");
+function uncomment(text: string): string {
+  let end = text.length;
+  while (end > 0 && ",;\t ".includes(text[end - 1] ?? "")) end--;
+  return text.slice(0, end).replace(/^\s*"?#+\s*/, "");
+}
 
 async function takeHeader(lines: LineReader, headerComment: string, dialect: Dialect, file: string): Promise<string[]> {
   const [first] = await lines.peek(1);
@@ -80,10 +84,10 @@ async function takeUnits(
 function describedColumns(comments: readonly Line[]): Map<string, Omit<RawColumn, "name">> {
   const described = new Map<string, Omit<RawColumn, "name">>();
   for (const { text } of comments) {
-    const match = /^"?#\s*COLUMN\s+(\S+?)\s*:\s*(.*?)[,;"\s]*$/i.exec(text);
+    const match = /^"?#\s*COLUMN\s+(\S+?)\s*:\s*([^"]{0,1000})/i.exec(text);
     if (match?.[1] === undefined || match[2] === undefined) continue;
     const unit = /\[([^\]]+)\]/.exec(match[2])?.[1];
-    described.set(match[1], { description: match[2], unit });
+    described.set(match[1], { description: match[2].replace(/,+$/, "").trim(), unit });
   }
   return described;
 }
@@ -125,7 +129,7 @@ function parseBlock(block: readonly { line: number; text: string }[], dialect: D
   return block.map(({ line }, i) => ({ line, cells: splitCells(texts[i] ?? "", dialect) }));
 }
 
-function splitCells(text: string, dialect: Dialect): string[] {
+export function splitCells(text: string, dialect: Dialect): string[] {
   const prepared = dialect.prepare(text);
   const records = parseCells(prepared, dialect);
   return records?.length === 1 ? (records[0] ?? []) : prepared.split(dialect.delimiter);

@@ -59,7 +59,8 @@ const collapseBlanks = (text: string): string =>
 function endsInsideQuotes(text: string, startsInside: boolean, opening: RegExp): boolean {
   let inside = startsInside;
   for (let at = text.indexOf('"'); at !== -1; at = text.indexOf('"', at + 1)) {
-    if (!inside) inside = opening.test(text.slice(Math.max(0, at - 200), at)) || text.slice(0, at).trim() === "";
+    // A look back over 200 characters keeps the cost of a line with many quotes in bounds.
+    if (!inside) inside = opening.test(text.slice(Math.max(0, at - 200), at));
     else if (text[at + 1] === '"') at++;
     else inside = false;
   }

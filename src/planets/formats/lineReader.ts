@@ -1,12 +1,18 @@
+import { InputError } from "../../errors.ts";
 import type { Line } from "../splitLines.ts";
+
+/** More lines than any list has before its data. */
+const PREAMBLE_LIMIT = 100_000;
 
 /** Lines that can be looked at before they are consumed, for readers that must see the head of a file first. */
 export class LineReader {
+  private readonly file: string;
   private readonly source: AsyncIterator<Line[]>;
   private buffered: Line[] = [];
   private ended = false;
 
-  constructor(lines: AsyncIterable<Line[]>) {
+  constructor(lines: AsyncIterable<Line[]>, file: string) {
+    this.file = file;
     this.source = lines[Symbol.asyncIterator]();
   }
 
@@ -25,7 +31,7 @@ export class LineReader {
     return this.buffered.shift();
   }
 
-  /** Leading lines that satisfy `test`, consumed. */
+  /** Leading lines that satisfy `test`, consumed. Throws `no-data` if they do not end. */
   async takeWhile(test: (line: Line) => boolean): Promise<Line[]> {
     const taken: Line[] = [];
     for (;;) {
@@ -33,6 +39,7 @@ export class LineReader {
       const end = this.buffered.findIndex((line) => !test(line));
       taken.push(...this.buffered.splice(0, end === -1 ? this.buffered.length : end));
       if (end !== -1 || this.ended) return taken;
+      if (taken.length > PREAMBLE_LIMIT) throw endlessPreamble(this.file);
     }
   }
 
@@ -43,3 +50,10 @@ export class LineReader {
     yield* { [Symbol.asyncIterator]: () => this.source };
   }
 }
+
+const endlessPreamble = (file: string): InputError =>
+  new InputError(
+    "no-data",
+    `${file}: the first ${PREAMBLE_LIMIT} lines, the limit, are comments or blank; a header and data must follow sooner`,
+    { file },
+  );
