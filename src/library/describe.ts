@@ -79,13 +79,13 @@ const materialNames = ({ material }: Layer): string[] =>
 
 export function describeMaterial(library: Library, name: string): MaterialDescription {
   const material = library.material(name);
-  const { phases: entries } = library.materialFile(name);
+  const formKeys = library.formKeys(name);
   return {
     kind: "material",
     name,
     title: material.title,
     phases: material.phases.map((phase, i) => {
-      const { form: _, ...parameters } = entries[i].eos;
+      const { form: _, ...parameters } = formKeys[i];
       return describePhase(phase, parameters);
     }),
     joins: describeJoins(material.phases),

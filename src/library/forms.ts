@@ -1,4 +1,4 @@
-import { z } from "zod";
+import * as z from "zod";
 import { birchMurnaghan } from "../eos/birchMurnaghan.ts";
 import { constantDensity } from "../eos/constantDensity.ts";
 import type { EosCurve } from "../eos/curve.ts";

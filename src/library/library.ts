@@ -25,8 +25,8 @@ export interface Library {
   composition(name: string): Composition;
   /** Throws InputError `unknown-material`, or any error of its file. */
   material(name: string): Material;
-  /** The checked file behind a material. Throws like `material`. */
-  materialFile(name: string): MaterialFile;
+  /** The form of every phase with its keys, as in the material's file. Throws like `material`. */
+  formKeys(name: string): readonly Readonly<Record<string, number | string>>[];
 }
 
 /**
@@ -72,7 +72,11 @@ class FileLibrary implements Library {
     return material;
   }
 
-  materialFile(name: string): MaterialFile {
+  formKeys(name: string): readonly Readonly<Record<string, number | string>>[] {
+    return this.materialFile(name).phases.map(({ eos }) => eos);
+  }
+
+  private materialFile(name: string): MaterialFile {
     const entry = this.materialEntry(name);
     const { value, problems } = validate(materialSchema, entry.path, entry.content);
     if (problems) throw problems[0];

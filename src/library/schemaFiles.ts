@@ -1,4 +1,4 @@
-import { z } from "zod";
+import * as z from "zod";
 import type { LibraryFile } from "./libraryFiles.ts";
 import { compositionSchema, materialSchema } from "./schemas.ts";
 

@@ -1,4 +1,4 @@
-import { z } from "zod";
+import * as z from "zod";
 import { eosSchema, FORMS_WITHOUT_CALIBRATION } from "./forms.ts";
 import { strictObject } from "./strictObject.ts";
 

@@ -1,4 +1,4 @@
-import type { z } from "zod";
+import type * as z from "zod";
 import { InputError } from "../errors.ts";
 import { suggestion } from "./nearest.ts";
 import { shown } from "./shown.ts";
