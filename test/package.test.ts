@@ -25,10 +25,21 @@ test("the installed command computes a curve of a shipped composition", () => {
   expect(rows).toHaveLength(2);
 });
 
-test("the installed library computes the same planet, and needs no Node built-ins", () => {
-  expect(readFileSync(join(folder, "node_modules/bulkwright/dist/index.js"), "utf8")).not.toMatch(
-    /from\s*"node:|require\("/,
-  );
+test("the installed library works where there is no Node, as in a web page", () => {
+  const program = `
+    delete globalThis.Buffer;
+    const print = console.log;
+    delete globalThis.process;
+    const { EARTH_MASS, loadLibrary, readPlanetList, shippedFiles, solvePlanet } = await import("bulkwright");
+    const planet = solvePlanet(loadLibrary(shippedFiles).composition("earth-like"), EARTH_MASS);
+    async function* chunks() { yield new TextEncoder().encode("name,mass_earth\\nInvented b,5\\n"); }
+    const list = await readPlanetList(chunks(), { file: "list.csv", earthRadius: 6.3781e6 });
+    for await (const row of list.rows) print(row.name, planet.radius);
+  `;
+  writeFileSync(join(folder, "use.js"), program);
+  const [name, radius] = inFolder(process.execPath, "use.js").split(/(?<=b) /);
+  expect(name).toBe("Invented b");
+  expect(Number(radius)).toBeGreaterThan(6.2e6);
 });
 
 test("its types stand on their own", () => {

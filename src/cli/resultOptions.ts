@@ -4,6 +4,7 @@ import type { Io } from "./io.ts";
 import { writeOutputFile } from "./outputFile.ts";
 import type { Provenance } from "./provenance.ts";
 import { formatTable, type Table, type TableFormat } from "./table.ts";
+import { escapeControls } from "./terminal.ts";
 
 /** Options of the whole program, understood before and after the command's name. */
 export interface GlobalOptions {
@@ -34,4 +35,9 @@ export async function emitTable(table: Table, provenance: Provenance, options: R
 /** The files a run will write. */
 export function destinations(options: { readonly out?: string; readonly html?: string }): string[] {
   return [options.out, options.html].filter((path) => path !== undefined);
+}
+
+/** What a person should know about a run, unless they asked for quiet. */
+export function tell(notes: readonly string[], { quiet }: GlobalOptions, io: Io): void {
+  if (!quiet) io.err(escapeControls(notes.map((note) => `note: ${note}\n`).join("")));
 }

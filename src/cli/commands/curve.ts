@@ -11,7 +11,14 @@ import { type Curve, massRadiusPage } from "../massRadiusPage.ts";
 import { parseMasses, pressurePa } from "../numberOptions.ts";
 import { checkDestinations, writeOutputFile } from "../outputFile.ts";
 import { provenanceOf } from "../provenance.ts";
-import { addResultOptions, destinations, emitTable, type GlobalOptions, type ResultOptions } from "../resultOptions.ts";
+import {
+  addResultOptions,
+  destinations,
+  emitTable,
+  type GlobalOptions,
+  type ResultOptions,
+  tell,
+} from "../resultOptions.ts";
 
 interface CurveOptions extends GlobalOptions, ResultOptions {
   readonly masses: readonly number[];
@@ -41,6 +48,7 @@ export function define(command: Command, context: CommandContext): void {
 async function curve(names: readonly string[], options: CurveOptions, { io, args }: CommandContext): Promise<void> {
   const { library, inputs } = await openLibrary(options.library, io);
   await checkDestinations(destinations(options), inputs);
+  tell(library.notes, options, io);
   const compositions = names.map((name) => withSurfacePressure(library.composition(name), options.surfacePressurePa));
   const curves: Curve[] = [];
   for (const composition of compositions) curves.push(await sweep(composition, options.masses));

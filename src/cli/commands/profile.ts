@@ -11,7 +11,14 @@ import { pointCount, positiveNumber } from "../numberOptions.ts";
 import { checkDestinations } from "../outputFile.ts";
 import { profileTable } from "../profileTable.ts";
 import { provenanceOf } from "../provenance.ts";
-import { addResultOptions, destinations, emitTable, type GlobalOptions, type ResultOptions } from "../resultOptions.ts";
+import {
+  addResultOptions,
+  destinations,
+  emitTable,
+  type GlobalOptions,
+  type ResultOptions,
+  tell,
+} from "../resultOptions.ts";
 
 interface ProfileOptions extends GlobalOptions, ResultOptions {
   readonly mass?: number;
@@ -52,6 +59,7 @@ async function profileOfComposition(
 ): Promise<void> {
   const { library, inputs } = await openLibrary(options.library, io);
   await checkDestinations(destinations(options), inputs);
+  tell(library.notes, options, io);
   const composition = library.composition(name);
   const { planet, points } = solveProfile(composition, mass * EARTH_MASS, options.points);
   const provenance = provenanceOf({
