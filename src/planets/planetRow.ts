@@ -35,7 +35,7 @@ export function readRow(record: RawRecord, row: number, reader: RowReader): Plan
       readQuantity(name, sources, context, reader.earthRadius, found);
     }
     applyProvenance(found, texts);
-    deriveQuantities(found.quantities);
+    deriveQuantities(found.quantities, (name) => reader.plan.quantities.has(name));
   }
   return { row, line, name: nameOf(texts), quantities: found.quantities, twins: found.twins, texts, cells, issues };
 }

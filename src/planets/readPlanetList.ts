@@ -5,6 +5,8 @@ import { quantityColumns } from "./columnTable.ts";
 import { decodeText } from "./decodeText.ts";
 import type { ListFormat, RawColumn, RawRecord, RawTable } from "./formats/rawTable.ts";
 import { readTable } from "./formats/readTable.ts";
+import { type ColumnExplanation, explainColumns, misspellings } from "./explainColumns.ts";
+import { refuseLostDecimals } from "./lostDecimals.ts";
 import { findConventions, usesDecimalComma } from "./listConventions.ts";
 import { type RowReader, readRow } from "./planetRow.ts";
 import type { PlanetRow, QuantityName } from "./quantity.ts";
@@ -24,6 +26,8 @@ export interface PlanetList {
   readonly format: ListFormat;
   readonly columns: readonly RawColumn[];
   readonly plan: ColumnPlan;
+  /** What the user should know about the columns, one sentence each. */
+  readonly notes: readonly string[];
   /** One row per row of the list, in order. Can be walked through once. */
   readonly rows: AsyncIterable<PlanetRow>;
 }
@@ -38,6 +42,7 @@ export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options:
   const { file, table, sample, batches } = await openTable(chunks, options);
   const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
   if (ambiguities.length > 0) throw ambiguous(file, ambiguities);
+  refuseLostDecimals(plan, table.columns, sample, file);
   requireColumns(file, table.columns, plan, options.needs ?? ["mass", "minimumMass", "radius"]);
   const reader: RowReader = {
     file,
@@ -47,7 +52,22 @@ export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options:
     decimalComma: usesDecimalComma(table.format),
     earthRadius: options.earthRadius,
   };
-  return { file, format: table.format, columns: table.columns, plan, rows: readRows(batches, reader) };
+  const notes = [...plan.notes, ...misspellings(explainColumns(table.columns, plan, [], sample))];
+  return { file, format: table.format, columns: table.columns, plan, notes, rows: readRows(batches, reader) };
+}
+
+/**
+ * What `readPlanetList` would take every column of a list for; columns it could only guess at are marked ambiguous, and
+ * `ambiguities` says how to settle them.
+ */
+export async function explainPlanetList(
+  chunks: AsyncIterable<Uint8Array>,
+  options: ListOptions,
+): Promise<{ format: ListFormat; columns: ColumnExplanation[]; notes: readonly string[]; ambiguities: readonly Ambiguity[] }> {
+  const { table, sample } = await openTable(chunks, options);
+  const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
+  const columns = explainColumns(table.columns, plan, ambiguities, sample);
+  return { format: table.format, columns, notes: [...plan.notes, ...misspellings(columns)], ambiguities };
 }
 
 const SAMPLE_RECORDS = 500;
@@ -60,7 +80,7 @@ interface OpenTable {
   readonly batches: AsyncIterable<readonly RawRecord[]>;
 }
 
-export async function openTable(chunks: AsyncIterable<Uint8Array>, { file }: ListOptions): Promise<OpenTable> {
+async function openTable(chunks: AsyncIterable<Uint8Array>, { file }: ListOptions): Promise<OpenTable> {
   const table = await readTable(decodeText(chunks, file), file);
   const iterator = table.batches[Symbol.asyncIterator]();
   const head: RawRecord[] = [];

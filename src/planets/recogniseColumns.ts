@@ -5,6 +5,7 @@ import { type KnownList, knownLists, quantityColumns } from "./columnTable.ts";
 import { chosenColumns, type ColumnChoices } from "./columnChoices.ts";
 import { attachErrorColumns, type ErrorColumns } from "./errorColumns.ts";
 import type { RawColumn, RawRecord } from "./formats/rawTable.ts";
+import { ownColumn } from "./ownColumn.ts";
 import type { QuantityName, TextName } from "./quantity.ts";
 import { resolveBounds, type Resolved, resolveUnit } from "./resolveUnit.ts";
 
@@ -92,13 +93,6 @@ const twoQuantities = (name: string, readings: readonly QuantityMeaning[]): Ambi
     option: `--column ${ownColumn(quantity)}=${name}`,
   })),
 });
-
-/** Our own column name of a quantity, with its unit. */
-export function ownColumn(quantity: QuantityName, unitId?: string): string {
-  const { ownName, ownUnit } = quantityColumns[quantity];
-  const unit = unitId ?? ownUnit;
-  return unit === "" || unit === "1" ? ownName : `${ownName}_${unit.replace(/-/g, "_")}`;
-}
 
 interface SourceRequest {
   readonly columns: readonly RawColumn[];

@@ -18,8 +18,11 @@ export function isIpac(head: string): boolean {
   const table = lines.slice(start);
   const headerEnd = table.findIndex((line) => !line.startsWith("|"));
   const header = table.slice(0, headerEnd === -1 ? table.length : headerEnd);
-  return header.length >= 1 && header.length <= 4 && header.every((line) => /\|\s*$/.test(line.slice(1)));
+  const isBarred = header.length >= 1 && header.length <= 4 && header.every((line) => /\|\s*$/.test(line.slice(1)));
+  return isBarred && (header[1] === undefined || header[1].split("|").every((cell) => typeWord.test(cell)));
 }
+
+const typeWord = /^[\s-]*(?:d|double|r|real|f|float|i|int|l|long|c|char|date)?[\s-]*$/i;
 
 /**
  * Table of the Infrared Processing and Analysis Center: up to four header lines (names, types, units, nulls) whose bars
