@@ -27,7 +27,10 @@ interface Factor {
 function radiusFromRatio({ radiusRatio, starRadius }: Row): MeasuredQuantity | undefined {
   if (radiusRatio === undefined || starRadius === undefined) return undefined;
   const value = radiusRatio.value * starRadius.value;
-  const factors = [{ quantity: radiusRatio, power: 1 }, { quantity: starRadius, power: 1 }];
+  const factors = [
+    { quantity: radiusRatio, power: 1 },
+    { quantity: starRadius, power: 1 },
+  ];
   return product(value, factors, "radius ratio and stellar radius");
 }
 
@@ -38,7 +41,10 @@ function radiusFromRatio({ radiusRatio, starRadius }: Row): MeasuredQuantity | u
 function starDensityFromTransit({ scaledAxis, period }: Row): MeasuredQuantity | undefined {
   if (scaledAxis === undefined || period === undefined) return undefined;
   const value = (3 * Math.PI * scaledAxis.value ** 3) / (G * period.value ** 2);
-  const factors = [{ quantity: scaledAxis, power: 3 }, { quantity: period, power: -2 }];
+  const factors = [
+    { quantity: scaledAxis, power: 3 },
+    { quantity: period, power: -2 },
+  ];
   return product(value, factors, "scaled axis and period");
 }
 
@@ -66,14 +72,21 @@ function minimumMassFromVelocity(row: Row): MeasuredQuantity | undefined {
     { quantity: starMass, power: 2 / 3 },
     { quantity: period, power: 1 / 3 },
   ];
-  return product(mass, factors, `velocity amplitude, period and stellar mass${isCircular ? ", for a circular orbit" : " and eccentricity"}`);
+  return product(
+    mass,
+    factors,
+    `velocity amplitude, period and stellar mass${isCircular ? ", for a circular orbit" : " and eccentricity"}`,
+  );
 }
 
 /** Within this of edge-on, the error of an inclination that has none does not matter. */
 const EDGE_ON_COSINE = 0.02;
 
 /** m = (m sin i) / sin i where the inclination is known; otherwise a minimum mass is all there is. */
-function massFromMinimum(minimum: MeasuredQuantity, inclination: MeasuredQuantity | undefined): MeasuredQuantity | undefined {
+function massFromMinimum(
+  minimum: MeasuredQuantity,
+  inclination: MeasuredQuantity | undefined,
+): MeasuredQuantity | undefined {
   const sine = Math.sin(inclination?.value ?? 0);
   if (inclination === undefined || !(sine > 0)) return undefined;
   const value = minimum.value / sine;
@@ -104,7 +117,14 @@ function product(value: number, factors: readonly Factor[], derivedFrom: string)
     }
     return value * Math.sqrt(sum);
   };
-  return { value, minus: side("minus", "plus"), plus: side("plus", "minus"), kind: productKind(factors), derivedFrom, origin: first.origin };
+  return {
+    value,
+    minus: side("minus", "plus"),
+    plus: side("plus", "minus"),
+    kind: productKind(factors),
+    derivedFrom,
+    origin: first.origin,
+  };
 }
 
 /** Measured if all factors are; a limit stays one where it is the only factor that is not, and enters by a positive power. */

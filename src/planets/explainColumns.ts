@@ -1,5 +1,5 @@
-import { columnKey } from "./columnKey.ts";
 import { nearestName } from "./columnChoices.ts";
+import { columnKey } from "./columnKey.ts";
 import type { Ambiguity, ColumnPlan, QuantitySource, UnitSource } from "./columnPlan.ts";
 import { quantityColumns } from "./columnTable.ts";
 import type { RawColumn, RawRecord } from "./formats/rawTable.ts";
@@ -55,7 +55,9 @@ const ownNames = (Object.keys(quantityColumns) as QuantityName[]).map((quantity)
 
 /** A sentence for each column that is not used although its name is nearly one of ours. */
 export const misspellings = (columns: readonly ColumnExplanation[]): string[] =>
-  columns.flatMap(({ column, perhaps }) => (perhaps === undefined ? [] : `column "${column}" is not used; did you mean ${perhaps}?`));
+  columns.flatMap(({ column, perhaps }) =>
+    perhaps === undefined ? [] : `column "${column}" is not used; did you mean ${perhaps}?`,
+  );
 
 /** Our name that a column nearly has, such as `mass_eath`; short names resemble too much to be worth a hint. */
 function nearestOwnName(name: string): string | undefined {

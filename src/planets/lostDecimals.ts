@@ -35,7 +35,9 @@ export function refuseLostDecimals(
     if (cells.some((cell) => !/^\d+$/.test(cell))) return;
     const median = cells.map(Number).toSorted((a, b) => a - b)[Math.floor(cells.length / 2)] ?? 0;
     if (median * source.unit.factor > limit) {
-      evidence.push(`half of column "${columns[source.value]?.name}" (${quantityColumns[quantity].title}) is above ${median}`);
+      evidence.push(
+        `half of column "${columns[source.value]?.name}" (${quantityColumns[quantity].title}) is above ${median}`,
+      );
     }
   }
   if (evidence.length < FEWEST_COLUMNS) return;

@@ -3,11 +3,11 @@ import type { ColumnChoices } from "./columnChoices.ts";
 import type { Ambiguity, ColumnPlan } from "./columnPlan.ts";
 import { quantityColumns } from "./columnTable.ts";
 import { decodeText } from "./decodeText.ts";
+import { type ColumnExplanation, explainColumns, misspellings } from "./explainColumns.ts";
 import type { ListFormat, RawColumn, RawRecord, RawTable } from "./formats/rawTable.ts";
 import { readTable } from "./formats/readTable.ts";
-import { type ColumnExplanation, explainColumns, misspellings } from "./explainColumns.ts";
-import { refuseLostDecimals } from "./lostDecimals.ts";
 import { findConventions, usesDecimalComma } from "./listConventions.ts";
+import { refuseLostDecimals } from "./lostDecimals.ts";
 import { type RowReader, readRow } from "./planetRow.ts";
 import type { PlanetRow, QuantityName } from "./quantity.ts";
 import { recogniseColumns } from "./recogniseColumns.ts";
@@ -63,7 +63,12 @@ export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options:
 export async function explainPlanetList(
   chunks: AsyncIterable<Uint8Array>,
   options: ListOptions,
-): Promise<{ format: ListFormat; columns: ColumnExplanation[]; notes: readonly string[]; ambiguities: readonly Ambiguity[] }> {
+): Promise<{
+  format: ListFormat;
+  columns: ColumnExplanation[];
+  notes: readonly string[];
+  ambiguities: readonly Ambiguity[];
+}> {
   const { table, sample } = await openTable(chunks, options);
   const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
   const columns = explainColumns(table.columns, plan, ambiguities, sample);
@@ -101,7 +106,12 @@ async function* readRows(batches: AsyncIterable<readonly RawRecord[]>, reader: R
   for await (const batch of batches) for (const record of batch) yield readRow(record, ++row, reader);
 }
 
-function requireColumns(file: string, columns: readonly RawColumn[], plan: ColumnPlan, needs: readonly QuantityName[]): void {
+function requireColumns(
+  file: string,
+  columns: readonly RawColumn[],
+  plan: ColumnPlan,
+  needs: readonly QuantityName[],
+): void {
   if (needs.some((quantity) => plan.quantities.has(quantity)) || canBeDerived(plan)) return;
   const wanted = needs.map((quantity) => quantityColumns[quantity].title).join(" or ");
   throw new InputError(

@@ -40,13 +40,23 @@ export async function readIpac(lines: LineReader, file: string): Promise<RawTabl
     const start = bar + 1;
     const end = bars[index + 1] ?? start;
     const unit = clean(units?.slice(start, end));
-    return { name: clean(names?.slice(start, end)), unit: unit === "" ? undefined : unit, missing: clean(nulls?.slice(start, end)), start, end };
+    return {
+      name: clean(names?.slice(start, end)),
+      unit: unit === "" ? undefined : unit,
+      missing: clean(nulls?.slice(start, end)),
+      start,
+      end,
+    };
   });
   return { format: "ipac", columns, batches: readRecords(lines, columns) };
 }
 
 /** Names may be padded with dashes as well as blanks. */
-const clean = (text = ""): string => text.trim().replace(/^-+(?=\D)|-+$/g, "").trim();
+const clean = (text = ""): string =>
+  text
+    .trim()
+    .replace(/^-+(?=\D)|-+$/g, "")
+    .trim();
 
 async function* readRecords(lines: LineReader, columns: readonly IpacColumn[]): AsyncGenerator<RawRecord[]> {
   for await (const batch of lines.rest()) {
@@ -62,8 +72,12 @@ function readCell(text: string, { start, end, missing }: IpacColumn): string {
 }
 
 const badHeader = (file: string, line: number | undefined, found: string | undefined): InputError =>
-  new InputError("ipac-header", `${file}, line ${line ?? 1}: not a header of an IPAC table; it has up to four lines of bars`, {
-    file,
-    line,
-    found,
-  });
+  new InputError(
+    "ipac-header",
+    `${file}, line ${line ?? 1}: not a header of an IPAC table; it has up to four lines of bars`,
+    {
+      file,
+      line,
+      found,
+    },
+  );
