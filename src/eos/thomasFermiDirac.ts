@@ -31,7 +31,7 @@ const TABLE_1 = {
  *         exact TFD density from 1e4 to 1e7 GPa; cold matter is not TFD below about 1e3 GPa, and Z = 1 is outside the fit
  *         although it gives a number
  * Throws  InputError `formula`
- * Checked test/eos/thomasFermiDirac.test.ts
+ * Checked test/eos/thomasFermiDirac.test.ts, formPoints.test.ts (50 digits), everyForm.test.ts
  */
 export function thomasFermiDirac(parameters: { readonly formula: string }): EosCurve {
   return new ThomasFermiDiracCurve(parameters.formula);
