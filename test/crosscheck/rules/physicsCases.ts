@@ -100,6 +100,11 @@ export const physicsCases: readonly RuleCase[] = [
         rows: one({ radius: 2.1 }, { discoveryMethod: "Radial Velocity" }),
         severity: "warning",
       },
+      {
+        why: "radius by timing",
+        rows: one({ radius: 2.1 }, { discoveryMethod: "Transit Timing Variations" }),
+        severity: "warning",
+      },
       { why: "mass by transit", rows: one({ mass: 2.1 }, { discoveryMethod: "Primary Transit" }), severity: "warning" },
     ],
     silent: [
