@@ -38,7 +38,7 @@ export function tableHtml({ id, caption, columns, rows }: PageTable): string {
   const long = shown.length > 300 ? " long" : "";
   return `<div class="table-region${long}" role="region" aria-labelledby="${id}-caption" tabindex="0">
 <table id="${id}">
-<caption id="${id}-caption">${escapeHtml(caption + cut)}</caption>
+<caption id="${id}-caption"><span>${escapeHtml(caption + cut)}</span></caption>
 <thead><tr>${head}</tr></thead>
 <tbody>
 ${body}
