@@ -1,4 +1,4 @@
-import type { QuantityName } from "../planets/quantity.ts";
+import type { MeasuredQuantity, QuantityName } from "../planets/quantity.ts";
 import type { MatchedPair } from "./listMatch.ts";
 import { type PullSummary, summarisePulls } from "./pulls.ts";
 import { tensionSigma } from "./significance.ts";
@@ -43,12 +43,16 @@ function tensionsOf(pair: MatchedPair): QuantityTension[] {
     if (!other || notCompared.includes(name)) return [];
     const measured = value.kind === other.kind && (value.kind === "measured" || value.kind === "minimum");
     const sigma = measured ? tensionSigma(value, other) : undefined;
-    return [{ pair, quantity, value, other, tensionSigma: sigma, identical: sameNumber(value.value, other.value) }];
+    return [{ pair, quantity, value, other, tensionSigma: sigma, identical: isQuotedTwice(value, other, sigma) }];
   });
 }
 
-/** Equal but for the rounding of two unit conversions. */
-const sameNumber = (a: number, b: number) => Math.abs(a - b) <= 1e-9 * Math.abs(a);
+/** Equal but for the rounding of unit conversions: in value against its error, and in the error against itself. */
+function isQuotedTwice(a: MeasuredQuantity, b: MeasuredQuantity, sigma: number | undefined): boolean {
+  if (sigma === undefined) return Math.abs(a.value - b.value) <= 1e-9 * Math.abs(a.value);
+  const alike = (x = 0, y = 0) => Math.abs(x - y) <= 0.05 * x;
+  return Math.abs(sigma) < 0.01 && alike(a.minus, b.minus) && alike(a.plus, b.plus);
+}
 
 function verdictChange(pair: MatchedPair, classify: ClassifyRow): VerdictChange[] {
   const verdict = classify(pair.row);

@@ -49,7 +49,8 @@ describe("pulls", () => {
 
   test("of honest errors are normal deviates", () => {
     const [pull] = compare(normalPairs(1000, 1)).comparison.pulls;
-    expect(pull?.count).toBe(1000);
+    // Eight in a thousand agree within 0.01 sigma by chance and pass for quotations.
+    expect(pull?.count).toBeGreaterThan(980);
     expect(Math.abs(pull?.chiSquareSigma ?? 9)).toBeLessThan(3);
     expect(pull?.fractionBeyond3Sigma).toBeLessThan(0.01);
   });
@@ -79,7 +80,7 @@ describe("pulls", () => {
     const [pull] = compare([
       [
         [2, 0.1],
-        [2, 0.1],
+        [2.0004, 0.1002],
       ],
       [
         [2, 0.1],

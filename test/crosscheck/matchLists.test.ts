@@ -66,6 +66,11 @@ describe("matching by name", () => {
     ]);
   });
 
+  test("tells a star's planets apart by period", () => {
+    const planets = [placed("Ostara 7 b", [10, 10, 3]), placed("Ostara 7 c", [10, 10, 9])];
+    expect(outcome([placed("Ostara-07", [80, 80, 9.01])], planets).pairs).toEqual(["Ostara-07 = Ostara 7 c by host"]);
+  });
+
   test("reports a name that stands twice", () => {
     expect(outcome(named("Ostara 7 b"), named("Ostara 7 b", "Ostara-7b"))).toEqual({
       ...none,
