@@ -16,6 +16,8 @@ export interface QuantitySource {
   readonly limit?: number;
   readonly unit: Unit;
   readonly unitSource: UnitSource;
+  /** SI per unit, with the Earth radius the user has chosen. */
+  readonly factor: number;
 }
 
 /** How to read every row of a list. */
@@ -33,6 +35,8 @@ export interface ListConventions {
   readonly nanIsMissing: boolean;
   /** Lower errors carry a minus sign, so that -1 is an error of 1 and not a missing one. */
   readonly lowerErrorsAreSigned: boolean;
+  /** `5,2` is a number. */
+  readonly decimalComma: boolean;
 }
 
 /** A place where the reader could only guess. */
