@@ -8,7 +8,7 @@ export interface Progress {
 
 const silent: Progress = { advanceTo: () => {}, stop: () => {} };
 
-export async function startProgress(total: number, io: Io, quiet: boolean): Promise<Progress> {
+export async function startProgress(total: number, io: Io, quiet = false): Promise<Progress> {
   if (quiet || !io.isTerminal) return silent;
   const { SingleBar } = await import("cli-progress");
   const bar = new SingleBar({ format: "{bar} {value} of {total}", clearOnComplete: true });
