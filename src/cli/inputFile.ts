@@ -25,6 +25,11 @@ export async function readText(path: string, io: Io): Promise<string> {
   return parts.join("");
 }
 
+/** Text of our own, as if it were read. */
+export async function* bytesOf(text: string): AsyncGenerator<Uint8Array> {
+  yield new TextEncoder().encode(text);
+}
+
 /** How messages call an input. */
 export function inputName(path: string): string {
   return path === "-" ? "standard input" : path;

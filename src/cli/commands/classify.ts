@@ -1,5 +1,4 @@
 import { type Command, InvalidArgumentError, Option } from "commander";
-import type { PlanetRow } from "../../planets/quantity.ts";
 import { type PlanetList, readPlanetList } from "../../planets/readPlanetList.ts";
 import {
   type BoundaryNames,

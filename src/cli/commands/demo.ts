@@ -3,6 +3,7 @@ import { join } from "node:path";
 import type { Command } from "commander";
 import { survey, surveyTitle } from "../../demo/survey.ts";
 import { InputError } from "../../errors.ts";
+import { CLASS_CODES } from "../../inference/verdict.ts";
 import { readPlanetList } from "../../planets/readPlanetList.ts";
 import { classifyRows, comparedCompositions, comparisonWith, defaultBoundaries } from "../classification.ts";
 import { planetPart } from "../classifyPage.ts";
@@ -10,6 +11,7 @@ import { type ClassifiedRow, classifyTable } from "../classifyTable.ts";
 import type { CommandContext } from "../commandContext.ts";
 import { curveTable } from "../curveTable.ts";
 import { figureMasses } from "../figureMasses.ts";
+import { bytesOf } from "../inputFile.ts";
 import { allOf } from "../interruptible.ts";
 import { openLibrary } from "../libraryFolder.ts";
 import { massRadiusPage } from "../massRadiusPage.ts";
@@ -64,12 +66,11 @@ async function demo(options: DemoOptions, { io, args }: CommandContext): Promise
 
 /** How many planets got which verdict. */
 function summary(classified: readonly ClassifiedRow[]): string {
-  const verdicts = classified.flatMap(({ result }) => result.verdict?.code ?? []);
-  const counts = [...new Set(verdicts)].map((code) => `  ${verdicts.filter((other) => other === code).length} ${code}`);
+  const count = (code?: string) => classified.filter(({ result }) => result.verdict?.code === code).length;
   return [
     `${surveyTitle}: ${classified.length} invented planets`,
-    ...counts,
-    `  ${classified.length - verdicts.length} without a verdict, each with its reasons`,
+    ...[...CLASS_CODES, "undecided"].map((code) => `  ${count(code)} ${code}`),
+    `  ${count()} without a verdict, each with its reasons`,
     "written:\n",
   ].join("\n");
 }
@@ -85,8 +86,4 @@ async function makeFolder(path: string): Promise<void> {
       { cause: error },
     );
   }
-}
-
-async function* bytesOf(text: string): AsyncGenerator<Uint8Array> {
-  yield new TextEncoder().encode(text);
 }
