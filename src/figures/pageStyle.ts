@@ -22,7 +22,7 @@ ul { padding-left: 1.1rem; }
 a { color: var(--accent); }
 code, pre { font-family: "Source Code Pro", "Noto Sans Mono", "Liberation Mono", Consolas, monospace; font-size: 0.88em; }
 pre { margin: 0.4rem 0; padding: 0.6rem 0.8rem; background: var(--panel); white-space: pre-wrap; border-radius: 3px; }
-.lead { color: var(--ink-soft); max-width: 62rem; margin-bottom: 0.75rem; }
+.lead { color: var(--ink-soft); max-width: 62rem; margin-bottom: 0.75rem; text-wrap: pretty; }
 :focus-visible { outline: 2px solid var(--accent); outline-offset: 2px; }
 
 .table-region {
