@@ -1,6 +1,7 @@
 import type { MeasuredQuantity, QuantityName } from "../planets/quantity.ts";
 import type { MatchedPair } from "./listMatch.ts";
 import { type PullSummary, summarisePulls } from "./pulls.ts";
+import { quantitiesOf } from "./quantitiesOf.ts";
 import { tensionSigma } from "./significance.ts";
 import type { QuantityTension } from "./tension.ts";
 
@@ -23,7 +24,7 @@ export interface ListComparison {
 export type ClassifyRow = (row: MatchedPair["row"]) => string | undefined;
 
 /** Places are used for matching; they have no errors. */
-const notCompared: readonly string[] = ["rightAscension", "declination"];
+const notCompared: readonly QuantityName[] = ["rightAscension", "declination"];
 
 /**
  * Tension of every quantity of every pair, pulls of each quantity over the whole list, and, if `classify` is given,
@@ -37,10 +38,9 @@ export function compareLists(pairs: readonly MatchedPair[], classify?: ClassifyR
 }
 
 function tensionsOf(pair: MatchedPair): QuantityTension[] {
-  return Object.entries(pair.row.quantities).flatMap(([name, value]) => {
-    const quantity = name as QuantityName;
+  return quantitiesOf(pair.row).flatMap(([quantity, value]) => {
     const other = pair.other.quantities[quantity];
-    if (!other || notCompared.includes(name)) return [];
+    if (!other || notCompared.includes(quantity)) return [];
     const measured = value.kind === other.kind && (value.kind === "measured" || value.kind === "minimum");
     const sigma = measured ? tensionSigma(value, other) : undefined;
     return [{ pair, quantity, value, other, tensionSigma: sigma, identical: isQuotedTwice(value, other, sigma) }];
