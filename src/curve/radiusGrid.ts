@@ -12,8 +12,11 @@ export interface RadiusGrid extends MassRange {
   readonly rootMeanSquareError: number;
   readonly cellCount: number;
   readonly solvedPlanets: number;
-  /** The curve of one member, cheap enough to be made anew for every fraction an inference asks for. */
-  member(fraction: number): RadiusCurve;
+  /**
+   * The curve of one member, at least over the masses of `within` (default: all). Cheap enough to be made anew for every
+   * fraction an inference asks for. Throws ModelRangeError `grid-fraction-range`.
+   */
+  member(fraction: number, within?: MassRange): RadiusCurve;
 }
 
 /** Size of the first cells: in ln M, and their number along the fraction. */
@@ -78,13 +81,13 @@ class CellGrid implements RadiusGrid {
     this.solvedPlanets = lattice.solvedPlanets;
   }
 
-  member(fraction: number): RadiusCurve {
+  member(fraction: number, within: MassRange = this): RadiusCurve {
     if (!(fraction >= 0 && fraction <= 1)) {
       const range = { quantity: "mass fraction", value: fraction, minimum: 0, maximum: 1 };
       throw new ModelRangeError("grid-fraction-range", `A mass fraction of ${fraction} is not between 0 and 1.`, range);
     }
     const angle = angleOf(fraction);
-    const crossed = this.cellsAt(angle);
+    const crossed = this.cellsAt(angle, Math.log(within.lightest), Math.log(within.heaviest));
     const from = crossed.map((c) => this.massFrom[c]);
     const spacing = crossed.map((c) => this.massSpacing[c]);
     const values = new Float64Array(5 * crossed.length);
@@ -92,14 +95,14 @@ class CellGrid implements RadiusGrid {
       const v = (angle - this.angleFrom[c]) / this.angleSpacing[c];
       for (let a = 0; a < 5; a++) values[5 * n + a] = quarticThrough(this.values, 25 * c + 5 * a, v);
     });
-    const logRadius = new PiecewiseQuartic(from, spacing, values);
-    return new InterpolatedCurve(logRadius, logRadius.nodes);
+    return new InterpolatedCurve(new PiecewiseQuartic(from, spacing, values));
   }
 
-  /** In order of mass; a fraction on the line between two cells belongs to the upper one. */
-  private cellsAt(angle: number): number[] {
+  /** In order of mass; an angle on the line between two cells belongs to the upper one. */
+  private cellsAt(angle: number, from: number, to: number): number[] {
     const cells: number[] = [];
-    for (let c = 0; c < this.cellCount; c++) {
+    for (let c = 0; c < this.cellCount && this.massFrom[c] <= to; c++) {
+      if (this.massFrom[c] + 4 * this.massSpacing[c] < from) continue;
       const v = (angle - this.angleFrom[c]) / this.angleSpacing[c];
       if (v >= 0 && (v < 4 || (v === 4 && angle === 1))) cells.push(c);
     }

@@ -38,6 +38,21 @@ export function densityQuadrature(
   return new Density(panels, logDensity, peak, rule);
 }
 
+/** The `logIntegral` of `densityQuadrature` alone, for inner loops. */
+export function logIntegral(logDensity: (x: number) => number, edges: readonly number[], rule = DEFAULT_RULE): number {
+  const { panels, peak } = resolvedPanels(logDensity, edges);
+  let total = 0;
+  for (const { from, to } of panels) {
+    const half = (to - from) / 2;
+    let sum = 0;
+    for (let i = 0; i < rule.nodes.length; i++) {
+      sum += rule.weights[i] * Math.exp(logDensity(from + half * (1 + rule.nodes[i])) - peak);
+    }
+    total += half * sum;
+  }
+  return peak + Math.log(total);
+}
+
 function resolvedPanels(
   logDensity: (x: number) => number,
   edges: readonly number[],
