@@ -99,6 +99,7 @@ describe("continuation by Thomas–Fermi–Dirac", () => {
 
   test.each(["iron-vinet-2007", "iron-vinet-2018"])("%s states the ends and the gap of its bridge", (name) => {
     const { joins, phases } = describeMaterial(library, name);
+    expect(joins).toHaveLength(1);
     const [join] = joins;
     if (join.kind !== "bridge") throw new Error(`${name} has no bridge`);
     const stated = [...(phases[1].source.note ?? "").matchAll(/([\d.]+) (GPa|%)/g)].map(([, value]) => Number(value));
