@@ -78,6 +78,13 @@ describe("matching by name", () => {
     });
   });
 
+  test("reports two rows that claim one other", () => {
+    expect(outcome(named("Ostara 7 b", "Ostara-7b"), named("Ostara 7 b"))).toEqual({
+      ...none,
+      ambiguous: ["Ostara 7 b ~ Ostara 7 b", "Ostara-7b ~ Ostara 7 b"],
+    });
+  });
+
   test("never matches empty names", () => {
     expect(outcome(named(""), named("")).unmatched).toEqual(["", ""]);
   });
