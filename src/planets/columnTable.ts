@@ -237,6 +237,7 @@ export const quantityColumns: Readonly<Record<QuantityName, QuantityColumns>> = 
     dimension: "time",
     usualUnit: "gyr",
     body: "star",
+    words: "age",
     names: "age koi_sage",
   },
   rightAscension: {

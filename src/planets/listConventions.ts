@@ -7,12 +7,12 @@ export function findConventions(plan: ColumnPlan, sample: readonly RawRecord[], 
   const cells = (index: number | undefined): string[] =>
     index === undefined ? [] : sample.map((record) => record.cells[index]?.trim() ?? "");
   const nanIsMissing = sources.some((source) => cells(source.value).some((cell) => /^nan$/i.test(cell)));
-  const lowerErrors = sources
-    .filter((source) => source.minus !== source.plus)
-    .flatMap((source) => cells(source.minus))
-    .map(Number);
-  const lowerErrorsAreSigned = lowerErrors.some((error) => error < 0 && error !== -1);
-  return { nanIsMissing, lowerErrorsAreSigned, decimalComma: usesDecimalComma(format) };
+  const isMinusOne = (cell: string): boolean => Number(cell) === -1;
+  const minusOneIsMissing = sources.some(
+    ({ value, minus, plus }) =>
+      (plus !== minus && cells(plus).some(isMinusOne)) || (minus !== undefined && cells(value).some(isMinusOne)),
+  );
+  return { nanIsMissing, minusOneIsMissing, decimalComma: usesDecimalComma(format) };
 }
 
 /** A comma inside a cell can only be a decimal one where commas do not separate the cells. */

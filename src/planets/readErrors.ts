@@ -20,9 +20,9 @@ export function readErrors(typed: TypedNumber, source: QuantitySource, row: RowC
     if (plus !== undefined) plus -= typed.value;
     if (minus !== undefined) minus = typed.value - minus;
   }
-  // -1 stands for a missing error, unless lower errors are written as negative numbers.
+  // No upper error is negative; a lower one may be, in lists that sign it.
   if (plus === -1) plus = undefined;
-  if (minus === -1 && (plus === undefined || !row.list.conventions.lowerErrorsAreSigned)) minus = undefined;
+  if (minus === -1 && (plus === undefined || row.list.conventions.minusOneIsMissing)) minus = undefined;
   if (plus !== undefined && plus < 0 && minus !== undefined && minus > 0) {
     const message = `the upper error ${plus} is negative and the lower one ${minus} positive; they may be swapped`;
     row.report("error-signs-swapped", source.plus ?? source.value, message);

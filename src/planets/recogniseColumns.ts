@@ -142,7 +142,7 @@ function preferred(
     return at === -1 ? groups.length : at;
   };
   const best = Math.min(...sources.map(rank));
-  const ranked = sources.filter((source) => best === groups.length || rank(source) === best);
+  const ranked = sources.filter((source) => rank(source) === groups.length || rank(source) === best);
   const order = ["earth", "jupiter"];
   const place = (source: QuantitySource): number =>
     (order.indexOf(source.unit.id) + order.length + 1) % (order.length + 1);

@@ -26,7 +26,7 @@ export function detectDialect(lines: readonly string[]): Dialect {
   let best = { agreement: 0, dialect: dialectOf("comma-separated", ",", lines) };
   for (const { format, delimiter } of candidates) {
     const dialect = dialectOf(format, delimiter, lines);
-    const counts = lines.map((line) => countCells(line, dialect));
+    const counts = joinQuoted(lines, dialect).map((line) => countCells(line, dialect));
     const first = counts[0] ?? 1;
     const agreement = first < 2 ? 0 : counts.filter((count) => count === first).length / counts.length;
     if (agreement > best.agreement) best = { agreement, dialect };
@@ -47,6 +47,18 @@ export function dialectOf(format: ListFormat, delimiter: string, lines: readonly
     prepare: isBlank ? collapseBlanks : (text) => text,
     endsInsideQuotes: (text, startsInside) => endsInsideQuotes(text, startsInside, opening),
   };
+}
+
+/** Lines whose quoted cells are complete. */
+function joinQuoted(lines: readonly string[], dialect: Dialect): string[] {
+  const joined: string[] = [];
+  let open = "";
+  for (const line of lines) {
+    const text = open + line;
+    open = dialect.endsInsideQuotes(line, open !== "") ? `${text}\n` : "";
+    if (open === "") joined.push(text);
+  }
+  return joined;
 }
 
 const countCells = (line: string, dialect: Dialect): number =>
