@@ -58,13 +58,9 @@ function resolvedPanels(
   edges: readonly number[],
 ): { panels: Panel[]; peak: number } {
   let peak = Number.NEGATIVE_INFINITY;
-  let peakAt = Number.NaN;
   const sample = (x: number): number => {
     const value = logDensity(x);
-    if (value > peak) {
-      peak = value;
-      peakAt = x;
-    }
+    peak = Math.max(peak, value);
     return value;
   };
   const panel = (from: number, to: number, atFrom: number, atTo: number): SampledPanel => ({
@@ -74,9 +70,8 @@ function resolvedPanels(
     atMiddle: sample((from + to) / 2),
     atTo,
   });
-  // Between samples the density can be higher than at any of them only next to the highest.
-  const negligible = (p: SampledPanel): boolean =>
-    highest(p) < peak - NEGLIGIBLE && !(p.from <= peakAt && peakAt <= p.to);
+  // Between samples the density can be higher than at any of them only next to the highest, which no such panel touches.
+  const negligible = (p: SampledPanel): boolean => highest(p) < peak - NEGLIGIBLE;
 
   const atEdges = edges.map(sample);
   let open = edges.slice(1).map((to, i) => panel(edges[i], to, atEdges[i], atEdges[i + 1]));

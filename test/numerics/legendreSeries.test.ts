@@ -7,7 +7,10 @@ describe("legendreSeries", () => {
   const rule = gaussLegendre(6);
 
   test("finds the coefficients of x³ = (2 P_3 + 3 P_1)/5", () => {
-    const coefficients = legendreSeries(rule, rule.nodes.map((x) => x ** 3));
+    const coefficients = legendreSeries(
+      rule,
+      rule.nodes.map((x) => x ** 3),
+    );
     const expected = [0, 0.6, 0, 0.4, 0, 0];
     coefficients.forEach((c, k) => {
       expect(Math.abs(c - expected[k])).toBeLessThan(1e-15);
