@@ -20,7 +20,7 @@ export interface RadiusCurve extends MassRange {
 
 /** A curve through solved planets, with its measured error. */
 export interface MeasuredCurve extends RadiusCurve {
-  /** Largest relative error of the radius at planets solved between the nodes, none of which shaped the curve. */
+  /** Largest relative error of the radius at planets solved between the nodes, other than those that decided on them. */
   readonly relativeError: number;
   readonly nodeCount: number;
 }
@@ -88,7 +88,10 @@ function firstNodes(logRadii: LogRadii, from: number, to: number): number[] {
   const missing = logRadii(x).indexOf(undefined);
   if (missing < 0) return x;
   if (missing > 0) return firstNodes(logRadii, from, lastSolvable(logRadii, x[missing - 1], x[missing]));
-  throw new ConvergenceError("curve-empty", `The lightest planet asked for, ${Math.exp(from)} kg, cannot be solved`);
+  throw new ConvergenceError(
+    "curve-empty",
+    `The lightest planet asked for, ${Math.exp(from)} kg, cannot be solved. Ask for heavier planets.`,
+  );
 }
 
 function lastSolvable(logRadii: LogRadii, solvable: number, unsolvable: number): number {

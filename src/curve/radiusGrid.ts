@@ -6,9 +6,9 @@ import { angleOf, type FamilySolver, RadiusLattice } from "./radiusLattice.ts";
 
 /** R(M, f) of a one-parameter family of compositions, f from 0 to 1. */
 export interface RadiusGrid extends MassRange {
-  /** Largest relative error of the radius at planets solved off the nodes, none of which shaped the grid. */
+  /** Largest relative error of the radius at planets solved between the nodes. */
   readonly relativeError: number;
-  /** Of the same errors, over the plane of ln M and the lattice's measure of the fraction. */
+  /** Of the errors at one more planet in every cell, over the plane of ln M and the lattice's measure of the fraction. */
   readonly rootMeanSquareError: number;
   readonly cellCount: number;
   readonly solvedPlanets: number;
@@ -28,8 +28,8 @@ const FRACTION_STEPS = FRACTION_CELLS * CELL_STEPS;
  * Solves a family until R is known to `tolerance` at every mass of the range and every fraction, by biquartic cells in
  * ln M and the angle φ of f = sin²(πφ/2), which gives room to thin outer layers and small cores. What costs is the folds
  * of R along lines where a phase appears or vanishes: with the default the largest error is reached there only, and the
- * root mean square is ten times smaller. Halving `tolerance` doubles the work.
- The range ends early, for all members alike, where some member has no heavier planet.
+ * root mean square is about ten times smaller. Halving `tolerance` doubles the work.
+ * The range ends early, for all members alike, where some member has no heavier planet.
  * Throws ConvergenceError `grid-empty` if a member has no planet at the light end.
  * Checked test/curve/radiusGrid.test.ts
  */
@@ -44,7 +44,10 @@ export function radiusGrid(solveMember: FamilySolver, range: MassRange, { tolera
   if (refinement.solvableUntil > 0) {
     return radiusGrid(solveMember, { ...range, heaviest: lattice.mass(refinement.solvableUntil) }, { tolerance });
   }
-  throw new ConvergenceError("grid-empty", `Some member of the family has no planet of ${range.lightest} kg`);
+  throw new ConvergenceError(
+    "grid-empty",
+    `A member of the family has no planet of ${range.lightest} kg, the lightest mass asked for. Ask for heavier planets.`,
+  );
 }
 
 /** Cells in flat arrays, in order of mass. */
@@ -119,8 +122,8 @@ function measureErrors(cells: readonly Cell[], lattice: RadiusLattice): { larges
     const u = (4 * c * 0.7548776662466927) % 4;
     const v = (4 * c * 0.5698402909980532) % 4;
     const [radius] = lattice.solveMember(lattice.fraction(cell.j + v * cell.dj))([lattice.mass(cell.i + u * cell.di)]);
-    const error = Math.abs(Math.exp(cellValue(cell, u, v)) / (radius ?? Number.NaN) - 1);
-    largest = Math.max(largest, error);
+    const error = Math.abs(Math.exp(cellValue(cell.values, u, v)) / (radius ?? Number.NaN) - 1);
+    largest = Math.max(largest, error, cell.testError);
     squares += cell.di * cell.dj * error * error;
     area += cell.di * cell.dj;
   });
