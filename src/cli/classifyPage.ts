@@ -2,6 +2,7 @@ import type { Estimate, FigurePlanet, FigureValue } from "../figures/figureSpec.
 import { twoReadingsWarning } from "../figures/massRadiusFigure.ts";
 import type { FractionEstimate } from "../inference/fractionPosterior.ts";
 import { CLASS_CODES, classPhrases } from "../inference/verdict.ts";
+import type { Composition } from "../library/composition.ts";
 import type { MeasuredQuantity } from "../planets/quantity.ts";
 import { EARTH_MASS } from "../units/constants.ts";
 import type { Comparison } from "./classification.ts";
@@ -30,8 +31,13 @@ export function planetPart(
     columns,
     verdicts: [...phrases, "undecided"],
     planets: rows.map((row) => figurePlanet(row, phraseOf, earthRadius)),
-    warnings: [twoReadingsWarning(earthLike.name, silicate.name)],
+    warnings: [twoReadingsWarning(curveLabel(earthLike), curveLabel(silicate))],
   };
+}
+
+/** What the figure calls a curve. */
+function curveLabel({ title }: Composition): string {
+  return title.split(":")[0];
 }
 
 function figurePlanet(

@@ -1,5 +1,5 @@
-import type { PlanetRow } from "../planets/quantity.ts";
 import { EARTH_MASS } from "../units/constants.ts";
+import type { ClassifiedRow } from "./classifyTable.ts";
 import { geometricMasses } from "./numberOptions.ts";
 
 /** What the curves of a figure span without planets, and what the solver can do [Earth masses]. */
@@ -7,11 +7,12 @@ const usual = { lightest: 0.1, heaviest: 20 };
 const possible = { lightest: 1e-3, heaviest: 1e3 };
 const pointsPerDecade = 25;
 
-/** Masses for the curves of a figure with these planets [Earth masses]. */
-export function figureMasses(rows: readonly PlanetRow[]): number[] {
+/** Masses for the curves of a figure that shows the planets with a verdict [Earth masses]. */
+export function figureMasses(rows: readonly ClassifiedRow[]): number[] {
   let { lightest, heaviest } = usual;
-  for (const { quantities } of rows) {
-    const mass = (quantities.mass?.value ?? Number.NaN) / EARTH_MASS;
+  for (const { row, result } of rows) {
+    if (!result.verdict || row.quantities.mass === undefined) continue;
+    const mass = row.quantities.mass.value / EARTH_MASS;
     if (mass < lightest) lightest = Math.max(mass, possible.lightest);
     if (mass > heaviest) heaviest = Math.min(mass, possible.heaviest);
   }

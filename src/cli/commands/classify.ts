@@ -95,7 +95,7 @@ async function classify(
     io,
   );
   if (options.html !== undefined) {
-    const curves = await sweepCurves(compositions, figureMasses(rows));
+    const curves = await sweepCurves(compositions, figureMasses(classified));
     await writeOutputFile(
       options.html,
       await massRadiusPage(curves, planetPart(classified, comparison, earthRadius), run),

@@ -44,7 +44,7 @@ async function demo(options: DemoOptions, { io, args }: CommandContext): Promise
   const rows = await allOf(list.rows);
   const progress = await startProgress(rows.length, io, options.quiet);
   const classified = await classifyRows(rows, comparison, progress).finally(() => progress.stop());
-  const curves = await sweepCurves(compositions, figureMasses(rows));
+  const curves = await sweepCurves(compositions, figureMasses(classified));
 
   const run = { args, earthRadius: options.earthRadiusKm };
   const provenance = provenanceOf({ ...run, compositions });
