@@ -4,7 +4,7 @@ import { type Command, InvalidArgumentError, Option } from "commander";
 export interface ListOptions {
   readonly column?: Readonly<Record<string, string>>;
   readonly unit?: Readonly<Record<string, string>>;
-  readonly keep?: readonly string[];
+  readonly explainColumns?: boolean;
 }
 
 type Pairs = Readonly<Record<string, string>>;
@@ -17,7 +17,7 @@ export function addListOptions(command: Command): Command {
     .addOption(
       new Option("--unit <quantity=unit>", "the unit of a column, e.g. radius=jupiter; repeatable").argParser(addPair),
     )
-    .option("--keep <columns>", "columns of the list to carry along, separated by commas", parseNames);
+    .option("--explain-columns", "print what each column is taken for, and end");
 }
 
 export function parseNames(text: string): readonly string[] {

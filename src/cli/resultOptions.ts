@@ -14,22 +14,29 @@ export interface GlobalOptions {
 
 /** Where and how a command's table goes. */
 export interface ResultOptions {
-  readonly format: TableFormat;
+  /** That of the extension of `out` where nothing is said. */
+  readonly format?: TableFormat;
   readonly out?: string;
 }
 
 export function addResultOptions(command: Command): Command {
   return command
-    .addOption(new Option("--format <format>", "of the table").choices(["csv", "json"]).default("csv"))
+    .addOption(
+      new Option("--format <format>", "of the table; else as the extension of --out, or csv").choices(["csv", "json"]),
+    )
     .option("--out <file>", "write the table there instead of to standard output (`-`)", (path) =>
       path === "-" ? undefined : path,
     );
 }
 
 export async function emitTable(table: Table, provenance: Provenance, options: ResultOptions, io: Io): Promise<void> {
-  const text = formatTable(table, provenance, options.format);
+  const text = formatTable(table, provenance, formatOf(options));
   if (options.out === undefined) io.out(text);
   else await writeOutputFile(options.out, text);
+}
+
+function formatOf({ format, out }: ResultOptions): TableFormat {
+  return format ?? (out?.toLowerCase().endsWith(".json") ? "json" : "csv");
 }
 
 /** The files a run will write. */

@@ -1,5 +1,5 @@
 import { type Command, InvalidArgumentError, Option } from "commander";
-import { type PlanetList, readPlanetList } from "../../planets/readPlanetList.ts";
+import { readPlanetList } from "../../planets/readPlanetList.ts";
 import {
   type BoundaryNames,
   classifyRows,
@@ -10,10 +10,9 @@ import {
 import { planetPart } from "../classifyPage.ts";
 import { classifyColumns, classifyTable } from "../classifyTable.ts";
 import type { CommandContext } from "../commandContext.ts";
+import { explainLists } from "../explainColumns.ts";
 import { figureMasses } from "../figureMasses.ts";
-import { inputName, readBytes } from "../inputFile.ts";
 import { allOf } from "../interruptible.ts";
-import type { Io } from "../io.ts";
 import { keptColumns } from "../keptColumns.ts";
 import { openLibrary } from "../libraryFolder.ts";
 import { addListOptions, type ListOptions, parseNames } from "../listOptions.ts";
@@ -21,6 +20,7 @@ import { massRadiusPage } from "../massRadiusPage.ts";
 import { parseValueWithErrors } from "../numberOptions.ts";
 import { type OnePlanet, onePlanetList } from "../onePlanet.ts";
 import { checkDestinations, writeOutputFile } from "../outputFile.ts";
+import { openPlanetList, planetListFile } from "../planetListFile.ts";
 import { startProgress } from "../progress.ts";
 import { provenanceOf } from "../provenance.ts";
 import {
@@ -35,6 +35,7 @@ import { sweepCurves } from "../sweepCurves.ts";
 
 interface ClassifyOptions extends GlobalOptions, ResultOptions, ListOptions, OnePlanet {
   readonly compositions: BoundaryNames;
+  readonly keep?: readonly string[];
   readonly library?: string;
   readonly html?: string;
 }
@@ -54,6 +55,7 @@ export function define(command: Command, context: CommandContext): void {
         .argParser(parseBoundaries)
         .default(defaultBoundaries, defaultBoundaries.join(",")),
     )
+    .option("--keep <columns>", "columns of the list to carry along, separated by commas", parseNames)
     .option("--library <folder>", "of your own compositions and materials")
     .option("--html <file>", "write a page with the planets in the mass–radius diagram there")
     .addHelpText("after", example)
@@ -73,21 +75,25 @@ async function classify(
   { io, args }: CommandContext,
 ): Promise<void> {
   const { library, inputs } = await openLibrary(options.library, io);
-  await checkDestinations(destinations(options), path === undefined ? inputs : [path, ...inputs]);
+  const file = path === undefined ? undefined : await planetListFile(path, options, io);
+  await checkDestinations(destinations(options), [...(file?.inputs ?? []), ...inputs]);
+  if (file && options.explainColumns) return explainLists([file], options, { io, args });
   const comparison = comparisonWith(options.compositions, library);
-  const list = await openList(path, options, io);
+  const earthRadius = options.earthRadiusKm.value;
+  const list = await (file
+    ? openPlanetList(file, io)
+    : readPlanetList(onePlanetList(options), { file: "the planet given", earthRadius }));
   const header = list.columns.map(({ name }) => name);
   const kept = keptColumns(options.keep ?? [], header, classifyColumns, list.file);
-  const notes = [...library.notes, ...list.plan.notes];
+  const notes = [...library.notes, ...list.notes];
   tell(notes, options, io);
 
   const rows = await allOf(list.rows);
-  const progress = await startProgress(rows.length, io, options.quiet);
+  const progress = startProgress(rows.length, io, options.quiet);
   const classified = await classifyRows(rows, comparison, progress).finally(() => progress.stop());
 
   const compositions = comparedCompositions(comparison);
   const run = { args, earthRadius: options.earthRadiusKm };
-  const earthRadius = run.earthRadius.value;
   await emitTable(
     classifyTable(classified, earthRadius, kept),
     provenanceOf({ ...run, compositions, notes }),
@@ -101,15 +107,6 @@ async function classify(
       await massRadiusPage(curves, planetPart(classified, comparison, earthRadius), run),
     );
   }
-}
-
-function openList(path: string | undefined, options: ClassifyOptions, io: Io): Promise<PlanetList> {
-  return readPlanetList(path === undefined ? onePlanetList(options) : readBytes(path, io), {
-    file: path === undefined ? "the planet given" : inputName(path),
-    earthRadius: options.earthRadiusKm.value,
-    columnChoices: options.column,
-    unitChoices: options.unit,
-  });
 }
 
 function parseBoundaries(text: string): BoundaryNames {

@@ -42,7 +42,7 @@ async function demo(options: DemoOptions, { io, args }: CommandContext): Promise
   const compositions = comparedCompositions(comparison);
   const list = await readPlanetList(bytesOf(survey), { file: surveyTitle, earthRadius });
   const rows = await allOf(list.rows);
-  const progress = await startProgress(rows.length, io, options.quiet);
+  const progress = startProgress(rows.length, io, options.quiet);
   const classified = await classifyRows(rows, comparison, progress).finally(() => progress.stop());
   const curves = await sweepCurves(compositions, figureMasses(classified));
 
