@@ -8,16 +8,15 @@ import { findingsPage, severities } from "../figures/findingsPage.ts";
 import type { Library } from "../library/library.ts";
 import type { PlanetList } from "../planets/readPlanetList.ts";
 import type { CommandContext } from "./commandContext.ts";
-import type { CrosscheckOptions } from "./commands/crosscheck.ts";
+import type { CrosscheckOptions } from "./crosscheckOptions.ts";
 import { allOf } from "./interruptible.ts";
 import { writeOutputFile } from "./outputFile.ts";
 import { physicalLimits } from "./physicalLimits.ts";
 import { openPlanetList, type PlanetListFile } from "./planetListFile.ts";
 import { provenanceOf, reproducingCommand } from "./provenance.ts";
 import { recordCells } from "./recordTable.ts";
-import { emitTable, tell } from "./resultOptions.ts";
+import { emitTable, summarise, tell } from "./resultOptions.ts";
 import { chosenRules } from "./ruleOptions.ts";
-import { escapeControls } from "./terminal.ts";
 import { textTable } from "./textTable.ts";
 import { version } from "./version.ts";
 
@@ -59,8 +58,7 @@ export async function checkList(
     const page = { list: list.file, rowCount, records, counts, rules, notes, made };
     await writeOutputFile(options.html, await findingsPage(page));
   }
-  if (!options.quiet)
-    (options.out === undefined ? io.err : io.out)(escapeControls(summary(list.file, rowCount, counts)));
+  summarise(summary(list.file, rowCount, counts), options, io);
   failIfAsked(counts, options);
 }
 

@@ -10,8 +10,8 @@ import type { PlanetRow } from "../planets/quantity.ts";
 import { parseAliases } from "./aliasFile.ts";
 import { classifyRows, comparedCompositions, comparisonWith, defaultBoundaries } from "./classification.ts";
 import type { CommandContext } from "./commandContext.ts";
-import type { CrosscheckOptions } from "./commands/crosscheck.ts";
 import { comparisonSummary, matchSummary } from "./comparisonSummary.ts";
+import type { CrosscheckOptions } from "./crosscheckOptions.ts";
 import { inputName, readText } from "./inputFile.ts";
 import type { Io } from "./io.ts";
 import { writeOutputFile } from "./outputFile.ts";
@@ -19,8 +19,7 @@ import { openPlanetList, type PlanetListFile } from "./planetListFile.ts";
 import { startProgress } from "./progress.ts";
 import { provenanceOf, reproducingCommand } from "./provenance.ts";
 import { recordCells } from "./recordTable.ts";
-import { emitTable, tell } from "./resultOptions.ts";
-import { escapeControls } from "./terminal.ts";
+import { emitTable, summarise, tell } from "./resultOptions.ts";
 import { version } from "./version.ts";
 
 /** Matches a list with others, one after another, and says where they disagree. */
@@ -100,7 +99,7 @@ export async function compareWithLists(
     };
     await writeOutputFile(options.html, await comparisonPage(page));
   }
-  if (!options.quiet) (options.out === undefined ? io.err : io.out)(escapeControls(summaries.join("\n")));
+  summarise(summaries.join("\n"), options, io);
 }
 
 interface ChosenList {

@@ -44,6 +44,13 @@ export function destinations(options: { readonly out?: string; readonly html?: s
   return [options.out, options.html].filter((path) => path !== undefined);
 }
 
+/** The run in short, for a person: on standard output if the table does not stand there. */
+export function summarise(text: string, { out, quiet }: GlobalOptions & ResultOptions, io: Io): void {
+  if (quiet) return;
+  if (out === undefined) io.err(escapeControls(text));
+  else io.out(escapeControls(text));
+}
+
 /** What a person should know about a run, unless they asked for quiet. */
 export function tell(notes: readonly string[], { quiet }: GlobalOptions, io: Io): void {
   if (!quiet) io.err(escapeControls(notes.map((note) => `note: ${note}\n`).join("")));

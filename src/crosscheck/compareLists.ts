@@ -5,11 +5,11 @@ import { quantitiesOf } from "./quantitiesOf.ts";
 import { tensionSigma } from "./significance.ts";
 import type { QuantityTension } from "./tension.ts";
 
-/** What a verdict function says of both rows; `moved` where they differ. */
+/** What a verdict function says of both rows, at least one of which has a verdict; `moved` where two verdicts differ. */
 export interface VerdictChange {
   readonly pair: MatchedPair;
-  readonly verdict: string;
-  readonly verdictOther: string;
+  readonly verdict?: string;
+  readonly verdictOther?: string;
   readonly moved: boolean;
 }
 
@@ -57,6 +57,6 @@ function isQuotedTwice(a: MeasuredQuantity, b: MeasuredQuantity, sigma: number |
 function verdictChange(pair: MatchedPair, classify: ClassifyRow): VerdictChange[] {
   const verdict = classify(pair.row);
   const verdictOther = classify(pair.other);
-  if (verdict === undefined || verdictOther === undefined) return [];
-  return [{ pair, verdict, verdictOther, moved: verdict !== verdictOther }];
+  const known = [verdict, verdictOther].filter((one) => one !== undefined);
+  return known.length === 0 ? [] : [{ pair, verdict, verdictOther, moved: new Set(known).size === 2 }];
 }

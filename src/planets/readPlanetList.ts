@@ -42,7 +42,7 @@ export interface PlanetList {
 export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options: ListOptions): Promise<PlanetList> {
   const { file, table, sample, batches } = await openTable(chunks, options);
   const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
-  if (ambiguities.length > 0) throw ambiguous(file, ambiguities);
+  if (ambiguities.length > 0) throw ambiguousColumns(file, ambiguities);
   refuseLostDecimals(plan, table.columns, sample, file);
   requireColumns(file, table.columns, plan, options.needs ?? ["mass", "minimumMass", "radius"]);
   const conventions = findConventions(plan, sample, table.format);
@@ -122,7 +122,8 @@ const canBeDerived = ({ quantities }: ColumnPlan): boolean =>
   (quantities.has("radiusRatio") && quantities.has("starRadius")) ||
   (quantities.has("velocityAmplitude") && quantities.has("period") && quantities.has("starMass"));
 
-function ambiguous(file: string, ambiguities: readonly Ambiguity[]): InputError {
+/** The error of a list with columns that could only be guessed at: every reading, with the option that settles for it. */
+export function ambiguousColumns(file: string, ambiguities: readonly Ambiguity[]): InputError {
   const lines = ambiguities.flatMap(({ columns, readings }) => [
     `  ${columns.map((name) => `"${name}"`).join(", ")} could be`,
     ...readings.map(({ meaning, option }) => `    ${meaning}: ${option}`),

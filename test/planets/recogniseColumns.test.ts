@@ -48,6 +48,8 @@ describe("names and the units in them", () => {
     ["M_star", "starMass", SUN_MASS],
     ["M_*", "starMass", SUN_MASS],
     ["Teff", "starTemperature", 1],
+    ["st_teff", "starTemperature", 1],
+    ["star_teff", "starTemperature", 1],
     ["[Fe/H]", "starMetallicity", 1],
     ["st_age", "starAge", 1e9 * 365.25 * 86400],
     ["ra", "rightAscension", Math.PI / 180],

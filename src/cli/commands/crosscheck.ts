@@ -1,23 +1,17 @@
 import { type Command, Option } from "commander";
-import { type PublicationRule, publicationRules } from "../../crosscheck/choosePublication.ts";
+import { publicationRules } from "../../crosscheck/choosePublication.ts";
 import type { QuantityName } from "../../planets/quantity.ts";
 import { checkList } from "../checkList.ts";
 import type { CommandContext } from "../commandContext.ts";
 import { compareWithLists } from "../compareWithLists.ts";
+import type { CrosscheckOptions } from "../crosscheckOptions.ts";
 import { explainLists } from "../explainColumns.ts";
 import { openLibrary } from "../libraryFolder.ts";
-import { addListOptions, type ListOptions } from "../listOptions.ts";
+import { addListOptions } from "../listOptions.ts";
 import { checkDestinations } from "../outputFile.ts";
 import { type PlanetListFile, planetListFile } from "../planetListFile.ts";
-import { addResultOptions, destinations, type GlobalOptions, type ResultOptions } from "../resultOptions.ts";
-import { addRuleOptions, type RuleOptions } from "../ruleOptions.ts";
-
-export interface CrosscheckOptions extends GlobalOptions, ResultOptions, ListOptions, RuleOptions {
-  readonly choose?: PublicationRule;
-  readonly aliases?: string;
-  readonly library?: string;
-  readonly html?: string;
-}
+import { addResultOptions, destinations } from "../resultOptions.ts";
+import { addRuleOptions } from "../ruleOptions.ts";
 
 const example = `
 --column and --unit speak of LIST; a file LIST.columns.json beside any of the lists says the same of it.
