@@ -4,8 +4,10 @@ import { isMissing, readPlainNumber, readTypedNumber, type TypedNumber } from ".
 import type { LimitCoding, MeasuredQuantity, QuantityKind, QuantityName } from "./quantity.ts";
 import { type Errors, readErrors } from "./readErrors.ts";
 import type { RowContext } from "./rowContext.ts";
+import { readSexagesimal } from "./sexagesimal.ts";
 
-const mayBeNegative = new Set<QuantityName>(["starMetallicity", "rightAscension", "declination"]);
+const positions = new Set<QuantityName>(["rightAscension", "declination"]);
+const mayBeNegative = new Set<QuantityName>(["starMetallicity", ...positions]);
 const mayBeZero = new Set<QuantityName>(["eccentricity", "inclination", "insolation", ...mayBeNegative]);
 
 /**
@@ -31,12 +33,19 @@ function readCell(text: string, source: QuantitySource, row: RowContext): TypedN
   const value = readPlainNumber(text);
   if (value !== undefined) return { value };
   if (isMissing(text)) return undefined;
+  if (positions.has(source.quantity)) return readPosition(text, source);
   const typed = readTypedNumber(text, row.list.conventions.decimalComma);
   if (typed !== undefined && Number.isFinite(typed.value)) return typed;
   const { title } = quantityColumns[source.quantity];
   const found = typed === undefined ? "is not a number" : "is not finite";
   row.report("not-a-number", source.value, `${title} "${text.trim()}" ${found}; the cell is ignored`);
   return undefined;
+}
+
+/** Positions serve to find a planet in another list; one that cannot be read is no fault of the row. */
+function readPosition(text: string, { quantity }: QuantitySource): TypedNumber | undefined {
+  const value = readSexagesimal(text, quantity === "rightAscension" && !/[d°]/.test(text));
+  return value === undefined ? undefined : { value };
 }
 
 /** Lists write -1, or a row of nines, for a missing value of something that cannot be negative. */

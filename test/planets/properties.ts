@@ -1,10 +1,10 @@
 import fc from "fast-check";
 import { InputError } from "../../src/errors.ts";
-import { readTypedNumber } from "../../src/planets/numberCell.ts";
+import { readPlainNumber, readTypedNumber } from "../../src/planets/numberCell.ts";
 import type { PlanetRow } from "../../src/planets/quantity.ts";
 import { cellsOf, fixture, readList } from "./readText.ts";
 
-/** Properties of the readers; `npm test` runs each a thousand times, `npm run fuzz` a hundred thousand. */
+/** A property of the readers; `npm test` tries it a thousand times, `npm run fuzz` a hundred thousand. */
 export interface Property {
   readonly name: string;
   readonly property: fc.IAsyncProperty<unknown[]>;
@@ -144,6 +144,13 @@ export const properties: readonly Property[] = [
     "numbers come back as they were written",
     fc.asyncProperty(fc.double({ noNaN: true, noDefaultInfinity: true }), async (value) => {
       return Object.is(readTypedNumber(String(value))?.value, value === 0 ? 0 : value) || Object.is(value, -0);
+    }),
+  ),
+  define(
+    "decimal numbers are read as Number reads them",
+    fc.asyncProperty(fc.nat(), fc.nat(1e9), fc.nat(12), async (whole, fraction, zeros) => {
+      const text = `${whole}.${"0".repeat(zeros)}${fraction}`;
+      return Object.is(readPlainNumber(text), Number(text));
     }),
   ),
 ];

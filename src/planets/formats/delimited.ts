@@ -138,16 +138,21 @@ export async function* parseRecords(
 
 function parseBlock(block: readonly { line: number; text: string }[], dialect: Dialect): RawRecord[] {
   const texts = block.map((record) => dialect.prepare(record.text));
-  const parsed = parseCells(texts.join("\n"), dialect);
+  const hasQuotes = texts.some((text) => text.includes('"'));
+  const parsed = hasQuotes ? parseCells(texts.join("\n"), dialect) : undefined;
   // Stray quotes can make csv-parse see other records than the lines hold; then each line is taken by itself.
-  if (parsed?.length === block.length) return parsed.map((cells, i) => ({ line: block[i]?.line ?? 0, cells }));
-  return block.map(({ line }, i) => ({ line, cells: splitCells(texts[i] ?? "", dialect) }));
+  const records = parsed?.length === block.length ? parsed : texts.map((text) => splitPrepared(text, dialect));
+  return records.map((cells, i) => ({ line: block[i]?.line ?? 0, cells }));
 }
 
-export function splitCells(text: string, dialect: Dialect): string[] {
-  const prepared = dialect.prepare(text);
-  const records = parseCells(prepared, dialect);
-  return records?.length === 1 ? (records[0] ?? []) : prepared.split(dialect.delimiter);
+export const splitCells = (text: string, dialect: Dialect): string[] => splitPrepared(dialect.prepare(text), dialect);
+
+/** Without a quote a record is just cells between delimiters: no need of a parser, which takes ten times as long. */
+function splitPrepared(text: string, dialect: Dialect): string[] {
+  const records = text.includes('"') ? parseCells(text, dialect) : undefined;
+  if (records?.length === 1 && records[0] !== undefined) return records[0];
+  const cells = text.split(dialect.delimiter);
+  return dialect.isPadded ? cells.map((cell) => cell.trim()) : cells;
 }
 
 function parseCells(text: string, dialect: Dialect): string[][] | undefined {
