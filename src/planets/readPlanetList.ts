@@ -27,7 +27,7 @@ export interface PlanetList {
   readonly format: ListFormat;
   readonly columns: readonly RawColumn[];
   readonly plan: ColumnPlan;
-  /** What the user should know about the columns, one sentence each. */
+  /** What the user should know about columns and file, one sentence each; complete once the rows have been read. */
   readonly notes: readonly string[];
   /** One row per row of the list, in order. Can be walked through once. */
   readonly rows: AsyncIterable<PlanetRow>;
@@ -48,7 +48,16 @@ export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options:
   const conventions = findConventions(plan, sample, table.format);
   const context: ListContext = { file, columns: table.columns, plan, conventions };
   const notes = [...plan.notes, ...misspellings(explainColumns(table.columns, plan, [], sample))];
-  return { file, format: table.format, columns: table.columns, plan, notes, rows: readRows(batches, context) };
+  return {
+    file,
+    format: table.format,
+    columns: table.columns,
+    plan,
+    get notes() {
+      return [...notes, ...(table.notes ?? [])];
+    },
+    rows: readRows(batches, context),
+  };
 }
 
 /**

@@ -164,6 +164,16 @@ describe("VOTable", () => {
     await expect(cellsOf(text)).rejects.toMatchObject({ code, place: { file: "table" } });
   });
 
+  test("a further table and a result cut off by the archive are noted", async () => {
+    const text = votable("<TABLEDATA><TR><TD>A</TD><TD>1</TD></TR></TABLEDATA>");
+    const more =
+      '<TABLE><FIELD name="x" datatype="int"/><DATA><TABLEDATA><TR><TD>2</TD></TR></TABLEDATA></DATA></TABLE>';
+    const overflow = '<INFO name="QUERY_STATUS" value="OVERFLOW"/>';
+    const list = await readList(text.replace("</RESOURCE>", `${more}${overflow}</RESOURCE>`));
+    expect(list.rows).toHaveLength(1);
+    expect(list.notes).toMatchObject([/further table/, /rows are missing/].map((note) => expect.stringMatching(note)));
+  });
+
   test("a declared unit wins over the one in the name", async () => {
     const fields = '<FIELD name="mass_earth" datatype="double" unit="jupiterMass"/>';
     const list = await readList(votable("<TABLEDATA><TR><TD>1</TD></TR></TABLEDATA>", fields));

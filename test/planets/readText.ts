@@ -38,7 +38,8 @@ export async function readList(
   });
   const rows: PlanetRow[] = [];
   for await (const row of list.rows) rows.push(row);
-  return { ...list, rows };
+  const { file, format, columns, plan, notes } = list;
+  return { file, format, columns, plan, notes, rows };
 }
 
 /** The table as text cells, before anything is interpreted. */

@@ -28,6 +28,8 @@ export interface RawRecord {
 export interface RawTable {
   readonly format: ListFormat;
   readonly columns: readonly RawColumn[];
+  /** What the user should know about the file; grows while the records are read. */
+  readonly notes?: readonly string[];
   /** Batches, because one await per record would cost more than reading it. */
   readonly batches: AsyncIterable<readonly RawRecord[]>;
 }

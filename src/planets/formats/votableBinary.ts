@@ -39,9 +39,10 @@ export class BinaryRows {
     return rows;
   }
 
-  /** Bytes that belong to no complete row. */
-  end(): number {
-    return this.bytes.length + this.text.length;
+  /** Throws RangeError if bytes are left that belong to no complete row. */
+  end(): void {
+    const left = this.bytes.length + this.text.length;
+    if (left > 0) throw new RangeError(`they end within a row, with ${left} bytes left over`);
   }
 
   private readRow(view: DataView, start: number): { cells: string[]; end: number } | undefined {
