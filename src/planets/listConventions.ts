@@ -1,5 +1,6 @@
 import type { ColumnPlan, ListConventions } from "./columnPlan.ts";
 import type { ListFormat, RawRecord } from "./formats/rawTable.ts";
+import { isSigned } from "./measure.ts";
 
 /** Looks at a sample of the rows for conventions that single cells do not tell. */
 export function findConventions(plan: ColumnPlan, sample: readonly RawRecord[], format: ListFormat): ListConventions {
@@ -8,10 +9,12 @@ export function findConventions(plan: ColumnPlan, sample: readonly RawRecord[], 
     index === undefined ? [] : sample.map((record) => record.cells[index]?.trim() ?? "");
   const nanIsMissing = sources.some((source) => cells(source.value).some((cell) => /^nan$/i.test(cell)));
   const isMinusOne = (cell: string): boolean => Number(cell) === -1;
-  const minusOneIsMissing = sources.some(
-    ({ value, minus, plus }) =>
-      (plus !== minus && cells(plus).some(isMinusOne)) || (minus !== undefined && cells(value).some(isMinusOne)),
-  );
+  const minusOneIsMissing = sources
+    .filter((source) => !isSigned(source))
+    .some(
+      ({ value, minus, plus }) =>
+        (plus !== minus && cells(plus).some(isMinusOne)) || (minus !== undefined && cells(value).some(isMinusOne)),
+    );
   return { nanIsMissing, minusOneIsMissing, decimalComma: usesDecimalComma(format) };
 }
 

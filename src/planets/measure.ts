@@ -10,6 +10,10 @@ const positions = new Set<QuantityName>(["rightAscension", "declination"]);
 const mayBeNegative = new Set<QuantityName>(["starMetallicity", ...positions]);
 const mayBeZero = new Set<QuantityName>(["eccentricity", "inclination", "insolation", ...mayBeNegative]);
 
+/** Whether the numbers of a column may be negative: logarithms, positions, metallicities. */
+export const isSigned = ({ quantity, unit }: QuantitySource): boolean =>
+  mayBeNegative.has(quantity) || unit.isLogarithm === true;
+
 /**
  * One quantity of one row, or undefined where the row has none. What lists mean by their cells, in order: a limit that
  * is typed or flagged; zero with an upper error only, an infinite error, errors equal to the value: limits too; errors on
@@ -22,10 +26,10 @@ export function measure(source: QuantitySource, row: RowContext): MeasuredQuanti
   if (typed === undefined) return undefined;
   const { value } = typed;
   const errors = readErrors(typed, source, row);
-  const isSigned = mayBeNegative.has(source.quantity) || source.unit.isLogarithm === true;
-  if (!isSigned && value < 0) return refuseNegative(value, errors, source, row);
-  if (!isSigned && value === 0) return measureZero(text, errors, source, row);
-  const [kind, coding] = classifyValue(typed, errors, isSigned, source, row);
+  const signed = isSigned(source);
+  if (!signed && value < 0) return refuseNegative(value, errors, source, row);
+  if (!signed && value === 0) return measureZero(text, errors, source, row);
+  const [kind, coding] = classifyValue(typed, errors, source, row);
   return toQuantity(value, errors, kind, coding, text, source, row);
 }
 
@@ -79,7 +83,6 @@ const kebab = (name: string): string => name.replace(/_/g, "-");
 function classifyValue(
   { value, limit }: TypedNumber,
   errors: Errors,
-  isSigned: boolean,
   source: QuantitySource,
   row: RowContext,
 ): [QuantityKind, LimitCoding | undefined] {
@@ -91,7 +94,7 @@ function classifyValue(
   // Unbounded upwards only: a lower limit. Both sides: lists write it for values that nothing bounds from below.
   if (minus === Infinity) return ["upper-limit", "infinite-error"];
   if (plus === Infinity) return [minus === undefined ? "upper-limit" : "lower-limit", "infinite-error"];
-  if (!isSigned && minus === value && plus === value) return ["upper-limit", "error-equals-value"];
+  if (!isSigned(source) && minus === value && plus === value) return ["upper-limit", "error-equals-value"];
   return [kindByErrors(errors), undefined];
 }
 

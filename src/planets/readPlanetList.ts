@@ -135,7 +135,7 @@ const canBeDerived = ({ quantities }: ColumnPlan): boolean =>
 export function ambiguousColumns(file: string, ambiguities: readonly Ambiguity[]): InputError {
   const lines = ambiguities.flatMap(({ columns, readings }) => [
     `  ${columns.map((name) => `"${name}"`).join(", ")} could be`,
-    ...readings.map(({ meaning, option }) => `    ${meaning}: ${option}`),
+    ...readings.map(({ meaning, option }) => `    ${meaning}: ${quoted(option)}`),
   ]);
   return new InputError(
     "ambiguous-column",
@@ -144,7 +144,13 @@ export function ambiguousColumns(file: string, ambiguities: readonly Ambiguity[]
       file,
       column: ambiguities[0]?.columns[0],
       found: ambiguities.flatMap(({ columns }) => columns).join(","),
-      remedy: ambiguities.flatMap(({ readings }) => readings.map(({ option }) => option)).join("\n"),
+      remedy: ambiguities.flatMap(({ readings }) => readings.map(({ option }) => quoted(option))).join("\n"),
     },
   );
+}
+
+/** An option as a shell takes it where a column's name has blanks or signs in it. */
+function quoted(option: string): string {
+  const [name = "", value = ""] = option.split(/ (.*)/s);
+  return /^[\w=.#-]*$/.test(value) ? option : `${name} '${value.replaceAll("'", "'\\''")}'`;
 }

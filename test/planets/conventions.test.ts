@@ -74,6 +74,11 @@ describe("every convention of the lists is exactly one kind", () => {
     expect(rows[1]?.quantities.mass).toMatchObject({ kind: "no-uncertainty", minus: undefined });
   });
 
+  test("a metallicity of -1 does not make -1 a missing value", async () => {
+    const { rows } = await readList(`name,${own},st_met\nA,5,-1,1,-1\n`);
+    expect(rows[0]?.quantities.mass?.kind).toBe("measured");
+  });
+
   test.each(["", "NULL", "nan", '""', "-1", "null", "-"])(
     "a value written %j is missing without an issue",
     async (text) => {

@@ -39,6 +39,7 @@ describe("headers", () => {
     ["comments padded by a spreadsheet", "# made by hand,,\n#,,\nname,mass_earth,radius_earth\n"],
     ["quoted comments", '"# made, by hand",,\nname,mass_earth,radius_earth\n'],
     ["the header commented out", "# made by hand\n# name,mass_earth,radius_earth\n"],
+    ["the header commented out and padded", "# name, mass_earth, radius_earth\n"],
     ["the header commented out, without a blank", "#name,mass_earth,radius_earth\n"],
     ["units below", "name,mass_earth,radius_earth\n,Mearth,Rearth\n"],
     ["units and dashes below", "name,mass_earth,radius_earth\n,Mearth,Rearth\n----,----,----\n"],
@@ -51,6 +52,11 @@ describe("headers", () => {
     const commented = await readRaw("# COLUMN m: Mass [Jupiter mass] of it\nname,m\nA,1\n");
     expect(commented.columns[1]).toEqual({ name: "m", unit: "Jupiter mass", description: "Mass [Jupiter mass] of it" });
     expect((await readRaw("name,period\n,d\nA,1\n")).columns[1]?.unit).toBe("d");
+  });
+
+  test("of a commented header the blanks are no part of the names", async () => {
+    const { columns } = await readRaw("# name, mass_earth, radius_earth\nAster b,5,1\n");
+    expect(columns.map(({ name }) => name)).toEqual(["name", "mass_earth", "radius_earth"]);
   });
 
   test("names that JavaScript knows are names like any other", async () => {

@@ -50,7 +50,7 @@ async function takeHeader(lines: LineReader, headerComment: string, dialect: Dia
   const known = cells.filter(isKnownColumn).length;
   const numbers = cells.filter((cell) => cell.trim() !== "" && Number.isFinite(Number(cell))).length;
   if (commented.filter(isKnownColumn).length > known && (cells.length === 0 || commented.length === cells.length)) {
-    return commented;
+    return commented.map((cell) => cell.trim());
   }
   if (first === undefined) throw emptyFile(file);
   if (numbers > 0 && numbers >= known) throw noHeader(file, first);
