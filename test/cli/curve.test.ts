@@ -1,4 +1,4 @@
-import { existsSync, mkdtempSync, readFileSync, rmSync } from "node:fs";
+import { existsSync, mkdirSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { parse } from "csv-parse/sync";
@@ -39,6 +39,29 @@ describe("curve", () => {
     expectClose(Number(row.surface_gravity_m_s2), massParameter / radius ** 2, rounding);
     const density = massParameter / 6.6743e-11 / ((4 / 3) * Math.PI * radius ** 3);
     expectClose(Number(row.bulk_density_kg_m3), density, rounding);
+  });
+
+  test("a planet of constant density has the closed forms of a uniform sphere", async () => {
+    mkdirSync(join(folder, "own", "materials"), { recursive: true });
+    writeFileSync(
+      join(folder, "own", "materials", "slag.json"),
+      `{ "material": "slag", "title": "Slag", "phases": [ { "phase": "one", "calibratedToGPa": 10,
+         "eos": { "form": "constant", "densityKgM3": 4000 }, "source": { "citation": "made up for a test" } } ] }`,
+    );
+    const { out } = await runCommand(["curve", "slag", "--masses", "2", "--library", join(folder, "own")]);
+    const [row] = readRows(out);
+    const mass = (2 * 3.986004e14) / 6.6743e-11;
+    const radius = ((3 * mass) / (4 * Math.PI * 4000)) ** (1 / 3);
+    const solved = { rel: 1e-8, because: "accuracy promised of the solver" };
+    expectClose(Number(row.radius_m), radius, solved);
+    // P_c = 3 G M² / (8π R⁴)
+    expectClose(
+      Number(row.central_pressure_gpa),
+      (3 * 6.6743e-11 * mass ** 2) / (8 * Math.PI * radius ** 4) / 1e9,
+      solved,
+    );
+    expectClose(Number(row.inertia_factor), 0.4, solved);
+    expect(row.extrapolated_layers).toBe("slag");
   });
 
   test("60 masses from 0.1 to 20 unless told otherwise", async () => {
