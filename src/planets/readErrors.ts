@@ -16,10 +16,7 @@ export function readErrors(typed: TypedNumber, source: QuantitySource, row: RowC
   if (source.minus === undefined && source.plus === undefined) return none;
   let plus = readError(source.plus, row);
   let minus = source.minus === source.plus ? plus : readError(source.minus, row);
-  if (source.errorsAreBounds) {
-    if (plus !== undefined) plus -= typed.value;
-    if (minus !== undefined) minus = typed.value - minus;
-  }
+  if (source.errorsAreBounds) return distancesToBounds(typed.value, minus, plus, source, row);
   // No upper error is negative; a lower one may be, in lists that sign it.
   if (plus === -1) plus = undefined;
   if (minus === -1 && (plus === undefined || row.list.conventions.minusOneIsMissing)) minus = undefined;
@@ -28,6 +25,24 @@ export function readErrors(typed: TypedNumber, source: QuantitySource, row: RowC
     row.report("error-signs-swapped", source.plus ?? source.value, message);
   }
   return { minus: minus && Math.abs(minus), plus: plus && Math.abs(plus) };
+}
+
+function distancesToBounds(
+  value: number,
+  lower: number | undefined,
+  upper: number | undefined,
+  source: QuantitySource,
+  row: RowContext,
+): Errors {
+  if ((lower ?? value) <= value && value <= (upper ?? value)) {
+    return {
+      minus: lower === undefined ? undefined : value - lower,
+      plus: upper === undefined ? undefined : upper - value,
+    };
+  }
+  const message = `the value ${value} is not between its bounds ${lower ?? ""} and ${upper ?? ""}, which are ignored`;
+  row.report("value-outside-bounds", source.value, message);
+  return none;
 }
 
 function readError(index: number | undefined, row: RowContext): number | undefined {

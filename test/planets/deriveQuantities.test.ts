@@ -58,6 +58,12 @@ describe("mass from the velocity amplitude", () => {
     expectClose(amplitude, 12.5, { rel: 1e-12, because: "converged to rounding" });
   });
 
+  test("errors count by the powers of the relation: K, M*^(2/3), P^(1/3)", async () => {
+    const mass = (await rowOf(header, "12.5,0.25,4000,200,1,0.06,0,0"))?.quantities.minimumMass;
+    const relative = Math.hypot(0.02, (2 / 3) * 0.06, (1 / 3) * 0.05);
+    expectClose((mass?.plus ?? 0) / (mass?.value ?? 1), relative, { rel: 1e-12, because: "errors in quadrature" });
+  });
+
   test("without an inclination it is a minimum mass", async () => {
     const row = await rowOf(header, jupiter);
     expect(row?.quantities.minimumMass?.kind).toBe("measured");
@@ -88,4 +94,10 @@ test("stellar density from the transit: the Sun's, from the Earth's orbit", asyn
     rel: 1e-4,
     because: "the Earth's mean axis is 1.000001 au",
   });
+  const withErrors = await rowOf(
+    "mass_earth,scaled_axis,scaled_axis_err,period_days,period_days_err",
+    "1,10,0.1,5,0.1",
+  );
+  const { value = 1, plus = 0 } = withErrors?.quantities.starDensity ?? {};
+  expectClose(plus / value, Math.hypot(0.03, 0.04), { rel: 1e-12, because: "powers 3 and -2 in quadrature" });
 });

@@ -115,6 +115,14 @@ describe("error and flag columns", () => {
     expectClose(errors?.plus ?? 0, 2 * EARTH_MASS, oneFactor);
   });
 
+  test("ends that do not enclose the value are an issue and give no errors", async () => {
+    const columnChoices = { mass_earth_lower_bound: "mass_lower", mass_earth_upper_bound: "mass_upper" };
+    const text = "name,mass_earth,mass_lower,mass_upper\nA,5,6,8\n";
+    const [row] = (await readList(text, { columnChoices })).rows;
+    expect(row?.quantities.mass).toMatchObject({ kind: "no-uncertainty", minus: undefined, plus: undefined });
+    expect(row?.issues).toMatchObject([{ code: "value-outside-bounds" }]);
+  });
+
   test("and where the values cannot tell, the user must", async () => {
     const text = `name,mass_earth,mass_lower,mass_upper\n${bounds}B,5,1,2\n`;
     await expect(readList(text)).rejects.toMatchObject({ code: "ambiguous-column", found: "mass_earth,mass_upper" });
