@@ -1,3 +1,4 @@
+import { mean } from "simple-statistics";
 import type { QuantityName } from "../planets/quantity.ts";
 import { groupBy } from "./groupBy.ts";
 import type { QuantityTension } from "./tension.ts";
@@ -34,7 +35,7 @@ function summarise(group: readonly QuantityTension[]): PullSummary[] {
       quantity: first.quantity,
       count,
       identical: group.length - independent.length,
-      mean: pulls.reduce((sum, pull) => sum + pull, 0) / count,
+      mean: mean(pulls),
       chiSquare,
       chiSquareSigma: normalDeviate(chiSquare, count),
       fractionBeyond3Sigma: pulls.filter((pull) => Math.abs(pull) > 3).length / count,

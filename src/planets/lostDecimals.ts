@@ -1,3 +1,4 @@
+import { median } from "simple-statistics";
 import { InputError } from "../errors.ts";
 import type { ColumnPlan } from "./columnPlan.ts";
 import { quantityColumns } from "./columnTable.ts";
@@ -33,10 +34,10 @@ export function refuseLostDecimals(
     const cells = sample.map((record) => record.cells[source.value]?.trim() ?? "").filter((cell) => Number(cell) > 0);
     if (cells.length < SMALLEST_SAMPLE) continue;
     if (cells.some((cell) => !/^\d+$/.test(cell))) return;
-    const median = cells.map(Number).toSorted((a, b) => a - b)[Math.floor(cells.length / 2)] ?? 0;
-    if (median * source.unit.factor > limit) {
+    const middle = median(cells.map(Number));
+    if (middle * source.unit.factor > limit) {
       evidence.push(
-        `half of column "${columns[source.value]?.name}" (${quantityColumns[quantity].title}) is above ${median}`,
+        `half of column "${columns[source.value]?.name}" (${quantityColumns[quantity].title}) is above ${middle}`,
       );
     }
   }

@@ -1,3 +1,4 @@
+import { median } from "simple-statistics";
 import { InputError } from "../errors.ts";
 import type { ColumnChoices } from "./columnChoices.ts";
 import type { Ambiguity, UnitSource } from "./columnPlan.ts";
@@ -90,8 +91,8 @@ function isPossible(quantity: QuantityName, values: readonly number[], unit: Uni
   if (values.length < SMALLEST_SAMPLE || (unit.id !== "earth" && unit.id !== "jupiter")) return true;
   if (quantity !== "radius" && quantity !== "mass" && quantity !== "minimumMass") return true;
   const [low, high] = medianRange[quantity === "radius" ? "radius" : "mass"][unit.id];
-  const median = values.toSorted((a, b) => a - b)[Math.floor(values.length / 2)] ?? Number.NaN;
-  return median >= low && median <= high;
+  const middle = median(values as number[]);
+  return middle >= low && middle <= high;
 }
 
 const numbersOf = (sample: readonly RawRecord[], index: number): number[] =>
