@@ -57,9 +57,14 @@ function program(context: CommandContext): Command {
 }
 
 function messageOf(error: unknown): string {
-  if (error instanceof InputError) return [error.message, error.remedy].filter(Boolean).join(" ");
+  if (error instanceof InputError) return withRemedy(error);
   if (error instanceof BulkwrightError) return error.message;
   return `This is a fault of Bulkwright; please report it with the command line: ${error}`;
+}
+
+/** A remedy of several lines may stand in the message already, each line where it belongs. */
+function withRemedy({ message, remedy = "" }: InputError): string {
+  return remedy.split("\n").every((line) => message.includes(line)) ? message : `${message} ${remedy}`;
 }
 
 function errorLabel(io: Io): string {

@@ -15,8 +15,8 @@ export const explorerStyle = `.controls { display: flex; flex-wrap: wrap; gap: 0
 .explorer thead button {
   padding: 0; border: 0; background: none; color: inherit; font: inherit; text-align: inherit; cursor: pointer;
 }
-.explorer thead button::after { content: " ↕"; color: var(--ink-soft); }
-.explorer th[aria-sort="ascending"] button::after { content: " ↑"; color: inherit; }
-.explorer th[aria-sort="descending"] button::after { content: " ↓"; color: inherit; }
+.explorer thead button::after { content: "\\a0↕"; color: var(--ink-soft); }
+.explorer th[aria-sort="ascending"] button::after { content: "\\a0↑"; color: inherit; }
+.explorer th[aria-sort="descending"] button::after { content: "\\a0↓"; color: inherit; }
 @media print { .controls, .pager button { display: none; } .explorer thead button::after { content: ""; } }
 `;

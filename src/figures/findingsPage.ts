@@ -67,9 +67,9 @@ function findingsTable(records: readonly FindingRecord[]): ExplorableTable {
     columns: [
       { title: "Planet" },
       { title: "Row", numeric: true, digits: 9 },
-      { title: "Severity", isChoice: true, order: severities },
-      { title: "Rule", isChoice: true },
-      { title: "Quantity", isChoice: true },
+      { title: "Severity", isCode: true, isChoice: true, order: severities },
+      { title: "Rule", isCode: true, isChoice: true },
+      { title: "Quantity", isCode: true, isChoice: true },
       { title: "Value", numeric: true },
       { title: "Expected", numeric: true },
       { title: "Significance", unit: "sigma", numeric: true, digits: 2 },

@@ -23,6 +23,8 @@ export interface TableColumn {
   readonly digits?: number;
   /** Sentences need room. */
   readonly wide?: boolean;
+  /** Codes and identifiers are not broken where they have no hyphen. */
+  readonly isCode?: boolean;
 }
 
 /**
@@ -67,5 +69,6 @@ function classAttribute(column?: TableColumn): string {
 
 export function cellClass(column?: TableColumn): string {
   if (column?.numeric) return "number";
-  return column?.wide ? "sentence" : "";
+  if (column?.wide) return "sentence";
+  return column?.isCode ? "code" : "";
 }

@@ -111,7 +111,9 @@ test("records hold every pair and every row left over", () => {
   const others = [planetRow({ radius: [3, 0.1] }, {}, 1), planetRow({}, { name: "only there b" }, 2)];
   const match = matchLists(rows, others);
   const records = pairRecords(match, compareLists(match.pairs));
-  expect(records.flatMap((record) => Object.keys(record)).filter((key) => !pairColumns.some((column) => column === key))).toEqual([]);
+  expect(
+    records.flatMap((record) => Object.keys(record)).filter((key) => !pairColumns.some((column) => column === key)),
+  ).toEqual([]);
   expect(records.map(({ name, name_other, match: method, quantity }) => [name, name_other, method, quantity])).toEqual([
     ["Ostara 1 b", "Ostara 1 b", "name", "radius_earth"],
     ["only here b", undefined, "only-first", undefined],

@@ -14,7 +14,21 @@ const twin = (radius: number, other: Written) => [
   { ...planetRow({ radius: [radius, 0.1] }), twins: { radius: [quantity("radius", other)] } },
 ];
 
+const withIssue = {
+  code: "not-a-number",
+  origin: { file: "f", line: 2, column: "m" },
+  found: "x",
+  message: "no number",
+};
+
 export const listCases: readonly RuleCase[] = [
+  {
+    rule: "unreadable-cell",
+    fires: [
+      { why: "the reader found an issue", rows: [{ ...planetRow({}), issues: [withIssue] }], severity: "warning" },
+    ],
+    silent: [{ why: "an empty row", rows: one({}) }],
+  },
   {
     rule: "twin-columns",
     fires: [
