@@ -1,3 +1,12 @@
+export { type ChosenRow, choosePublications, type PublicationRule } from "./crosscheck/choosePublication.ts";
+export { compareLists, type ListComparison } from "./crosscheck/compareLists.ts";
+export type { Finding, Severity } from "./crosscheck/finding.ts";
+export { type FindingRecord, findingRecord } from "./crosscheck/findingRecord.ts";
+export type { AmbiguousMatch, ListMatch, MatchedPair, MatchMethod } from "./crosscheck/listMatch.ts";
+export { type MatchOptions, matchLists } from "./crosscheck/matchLists.ts";
+export type { PhysicalLimits, Rule } from "./crosscheck/rule.ts";
+export { rules } from "./crosscheck/rules.ts";
+export { countFindings, runRules } from "./crosscheck/runRules.ts";
 export { type CurvePoint, sweepMasses } from "./curve/sweep.ts";
 export type { EosCurve } from "./eos/curve.ts";
 export { densityAt, type Material, type Phase, phaseAt, type Source } from "./eos/material.ts";

@@ -73,7 +73,7 @@ function pullTable(pulls: ComparedWith["pulls"], i: number): PageTable {
     caption:
       "Differences over their combined errors. Believable errors give a chi-square near the number of pairs; one of many sigma above it means errors too small, below it errors too large or values in common",
     columns: [
-      { title: "Quantity" },
+      { title: "Quantity", isCode: true },
       { title: "Pairs", numeric: true, digits: 9 },
       { title: "Identical, left out", numeric: true, digits: 9 },
       { title: "Mean pull", numeric: true, digits: 3 },

@@ -12,6 +12,7 @@ export const explorerStyle = `.controls { display: flex; flex-wrap: wrap; gap: 0
   background: none; color: inherit; font: inherit; cursor: pointer;
 }
 .pager button:disabled { color: var(--ink-soft); border-color: var(--rule); cursor: default; }
+.explorer .sentence { min-width: 11rem; }
 .explorer thead button {
   padding: 0; border: 0; background: none; color: inherit; font: inherit; text-align: inherit; cursor: pointer;
 }

@@ -101,7 +101,7 @@ function ruleTable({ rules, counts }: FindingsPage): PageTable {
     id: "rules",
     caption: "Every rule that was applied, and how often rows contradict it",
     columns: [
-      { title: "Rule" },
+      { title: "Rule", isCode: true },
       ...["Error", "Warning", "Info"].map((title) => ({ title, numeric: true, digits: 9 })),
       { title: "Claim", wide: true },
       { title: "Formula", wide: true },

@@ -39,7 +39,7 @@ tbody th {
 }
 td { overflow-wrap: anywhere; }
 .sentence { min-width: 13rem; }
-td.code { overflow-wrap: normal; }
+.code { overflow-wrap: normal; }
 thead th {
   position: sticky; top: 0; background: var(--panel); font-weight: 600; vertical-align: bottom;
   border-bottom: 1px solid var(--rule);
