@@ -1,0 +1,76 @@
+import { ConvergenceError, ModelRangeError } from "../../errors.ts";
+import type { EosCurve } from "../curve.ts";
+import { checkPressure } from "../range.ts";
+import { stateFromHelmholtz, type ThermalEos, type ThermalState } from "./thermalState.ts";
+import type { HelmholtzState } from "./thermalTerm.ts";
+
+const MAX_ITERATIONS = 60;
+/** Newton converges quadratically: a step this small leaves an error near rounding level. */
+const LAST_STEP = 1e-8;
+
+/**
+ * A single phase: its pressure and entropy are explicit in the coordinate y of a reference curve and temperature, so
+ * only density at a given pressure has to be found.
+ * Checked test/eos/thermal/helmholtzEos.test.ts
+ */
+export abstract class HelmholtzEos implements ThermalEos {
+  /** The curve the phase follows at its reference: an isotherm or an isentrope. */
+  readonly reference: EosCurve;
+  readonly minPressure: number;
+  readonly maxPressure: number;
+  private readonly slopes = new Float64Array(4);
+
+  constructor(reference: EosCurve, maxPressure: number) {
+    this.reference = reference;
+    this.minPressure = reference.minPressure;
+    this.maxPressure = maxPressure;
+  }
+
+  /** Derivatives of the Helmholtz energy at a coordinate of the reference curve and a temperature [K]. */
+  abstract helmholtz(y: number, temperature: number): HelmholtzState;
+
+  at(pressure: number, temperature: number): ThermalState {
+    if (!(temperature > 0)) {
+      throw new ModelRangeError("temperature-range", `Temperature is ${temperature} K; it must be above 0 K.`, {
+        quantity: "temperature",
+        value: temperature,
+        minimum: 0,
+      });
+    }
+    checkPressure("warm", this, pressure);
+    let y = this.reference.coordinate(pressure);
+    for (let i = 0; i < MAX_ITERATIONS; i++) {
+      const state = this.helmholtz(y, temperature);
+      if (!(state.bulkModulus > 0)) throw unstable(pressure, temperature);
+      const step = (pressure - state.pressure) / (state.bulkModulus * this.logDensitySlope(y));
+      if (Math.abs(step) <= LAST_STEP * y) return this.stateAt(y + step, temperature);
+      y += step;
+      if (!(y > 0)) throw unstable(pressure, temperature);
+    }
+    throw new ConvergenceError("thermal-density", `No density found at ${pressure} Pa and ${temperature} K.`);
+  }
+
+  private stateAt(y: number, temperature: number): ThermalState {
+    return stateFromHelmholtz(this.reference.density(y), temperature, this.helmholtz(y, temperature));
+  }
+
+  /** d ln ρ / dy of the reference curve. */
+  protected logDensitySlope(y: number): number {
+    this.reference.slopes(y, this.slopes);
+    return this.slopes[2];
+  }
+
+  /** Bulk modulus dP / d ln ρ along the reference curve [Pa]. */
+  protected referenceModulus(y: number): number {
+    this.reference.slopes(y, this.slopes);
+    return this.slopes[0] / this.slopes[2];
+  }
+}
+
+function unstable(pressure: number, temperature: number): ModelRangeError {
+  return new ModelRangeError(
+    "thermal-unstable",
+    `At ${pressure} Pa and ${temperature} K the phase has no state with a positive bulk modulus: it would expand without limit. Lower the temperature or use another phase there.`,
+    { quantity: "temperature", value: temperature, minimum: 0 },
+  );
+}

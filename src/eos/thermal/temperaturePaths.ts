@@ -1,0 +1,101 @@
+import { ConvergenceError, ModelRangeError } from "../../errors.ts";
+import { IsothermBasedEos } from "./isothermBasedEos.ts";
+import type { ThermalEos, ThermalState } from "./thermalState.ts";
+import { PathCurve, type PathPoint, type WarmCurve } from "./warmCurve.ts";
+
+const MAX_ITERATIONS = 60;
+
+/**
+ * The curve of constant entropy through an anchor, which serves as an adiabat of a well-mixed layer.
+ * Formula S(P, T) = S(P_a, T_a), solved for T at every pressure sampled
+ * Units   Pa, K
+ * Throws  ModelRangeError as `ThermalEos.at`, for the anchor
+ * Checked test/eos/thermal/temperaturePaths.test.ts
+ */
+export function isentrope(eos: ThermalEos, anchorPressure: number, anchorTemperature: number): WarmCurve {
+  const anchor = eos.at(anchorPressure, anchorTemperature);
+  const scale = pressureScale(anchor, anchorPressure);
+  const point = (pressure: number): PathPoint => {
+    // First guess: d ln T/dP = γ/K with constant γ and K = 4 (P + P*).
+    const stiffening = (pressure + scale) / (anchorPressure + scale);
+    let temperature = anchorTemperature * stiffening ** (anchor.gruneisen / 4);
+    for (let i = 0; i < MAX_ITERATIONS; i++) {
+      const state = eos.at(pressure, temperature);
+      const step = (anchor.entropy - state.entropy) / state.heatCapacityP;
+      temperature *= Math.exp(step);
+      if (Math.abs(step) < 1e-9) {
+        // The density of the last state, carried over a step too small to need another evaluation.
+        return { density: state.density * (1 - state.expansivity * temperature * step), temperature };
+      }
+    }
+    throw new ConvergenceError("isentrope", `No temperature found on the isentrope at ${pressure} Pa.`, temperature);
+  };
+  return pathCurve(eos, point, anchorPressure, scale);
+}
+
+/**
+ * The curve of constant temperature [K]; at the reference temperature of a phase its cold curve itself.
+ * Checked test/eos/thermal/temperaturePaths.test.ts
+ */
+export function isotherm(eos: ThermalEos, temperature: number, fromPressure = 0): WarmCurve {
+  if (eos instanceof IsothermBasedEos && eos.referenceTemperature === temperature) {
+    const cold = eos.reference;
+    return {
+      minPressure: cold.minPressure,
+      maxPressure: eos.maxPressure,
+      pressure: (y) => cold.pressure(y),
+      density: (y) => cold.density(y),
+      slopes: (y, out) => cold.slopes(y, out),
+      coordinate: (pressure) => cold.coordinate(pressure),
+      coordinateAtDensity: (density) => cold.coordinateAtDensity(density),
+      temperature: () => temperature,
+    };
+  }
+  return alongTemperature(eos, () => temperature, { fromPressure });
+}
+
+/**
+ * The curve along a given temperature [K] of pressure [Pa].
+ * `kinks` are the pressures where the temperature is not smooth (the rows of a table), ascending.
+ * Checked test/eos/thermal/temperaturePaths.test.ts
+ */
+export function alongTemperature(
+  eos: ThermalEos,
+  temperatureAt: (pressure: number) => number,
+  options: { fromPressure?: number; kinks?: readonly number[] } = {},
+): WarmCurve {
+  const { fromPressure = 0, kinks } = options;
+  const start = eos.at(fromPressure, temperatureAt(fromPressure));
+  const point = (pressure: number): PathPoint => {
+    const temperature = temperatureAt(pressure);
+    return { density: eos.at(pressure, temperature).density, temperature };
+  };
+  return pathCurve(eos, point, fromPressure, pressureScale(start, fromPressure), kinks);
+}
+
+/** P* of K = 4 (P + P*), kept positive where compression has made K/P smaller than 4. */
+function pressureScale({ bulkModulusT }: ThermalState, pressure: number): number {
+  return Math.max(bulkModulusT / 4 - pressure, bulkModulusT / 20);
+}
+
+/** A path begins at zero pressure where the substance can be decompressed that far, else where it is anchored. */
+function pathCurve(
+  eos: ThermalEos,
+  path: (pressure: number) => PathPoint,
+  anchorPressure: number,
+  scale: number,
+  kinks?: readonly number[],
+): WarmCurve {
+  const minPressure = reachesZero(path) ? 0 : anchorPressure;
+  return new PathCurve(path, { minPressure, maxPressure: eos.maxPressure, scale, kinks });
+}
+
+function reachesZero(path: (pressure: number) => PathPoint): boolean {
+  try {
+    path(0);
+    return true;
+  } catch (error) {
+    if (error instanceof ModelRangeError) return false;
+    throw error;
+  }
+}

@@ -1,0 +1,51 @@
+import type { HelmholtzState } from "./thermalTerm.ts";
+
+/** Everything a planet model asks of a substance at one pressure and temperature. SI, per kilogram. */
+export interface ThermalState {
+  readonly density: number;
+  readonly entropy: number;
+  readonly heatCapacityV: number;
+  readonly heatCapacityP: number;
+  /** α = (1/V) ∂V/∂T at constant pressure [1/K]. */
+  readonly expansivity: number;
+  readonly bulkModulusT: number;
+  readonly bulkModulusS: number;
+  /** Thermodynamic Grüneisen parameter α K_T V / c_V. */
+  readonly gruneisen: number;
+  /** ∂T/∂P at constant entropy [K/Pa]. */
+  readonly adiabaticGradient: number;
+}
+
+/** A substance with temperature. */
+export interface ThermalEos {
+  /** Pressure beyond which the form breaks, at the reference temperature and so at any higher one [Pa]. */
+  readonly maxPressure: number;
+  /**
+   * Throws ModelRangeError `thermal-unstable` where no state with positive bulk modulus exists,
+   * `eos-pressure-range` beyond the cold curve, `temperature-range` unless the temperature is positive.
+   */
+  at(pressure: number, temperature: number): ThermalState;
+}
+
+/**
+ * From derivatives of the Helmholtz energy at a density and temperature.
+ * Source  Poirier 2000, Introduction to the Physics of the Earth's Interior, section 2.2
+ */
+export function stateFromHelmholtz(density: number, temperature: number, helmholtz: HelmholtzState): ThermalState {
+  const { entropy, bulkModulus, pressureSlope, heatCapacity } = helmholtz;
+  const expansivity = pressureSlope / bulkModulus;
+  const gruneisen = pressureSlope / (density * heatCapacity);
+  const stiffening = 1 + expansivity * gruneisen * temperature;
+  const bulkModulusS = bulkModulus * stiffening;
+  return {
+    density,
+    entropy,
+    heatCapacityV: heatCapacity,
+    heatCapacityP: heatCapacity * stiffening,
+    expansivity,
+    bulkModulusT: bulkModulus,
+    bulkModulusS,
+    gruneisen,
+    adiabaticGradient: (gruneisen * temperature) / bulkModulusS,
+  };
+}
