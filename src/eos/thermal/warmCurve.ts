@@ -133,6 +133,11 @@ export class PathCurve implements WarmCurve {
     return (1 + pressure / this.scale) ** (1 / EXPONENT);
   }
 
+  /** Pressure at a node, kept from leaving the range by rounding. */
+  private pressureInRange(y: number): number {
+    return Math.min(Math.max(this.pressure(y), this.minPressure), this.maxPressure);
+  }
+
   /** Cells of equal width, further divided at kinks; cell number plus kinks passed numbers the pieces uniquely. */
   private pieceAt(y: number): Polynomials {
     // Steps that overshoot the lowest pressure see the lowest piece continued.
@@ -152,9 +157,9 @@ export class PathCurve implements WarmCurve {
   }
 
   private makePiece(from: number, to: number, halvingsLeft: number): Piece {
-    const points = Array.from(chebyshevNodes(from, to, DEGREE), (y) => this.path(this.pressure(y)));
-    const fit = (values: number[]) => new ChebyshevPolynomial(from, to, values);
-    const logDensity = fit(points.map((point) => Math.log(point.density)));
+    const points = Array.from(chebyshevNodes(from, to, DEGREE), (y) => this.path(this.pressureInRange(y)));
+    const through = (values: number[]) => new ChebyshevPolynomial(from, to, values);
+    const logDensity = through(points.map((point) => Math.log(point.density)));
     if (logDensity.tail > TOLERANCE && halvingsLeft > 0) {
       const middle = (from + to) / 2;
       return {
@@ -163,6 +168,6 @@ export class PathCurve implements WarmCurve {
         high: this.makePiece(middle, to, halvingsLeft - 1),
       };
     }
-    return { logDensity, temperature: fit(points.map((point) => point.temperature)) };
+    return { logDensity, temperature: through(points.map((point) => point.temperature)) };
   }
 }
