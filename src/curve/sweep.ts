@@ -9,8 +9,8 @@ export type CurvePoint =
   | { readonly mass: number; readonly planet: Planet; readonly error?: undefined }
   | { readonly mass: number; readonly planet?: undefined; readonly error: BulkwrightError };
 
-/** Planets remembered to predict the next central pressure: enough for a quadratic in ln M. */
-const MEMORY = 3;
+/** Planets remembered to predict the next central pressure: enough for a cubic in ln M. */
+const MEMORY = 4;
 /** Beyond this step in ln M an extrapolation is no better than a fresh guess. */
 const NEAR = 0.7;
 

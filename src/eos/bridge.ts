@@ -82,6 +82,10 @@ class BridgeCurve implements EosCurve {
     return pressure;
   }
 
+  invert(pressure: number): number {
+    return pressure;
+  }
+
   coordinateAtDensity(density: number): number {
     const { minPressure, maxPressure, logDensity } = this;
     checkDensity("bridge", density, this.density(minPressure), this.density(maxPressure));

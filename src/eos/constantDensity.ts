@@ -39,6 +39,10 @@ class ConstantCurve implements EosCurve {
     return pressure;
   }
 
+  invert(pressure: number): number {
+    return pressure;
+  }
+
   /** Every pressure has this density; the lowest one is given. */
   coordinateAtDensity(density: number): number {
     checkDensity("constant", density, this.only, this.only);

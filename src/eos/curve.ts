@@ -29,6 +29,11 @@ export interface EosCurve {
    * Throws ModelRangeError `eos-pressure-range` outside [minPressure, maxPressure]; never clamps, never returns NaN.
    */
   coordinate(pressure: number): number;
+  /**
+   * The same without the check of range, for rounding and trial steps that end just beyond it; where no y has the
+   * pressure the number returned means nothing and may be NaN.
+   */
+  invert(pressure: number): number;
   /** The y at a density [kg m^-3]. Throws ModelRangeError `eos-density-range` where the form has no such density. */
   coordinateAtDensity(density: number): number;
 }

@@ -54,11 +54,15 @@ export abstract class FiniteStrainCurve implements EosCurve {
 
   coordinate(pressure: number): number {
     checkPressure(this.form, this, pressure);
+    return this.invert(pressure);
+  }
+
+  invert(pressure: number): number {
     // Murnaghan's form, K = K0 + K0' P, has a closed inverse and starts Newton within a few percent.
     const { bulkModulus, bulkModulusPrime } = this;
     const guess = (1 + (bulkModulusPrime * pressure) / bulkModulus) ** (1 / (3 * bulkModulusPrime));
     return invertIncreasing(this.pressureFunction, pressure, {
-      low: 1,
+      low: LEAST_COMPRESSION,
       high: this.turnOver,
       guess: Math.min(guess, this.turnOver),
     });
@@ -75,6 +79,9 @@ export abstract class FiniteStrainCurve implements EosCurve {
     if (this.turnOver < Number.POSITIVE_INFINITY) this.maxPressure = this.pressure(this.turnOver);
   }
 }
+
+/** Well outside the range (y >= 1), so that pressures a little below zero still find their y. */
+const LEAST_COMPRESSION = 0.8;
 
 /** Far beyond any planet: a linear compression of 30 is a density of 27 000 ρ0. */
 const LARGEST_COMPRESSION = 30;

@@ -8,8 +8,9 @@ export interface IncreasingFunction {
  * The y in [low, high] at which an increasing function takes the value `target`: Newton's method, replaced by
  * bisection (or doubling while `high` is Infinity) whenever a step would leave the bracket or does not halve.
  *
- * The caller makes sure that a solution exists. A step below 1e-10 ends the iteration: convergence is quadratic, so
- * the error left is rounding, except at a turning point, where the step itself bounds it.
+ * The caller makes sure that a solution exists; if there is none an end of the bracket, or NaN, comes back. A step
+ * below 1e-10 ends the iteration: convergence is quadratic, so the error left is rounding, except at a turning point,
+ * where the step itself bounds it.
  */
 export function invertIncreasing(
   f: IncreasingFunction,
@@ -20,7 +21,7 @@ export function invertIncreasing(
   let lastStep = Number.POSITIVE_INFINITY;
   for (;;) {
     const excess = f.value(y) - target;
-    if (excess === 0) return y;
+    if (!(excess > 0 || excess < 0)) return y;
     if (excess > 0) high = y;
     else low = y;
     const newton = y - excess / f.slope(y);

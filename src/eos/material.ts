@@ -19,6 +19,8 @@ export interface Phase {
   /** Top of the data behind the parameters [Pa]; a result that used the phase beyond it is extrapolated. */
   readonly calibratedTo: number;
   readonly source: Source;
+  /** What is mixed, if this is a mixture; the sources of its parts are its sources. */
+  readonly components?: readonly { readonly material: string; readonly phase: Phase }[];
 }
 
 /** A substance as a stack of phases, lowest pressure first, without gaps. */
@@ -26,4 +28,17 @@ export interface Material {
   readonly name: string;
   readonly title: string;
   readonly phases: readonly Phase[];
+}
+
+/** The phase stable at a pressure [Pa]; on a boundary the denser one, above it. */
+export function phaseAt({ phases }: Material, pressure: number): Phase {
+  let i = phases.length - 1;
+  while (i > 0 && pressure < phases[i].fromPressure) i--;
+  return phases[i];
+}
+
+/** Density [kg m^-3] at a pressure [Pa]. Throws ModelRangeError `eos-pressure-range` where the form there ends. */
+export function densityAt(material: Material, pressure: number): number {
+  const { curve } = phaseAt(material, pressure);
+  return curve.density(curve.coordinate(pressure));
 }

@@ -14,7 +14,7 @@ const HIGHEST_PRESSURE = 1e20;
 /**
  * An intimate mixture at one pressure whose volumes add: 1/ρ = Σ w_i / ρ_i(P). The coordinate is that of the first
  * part; the others are inverted at every evaluation, so put first the one that is dearest to invert.
- * Valid   where all parts are; outside, `slopes` are NaN
+ * Valid   where all parts are
  * Checked test/eos/mixCurves.test.ts
  */
 export function mixCurves(parts: readonly CurvePart[]): EosCurve {
@@ -46,17 +46,13 @@ class MixedCurve implements EosCurve {
     const pressure = this.lead.pressure(y);
     let volume = this.leadFraction / this.lead.density(y);
     for (const { curve, massFraction } of this.others) {
-      volume += massFraction / curve.density(curve.coordinate(pressure));
+      volume += massFraction / curve.density(curve.invert(pressure));
     }
     return 1 / volume;
   }
 
   slopes(y: number, out: Float64Array): void {
     const pressure = this.lead.pressure(y);
-    if (!(pressure >= this.minPressure && pressure <= this.maxPressure)) {
-      out.fill(Number.NaN);
-      return;
-    }
     const { scratch } = this;
     this.lead.slopes(y, out);
     const slope = out[0];
@@ -66,7 +62,7 @@ class MixedCurve implements EosCurve {
     let enthalpySlope = this.leadFraction * out[1];
     for (let i = 0; i < this.others.length; i++) {
       const { curve, massFraction } = this.others[i];
-      const otherY = curve.coordinate(pressure);
+      const otherY = curve.invert(pressure);
       curve.slopes(otherY, scratch);
       const share = massFraction / curve.density(otherY);
       volume += share;
@@ -79,7 +75,11 @@ class MixedCurve implements EosCurve {
 
   coordinate(pressure: number): number {
     checkPressure("mixture", this, pressure);
-    return this.lead.coordinate(pressure);
+    return this.invert(pressure);
+  }
+
+  invert(pressure: number): number {
+    return this.lead.invert(pressure);
   }
 
   coordinateAtDensity(density: number): number {

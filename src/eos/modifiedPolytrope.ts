@@ -74,6 +74,10 @@ class ModifiedPolytropeCurve implements EosCurve {
 
   coordinate(pressure: number): number {
     checkPressure("modified-polytrope", this, pressure);
+    return this.invert(pressure);
+  }
+
+  invert(pressure: number): number {
     return pressure ** (1 / (1 + this.index));
   }
 

@@ -69,6 +69,10 @@ class TableCurve implements EosCurve {
     return pressure;
   }
 
+  invert(pressure: number): number {
+    return pressure;
+  }
+
   /** Where density does not change over several pressures, any of them may be given. */
   coordinateAtDensity(density: number): number {
     const { minPressure: low, maxPressure: high, logDensity } = this;

@@ -112,6 +112,10 @@ class ThomasFermiDiracCurve implements EosCurve {
 
   coordinate(pressure: number): number {
     checkPressure("thomas-fermi-dirac", this, pressure);
+    return this.invert(pressure);
+  }
+
+  invert(pressure: number): number {
     return (pressure / PRESSURE_UNIT) ** 0.2;
   }
 

@@ -8,6 +8,11 @@ const NODES = 8;
 const PRESSURE_SHARE = 0.08;
 const ROUNDS = 12;
 const SETTLED = 1e-13;
+/** The sensitivity steers Newton's method; it need not be as good as the solution. */
+const SENSITIVITY_SETTLED = 1e-9;
+/** Where a form is about to turn over, dP/dy is small and only a smaller ball converges. */
+const ATTEMPTS = 12;
+const SHRINK = 0.25;
 
 const { nodes, integral, ballMean } = powerCollocation(NODES);
 
@@ -31,7 +36,7 @@ export class CentralBall {
   /**
    * Writes the by-mass state at the ball's edge (see structureEquations.ts) into `state` and returns its s.
    * The edge is where the pressure has fallen by a fixed share, but not beyond `largestS` and only half way to
-   * `floor`, the pressure where the phase ends.
+   * `floor`, the pressure where the phase ends. Returns NaN where no ball converges, however small.
    */
   fill(curve: EosCurve, centralPressure: number, floor: number, largestS: number, state: Float64Array): number {
     const centre = curve.coordinate(centralPressure);
@@ -39,15 +44,19 @@ export class CentralBall {
     curve.slopes(centre, atCentre);
     const w0 = (B * (atCentre[1] / atCentre[0])) ** (2 / 3);
     const drop = Math.min(PRESSURE_SHARE * centralPressure, 0.5 * (centralPressure - floor));
-    const s = Math.min((drop * w0 * w0) / A, largestS);
     const centrePrime = centralPressure / atCentre[0];
-    this.iterate(curve, centre, w0, s);
-    this.linearise(centrePrime, s);
-    this.write(s, state);
-    return s;
+    let s = Math.min((drop * w0 * w0) / A, largestS);
+    for (let attempt = 0; attempt < ATTEMPTS; attempt++) {
+      if (this.iterate(curve, centre, w0, s) && this.linearise(centrePrime, s)) {
+        this.write(s, state);
+        return s;
+      }
+      s *= SHRINK;
+    }
+    return Number.NaN;
   }
 
-  private iterate(curve: EosCurve, centre: number, w0: number, s: number): void {
+  private iterate(curve: EosCurve, centre: number, w0: number, s: number): boolean {
     const { w, y, slopes, work } = this;
     y.fill(centre);
     w.fill(w0);
@@ -65,11 +74,12 @@ export class CentralBall {
         change = Math.max(change, Math.abs(next - y[i]));
         y[i] = next;
       }
-      if (change <= SETTLED * centre) return;
+      if (change <= SETTLED * centre) return true;
     }
+    return false;
   }
 
-  private linearise(centrePrime: number, s: number): void {
+  private linearise(centrePrime: number, s: number): boolean {
     const { w, slopes, work, wLogPrime, yPrime } = this;
     yPrime.fill(centrePrime);
     for (let round = 0; round < ROUNDS; round++) {
@@ -85,9 +95,9 @@ export class CentralBall {
         change = Math.max(change, Math.abs(next - yPrime[i]));
         yPrime[i] = next;
       }
-      // The sensitivity steers Newton's method; it need not be as good as the solution.
-      if (change <= 1e-9 * centrePrime) return;
+      if (change <= SENSITIVITY_SETTLED * centrePrime) return true;
     }
+    return false;
   }
 
   private write(s: number, state: Float64Array): void {
@@ -96,13 +106,13 @@ export class CentralBall {
     const v = w[edge] * s;
     state[0] = v;
     state[1] = y[edge];
-    state[2] = v * wLogPrime[edge];
-    state[3] = yPrime[edge];
+    state[4] = v * wLogPrime[edge];
+    state[5] = yPrime[edge];
     // I = ∫ v √s ds and U = ∫ (3/2) G s²/√v ds = ∫ (3/2) G √s (s/√w) ds.
     for (let i = 0; i < NODES; i++) work[i] = w[i] * nodes[i];
-    state[4] = s ** 2.5 * dot(ballMean[edge], work);
+    state[2] = s ** 2.5 * dot(ballMean[edge], work);
     for (let i = 0; i < NODES; i++) work[i] = nodes[i] / Math.sqrt(w[i]);
-    state[5] = 1.5 * G * s ** 2.5 * dot(ballMean[edge], work);
+    state[3] = 1.5 * G * s ** 2.5 * dot(ballMean[edge], work);
   }
 }
 

@@ -1,4 +1,4 @@
-import type { Material } from "../eos/material.ts";
+import { type Material, phaseAt } from "../eos/material.ts";
 import type { Composition } from "../library/composition.ts";
 import { G } from "../units/constants.ts";
 
@@ -33,4 +33,3 @@ function densityNear(material: Material, pressure: number): number {
   const inRange = Math.min(Math.max(pressure, curve.minPressure), curve.maxPressure * 0.99);
   return Math.max(curve.density(curve.coordinate(inRange)), 1);
 }
-function phaseAt(material: Material, pressure: number) { const { phases } = material; let i = phases.length - 1; while (i > 0 && pressure < phases[i].fromPressure) i--; return phases[i]; }

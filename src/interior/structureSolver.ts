@@ -1,125 +1,107 @@
-import { ConvergenceError, ModelRangeError } from "../errors.ts";
+import { ConvergenceError, InputError } from "../errors.ts";
 import type { Composition } from "../library/composition.ts";
-import { EARTH_MASS, G, GPA } from "../units/constants.ts";
+import { G } from "../units/constants.ts";
 import { guessCentralPressure } from "./centralPressureGuess.ts";
+import {
+  MASS_RANGE,
+  massAboveMaximum,
+  massIndependentOfPressure,
+  massOutOfRange,
+  noCentralPressure,
+} from "./massErrors.ts";
 import type { Planet } from "./planet.ts";
-import { TrialIntegration } from "./trialIntegration.ts";
-
-/** Masses the solver is built and tested for [kg]: 1e-3 to 1e3 Earth masses. */
-export const MASS_RANGE = { minimum: 1e-3 * EARTH_MASS, maximum: 1e3 * EARTH_MASS } as const;
+import { type Shot, shoot } from "./shooting.ts";
+import { type Stretch, TrialIntegration } from "./trialIntegration.ts";
 
 /** Allowed relative error of one integration step; the default meets 1e-8 in radius with room to spare. */
-export const DEFAULT_TOLERANCE = 3e-10;
-/** Tolerance while the central pressure is still far off. */
-const COARSE_TOLERANCE = 1e-6;
-/** A Newton step below this in ln P_c ends the shooting; its first-order effect on the radius is applied. */
-const ACCEPTED_STEP = 1e-8;
-/** Below this Newton step the coarse tolerance would only waste a round. */
-const NEARLY_THERE = 1e-3;
-const MAX_ROUNDS = 200;
-/** Derivative d ln M / d ln P_c that counts as none: the mass does not depend on the central pressure. */
-const NO_RESPONSE = 1e-7;
+export const DEFAULT_TOLERANCE = 1e-9;
 /**
  * How far the sum of estimated local errors may be amplified on its way to the radius. Measured: the true error of
- * 400 random planets stays below the estimate (test/interior/radiusError.test.ts).
+ * random planets stays below the estimate (test/interior/radiusError.test.ts).
  */
-const ERROR_AMPLIFICATION = 2;
+const ERROR_AMPLIFICATION = 1;
 const ROUND_OFF = 2e-14;
-
-/** What the shooting knows about where the root ln P_c lies. */
-interface Bracket {
-  low: number;
-  high: number;
-  /** Largest logMassExcess seen on the falling or limiting side, for the maximum-mass message. */
-  bestExcess: number;
-  broken: boolean;
-}
+/** How closely a maximum mass is pinned down, relative. */
+const MAXIMUM_MASS_PRECISION = 1e-6;
+const ROUNDS = 100;
 
 /**
- * Finds the planets of one composition by shooting in ln P_c: the trial mass inside the surface pressure must equal the
- * mass asked for. Newton's method with the integrated sensitivity, inside a bracket that keeps to the stable branch
- * (mass growing with central pressure), so that below a maximum mass the low-pressure root is the one returned.
- * Keeps work space and is not re-entrant: one solver per composition and thread.
+ * Planets of one composition. Keeps work space and what it learned of a maximum mass, and is not re-entrant: one
+ * solver per composition and thread.
  */
 export class StructureSolver {
   readonly composition: Composition;
   private readonly trial: TrialIntegration;
   private readonly tolerance: number;
+  /** The largest mass that can be solved [kg] and the phase that sets it, known once a mass beyond was asked for. */
+  private maximum: { readonly mass: number; readonly broken: Stretch | undefined } | undefined;
 
+  /** Throws InputError `composition-empty` for a composition without layers. */
   constructor(composition: Composition, options: { tolerance?: number } = {}) {
+    if (composition.layers.length === 0) {
+      throw new InputError("composition-empty", `Composition ${composition.name} has no layer with mass in it.`);
+    }
     this.composition = composition;
     this.trial = new TrialIntegration(composition);
     this.tolerance = options.tolerance ?? DEFAULT_TOLERANCE;
   }
 
   /**
-   * The planet of `mass` [kg]. `guess` is a central pressure [Pa], e.g. extrapolated from the last planet of a sweep.
-   * Throws ModelRangeError: `mass-range`; `mass-above-maximum` (maximum = that mass) where no stable planet exists;
-   *   `mass-independent-of-pressure` where every central pressure gives one and the same mass;
-   *   ConvergenceError `structure-not-converged` with the best central pressure so far.
+   * The planet of `mass` [kg]. `guess` is a central pressure [Pa] close to the right one, e.g. extrapolated along a
+   * sweep. Below a maximum mass the stable planet (mass growing with central pressure) is the one returned.
+   * Throws  ModelRangeError `mass-range`; `mass-above-maximum` (with that mass); `mass-independent-of-pressure`, e.g.
+   *         for a polytrope of index 3; `no-central-pressure`. ConvergenceError `structure-not-converged`.
+   * Checked test/interior/structureReference.test.ts, polytropes.test.ts, maximumMass.test.ts
    */
   solve(mass: number, guess?: number): Planet {
+    const { trial } = this;
     if (!(mass >= MASS_RANGE.minimum * (1 - 1e-12) && mass <= MASS_RANGE.maximum * (1 + 1e-12))) {
       throw massOutOfRange(mass);
     }
-    const { trial } = this;
-    const evaluationsBefore = trial.evaluations;
-    const runsBefore = trial.runs;
-    const { logPressure, lastStep } = this.shoot(mass, Math.log(guess ?? guessCentralPressure(this.composition, mass)), guess !== undefined);
-    return this.planet(mass, logPressure, lastStep, {
-      integrations: trial.runs - runsBefore,
-      rightHandSides: trial.evaluations - evaluationsBefore,
-    });
+    if (this.maximum !== undefined && mass > this.maximum.mass) {
+      throw massAboveMaximum(this.composition.name, mass, this.maximum.mass, this.maximum.broken);
+    }
+    const before = { integrations: trial.runs, rightHandSides: trial.evaluations };
+    const shot = this.shoot(mass, guess);
+    if (shot.outcome !== "found") throw this.failure(mass, shot);
+    return this.planet(mass, shot.logPressure, shot.lastStep, before);
   }
 
-  private shoot(mass: number, start: number, warm: boolean): { logPressure: number; lastStep: number } {
+  /**
+   * The planet that a central pressure [Pa] holds up; the only way to ask for a body whose mass does not depend on it.
+   * Throws  ConvergenceError `structure-not-converged` where that pressure makes no planet of this composition.
+   */
+  fromCentralPressure(centralPressure: number): Planet {
     const { trial } = this;
-    const bracket: Bracket = { low: -Infinity, high: Infinity, bestExcess: -Infinity, broken: false };
-    let x = start;
-    let fine = warm;
-    for (let round = 0; round < MAX_ROUNDS; round++) {
-      trial.integrator.tolerance = fine ? this.tolerance : COARSE_TOLERANCE;
-      const outcome = trial.run(mass, Math.exp(x));
-      if (outcome === "stuck") break;
-      const step = outcome === "surface" ? -trial.logMassExcess / trial.logMassExcessSlope : Number.NaN;
-      if (outcome === "surface" && fine && Math.abs(step) <= ACCEPTED_STEP) return { logPressure: x, lastStep: step };
-      this.narrow(bracket, mass, x, outcome);
-      if (bracket.high - bracket.low < 1e-11 * Math.abs(x)) throw this.aboveMaximum(mass, bracket);
-      fine ||= Math.abs(step) < NEARLY_THERE;
-      x = nextTrial(bracket, x, step);
+    const before = { integrations: trial.runs, rightHandSides: trial.evaluations };
+    trial.integrator.tolerance = this.tolerance;
+    // Layers are shares of the total mass, so that mass must be known to place them: iterate to a fixed point.
+    let mass = MASS_RANGE.maximum;
+    for (let round = 0; round < ROUNDS; round++) {
+      const outcome = trial.run(mass, centralPressure);
+      if (outcome !== "surface") mass /= 2;
+      else if (Math.abs(trial.logMassExcess) < 1e-13) return this.planet(mass, Math.log(centralPressure), 0, before);
+      else mass *= Math.exp(trial.logMassExcess);
     }
     throw new ConvergenceError(
       "structure-not-converged",
-      `No central pressure found for ${this.describe(mass)} within ${MAX_ROUNDS} trials. ` +
-        "Please report the composition: this should not happen.",
-      { centralPressure: Math.exp(x) },
+      `A central pressure of ${centralPressure} Pa makes no planet of ${this.composition.name}.`,
     );
   }
 
-  /** Decides on which side of the stable root the trial at x lies. */
-  private narrow(bracket: Bracket, mass: number, x: number, outcome: string): void {
-    const { logMassExcess: excess, logMassExcessSlope: slope } = this.trial;
-    if (outcome === "exhausted") {
-      bracket.low = Math.max(bracket.low, x);
-      return;
-    }
-    if (outcome === "beyond-form") {
-      bracket.broken = true;
-      bracket.high = Math.min(bracket.high, x);
-      return;
-    }
-    if (Math.abs(slope) < NO_RESPONSE) throw this.massIndependent(mass, excess);
-    bracket.bestExcess = Math.max(bracket.bestExcess, excess);
-    if (excess < 0 && slope > 0) bracket.low = Math.max(bracket.low, x);
-    else bracket.high = Math.min(bracket.high, x);
+  private shoot(mass: number, guess?: number): Shot {
+    const start = Math.log(guess ?? guessCentralPressure(this.composition, mass));
+    return shoot(this.trial, mass, start, { tolerance: this.tolerance, warm: guess !== undefined });
   }
 
-  private planet(mass: number, logPressure: number, lastStep: number, counters: Planet["counters"]): Planet {
+  private planet(mass: number, logPressure: number, lastStep: number, before: Planet["counters"]): Planet {
     const { trial, composition } = this;
     // The last Newton step is not integrated again: its first-order effect is enough at this size.
     const radiusSquared = trial.radiusSquared + trial.radiusSquaredSlope * lastStep;
     const radius = Math.sqrt(radiusSquared);
-    const response = Math.abs(trial.radiusSquaredSlope / radiusSquared / trial.logMassExcessSlope);
+    // An error in mass is made up for by central pressure, which moves the radius.
+    const response = lastStep === 0 ? 0 : Math.abs(trial.radiusSquaredSlope / radiusSquared / trial.logMassExcessSlope);
+    const integrationError = ERROR_AMPLIFICATION * (1 + response) * trial.integrator.errorSum;
     return {
       composition,
       mass,
@@ -130,65 +112,60 @@ export class StructureSolver {
       inertiaFactor: trial.inertia / (mass * radiusSquared),
       bindingEnergy: trial.bindingEnergy,
       boundaries: trial.boundaries,
-      radiusRelativeError:
-        ERROR_AMPLIFICATION * (1 + response) * trial.integrator.errorSum + lastStep * lastStep + ROUND_OFF,
+      radiusRelativeError: integrationError + ROUND_OFF,
       extrapolatedLayers: trial.extrapolated,
-      counters,
+      counters: {
+        integrations: trial.runs - before.integrations,
+        rightHandSides: trial.evaluations - before.rightHandSides,
+      },
     };
   }
 
-  private describe(mass: number): string {
-    return `${this.composition.name} at ${earthMasses(mass)}`;
+  private failure(mass: number, shot: Exclude<Shot, { outcome: "found" }>): Error {
+    const { name } = this.composition;
+    switch (shot.outcome) {
+      case "independent":
+        return massIndependentOfPressure(name, mass, mass * Math.exp(shot.excess));
+      case "out-of-bounds":
+        return noCentralPressure(name, mass);
+      case "above-maximum":
+        this.maximum = { broken: this.trial.brokenPhase, mass: this.findMaximum(mass, shot.excess) };
+        return massAboveMaximum(name, mass, this.maximum.mass, this.maximum.broken);
+      case "not-converged":
+        return new ConvergenceError(
+          "structure-not-converged",
+          `No central pressure found for ${name} at ${mass} kg. This should not happen: please report the composition.`,
+          { centralPressure: Math.exp(shot.logPressure) },
+        );
+    }
   }
 
-  private massIndependent(mass: number, excess: number): ModelRangeError {
-    const only = mass * Math.exp(excess);
-    return new ModelRangeError(
-      "mass-independent-of-pressure",
-      `${this.describe(mass)}: every central pressure of this composition gives the same mass, ${earthMasses(only)}. ` +
-        "Give a central pressure instead of a mass.",
-      { quantity: "mass", value: mass, minimum: only, maximum: only },
-    );
-  }
-
-  private aboveMaximum(mass: number, bracket: Bracket): ModelRangeError {
-    const maximum = mass * Math.exp(bracket.bestExcess);
-    const why = bracket.broken
-      ? `the equation of state of ${this.brokenForm()} ends there`
-      : "beyond it a higher central pressure holds less mass, so no stable planet exists";
-    return new ModelRangeError(
-      "mass-above-maximum",
-      `${this.describe(mass)} is above the largest mass this composition can have, ${earthMasses(maximum)}: ${why}. ` +
-        "Ask for a smaller mass, or use materials that are continued to higher pressure.",
-      { quantity: "mass", value: mass, maximum },
-    );
-  }
-
-  private brokenForm(): string {
-    const broken = this.trial.brokenPhase;
-    if (broken === undefined) return "a layer";
-    const { layer, phase } = broken;
-    return `${layer.name}, phase ${phase.name}, at ${(phase.curve.maxPressure / GPA).toPrecision(4)} GPa`;
+  /**
+   * The largest mass that can be solved, from one that cannot and by how much it failed (ln of mass held over mass
+   * asked). For one layer that settles it; with more, layers grow with the mass asked, so it is approached.
+   */
+  private findMaximum(unsolvable: number, excess: number): number {
+    let solvable = 0;
+    let above = unsolvable;
+    let candidate = unsolvable * held(excess);
+    for (let round = 0; round < ROUNDS && above > solvable * (1 + 2 * MAXIMUM_MASS_PRECISION); round++) {
+      const shot = this.shoot(candidate);
+      if (shot.outcome === "found") {
+        // The first one found is often the maximum itself: look just above it before halving the gap.
+        const justAbove = solvable === 0;
+        solvable = candidate;
+        candidate = justAbove ? solvable * (1 + MAXIMUM_MASS_PRECISION) : Math.sqrt(solvable * above);
+      } else {
+        above = candidate;
+        const share = shot.outcome === "above-maximum" ? held(shot.excess) : 0.5;
+        candidate = solvable > 0 ? Math.sqrt(solvable * above) : candidate * share;
+      }
+    }
+    return solvable;
   }
 }
 
-/** Newton's step where it stays inside the bracket, otherwise bisection or a growing stride towards the open end. */
-function nextTrial(bracket: Bracket, x: number, step: number): number {
-  const newton = x + Math.max(-2, Math.min(2, step));
-  if (newton > bracket.low && newton < bracket.high) return newton;
-  if (bracket.low === -Infinity) return x - 2;
-  if (bracket.high === Infinity) return x + 1;
-  return (bracket.low + bracket.high) / 2;
-}
-
-function earthMasses(mass: number): string {
-  return `${(mass / EARTH_MASS).toPrecision(5)} Earth masses`;
-}
-
-function massOutOfRange(mass: number): ModelRangeError {
-  return new ModelRangeError(
-    "mass-range",
-    `A mass of ${earthMasses(mass)} is outside the range the solver is made for, 0.001 to 1000 Earth masses.`,
-    { quantity: "mass", value: mass, minimum: MASS_RANGE.minimum, maximum: MASS_RANGE.maximum },
-  );
+/** Share of the mass asked for that the best trial held; half where no trial reached a surface at all. */
+function held(excess: number): number {
+  return excess === -Infinity ? 0.5 : Math.min(Math.exp(excess), 1 - MAXIMUM_MASS_PRECISION);
 }

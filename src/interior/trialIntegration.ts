@@ -1,9 +1,9 @@
-import type { Material, Phase } from "../eos/material.ts";
+import { type Phase, phaseAt } from "../eos/material.ts";
 import type { Composition, Layer } from "../library/composition.ts";
 import { AdaptiveIntegrator } from "../numerics/adaptiveIntegrator.ts";
 import { CentralBall } from "./centralBall.ts";
 import type { Boundary } from "./planet.ts";
-import { STATE_SIZE, StructureEquations } from "./structureEquations.ts";
+import { CONTROLLED, STATE_SIZE, StructureEquations } from "./structureEquations.ts";
 
 /** What one integration from the centre with a trial central pressure found. */
 export type TrialOutcome =
@@ -28,11 +28,12 @@ export interface Stretch {
  */
 export class TrialIntegration {
   readonly composition: Composition;
-  readonly integrator = new AdaptiveIntegrator(STATE_SIZE, 2);
+  readonly integrator = new AdaptiveIntegrator(STATE_SIZE, CONTROLLED);
   readonly equations: StructureEquations;
   private readonly centralBall = new CentralBall();
   private readonly layers: readonly Layer[];
 
+  outcome: TrialOutcome = "stuck";
   /** ln(mass inside the surface pressure / mass asked for), and its derivative by ln P_c. */
   logMassExcess = 0;
   logMassExcessSlope = 0;
@@ -44,7 +45,7 @@ export class TrialIntegration {
   boundaries: Boundary[] = [];
   /** Layers that went beyond the data behind their equation of state. */
   extrapolated: string[] = [];
-  /** The phase whose form gave out, after `beyond-form`. */
+  /** The phase whose form gave out in the last `beyond-form` run; for the caller to reset. */
   brokenPhase: Stretch | undefined;
   runs = 0;
 
@@ -63,6 +64,11 @@ export class TrialIntegration {
   }
 
   run(mass: number, centralPressure: number): TrialOutcome {
+    this.outcome = this.integrate(mass, centralPressure);
+    return this.outcome;
+  }
+
+  private integrate(mass: number, centralPressure: number): TrialOutcome {
     const { integrator, layers } = this;
     this.runs++;
     this.boundaries = [];
@@ -72,7 +78,7 @@ export class TrialIntegration {
     const first = this.enter(layers[0], centralPressure);
     if (first === undefined) return "beyond-form";
     const total = mass ** (2 / 3);
-    this.leaveCentre(first, centralPressure, (layers[0].massFraction * mass) ** (2 / 3));
+    if (!this.leaveCentre(first, centralPressure, (layers[0].massFraction * mass) ** (2 / 3))) return "stuck";
     let enclosed = 0;
     let stretch: Stretch = first;
     for (let i = 0; i < layers.length - 1; i++) {
@@ -90,12 +96,14 @@ export class TrialIntegration {
     return this.riseToSurface(stretch, total);
   }
 
-  private leaveCentre(first: Stretch, centralPressure: number, layerEnd: number): void {
+  private leaveCentre(first: Stretch, centralPressure: number, layerEnd: number): boolean {
     const { integrator, equations } = this;
     const floor = Math.max(first.phase.fromPressure, this.composition.surface.pressurePa);
     equations.curve = first.phase.curve;
     integrator.x = this.centralBall.fill(equations.curve, centralPressure, floor, layerEnd, integrator.y);
+    if (!(integrator.x > 0)) return false;
     this.onPoint?.(first, true);
+    return true;
   }
 
   /** Pressure at the integrator's present by-mass point [Pa]. */
@@ -105,7 +113,7 @@ export class TrialIntegration {
 
   /** The phase of `layer` at `pressure`, or undefined where its form does not reach that far. */
   private enter(layer: Layer, pressure: number): Stretch | undefined {
-    const stretch = { layer, phase: phaseReaching(layer.material, pressure) };
+    const stretch = { layer, phase: phaseAt(layer.material, pressure) };
     if (pressure > stretch.phase.curve.maxPressure) {
       this.brokenPhase = stretch;
       return undefined;
@@ -144,6 +152,7 @@ export class TrialIntegration {
     const surfacePressure = this.composition.surface.pressurePa;
     let stretch = start;
     integrator.x = equations.massToCoordinate(integrator.x, state);
+    this.onPoint?.(start, false);
     for (;;) {
       const floor = Math.max(stretch.phase.fromPressure, surfacePressure);
       const end = stretch.phase.curve.coordinate(floor);
@@ -166,11 +175,11 @@ export class TrialIntegration {
     }
     this.boundary("surface", stretch, state[0] ** 1.5, state[1], surfacePressure);
     this.logMassExcess = 1.5 * Math.log(state[0] / totalS);
-    this.logMassExcessSlope = (1.5 * state[2]) / state[0];
+    this.logMassExcessSlope = (1.5 * state[4]) / state[0];
     this.radiusSquared = state[1];
-    this.radiusSquaredSlope = state[3];
-    this.inertia = state[4];
-    this.bindingEnergy = state[5];
+    this.radiusSquaredSlope = state[5];
+    this.inertia = state[2];
+    this.bindingEnergy = state[3];
     return "surface";
   }
 
@@ -196,12 +205,4 @@ export class TrialIntegration {
       pressure,
     });
   }
-}
-
-/** The phase stable at a pressure; exactly on a boundary the one above it in pressure. */
-function phaseReaching(material: Material, pressure: number): Phase {
-  const { phases } = material;
-  let i = phases.length - 1;
-  while (i > 0 && pressure < phases[i].fromPressure) i--;
-  return phases[i];
 }

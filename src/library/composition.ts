@@ -1,4 +1,4 @@
-import type { Material } from "../eos/material.ts";
+import type { Material, Source } from "../eos/material.ts";
 
 /** A layer with its material resolved; fractions of the whole planet's mass. */
 export interface Layer {
@@ -12,6 +12,8 @@ export interface Layer {
 export interface Composition {
   readonly name: string;
   readonly title: string;
+  /** Where the mass fractions come from, if from somewhere. */
+  readonly source?: Source;
   readonly surface: { readonly pressurePa: number; readonly temperatureK: number };
   readonly layers: readonly Layer[];
 }

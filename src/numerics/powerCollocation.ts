@@ -28,7 +28,9 @@ function weights(nodes: readonly number[], moment: (k: number) => number): Float
   const n = nodes.length;
   const rows = Array.from({ length: n }, (_, k) => [...nodes.map((node) => node ** k), moment(k)]);
   for (let column = 0; column < n; column++) {
-    const pivot = rows.slice(column).reduce((best, row) => (Math.abs(row[column]) > Math.abs(best[column]) ? row : best));
+    const pivot = rows
+      .slice(column)
+      .reduce((best, row) => (Math.abs(row[column]) > Math.abs(best[column]) ? row : best));
     rows.splice(rows.indexOf(pivot), 1);
     rows.splice(column, 0, pivot);
     for (let r = 0; r < n; r++) {

@@ -22,12 +22,16 @@ export const constants = {
   earthRadius: nominal(6.3781e6, "m"),
   jupiterRadius: nominal(7.1492e7, "m"),
   sunRadius: nominal(6.957e8, "m"),
+  /** What the Earth receives from the Sun; lists give insolation in this unit. */
+  solarIrradiance: nominal(1361, "W m-2"),
   earthMeanRadius: {
     value: 6.371e6,
     unit: "m",
     uncertainty: 100,
     source: "mean radius 6371.0084 km (IAU WGCCRE, Archinal et al. 2018) in its usual rounding",
   },
+  day: { value: 86400, unit: "s", uncertainty: 0, source: "SI Brochure, 9th edition, table 8" },
+  julianYear: { value: 31557600, unit: "s", uncertainty: 0, source: "365.25 days; IAU Style Manual, Wilkins 1990" },
   astronomicalUnit: { value: 149597870700, unit: "m", uncertainty: 0, source: "IAU 2012 Resolution B2" },
 } as const satisfies Record<string, Constant>;
 

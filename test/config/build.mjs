@@ -40,6 +40,7 @@ const library = await build({
   entryPoints: ["src/index.ts"],
   outfile: "dist/index.js",
   platform: "browser",
+  alias: { "csv-parse/sync": "csv-parse/browser/esm/sync" },
 });
 
 node("node_modules/typescript/bin/tsc", "-p", "test/config/tsconfig.types.json");

@@ -1,0 +1,44 @@
+import type { ColourRole } from "./palette.ts";
+
+/** Symbol and colour of a verdict; both differ, so that neither sight nor print need tell colours apart. */
+export interface MarkStyle {
+  readonly colour: ColourRole;
+  readonly symbol: MarkSymbol;
+  readonly open: boolean;
+}
+
+export type MarkSymbol = "square" | "circle" | "diamond" | "triangle-up" | "triangle-down" | "x";
+
+/** Makes symbols of one nominal size look alike. */
+export const symbolScale: Readonly<Record<MarkSymbol, number>> = {
+  square: 0.9,
+  circle: 1,
+  diamond: 1.05,
+  "triangle-up": 1.3,
+  "triangle-down": 1.3,
+  x: 0.9,
+};
+
+const symbols: readonly MarkSymbol[] = ["square", "circle", "diamond", "triangle-up", "triangle-down"];
+
+/** Filled symbols first, then the same ones open; null is a planet without a verdict. */
+export function verdictStyle(verdict: number | null): MarkStyle {
+  if (verdict === null) return { colour: "verdict-6", symbol: "x", open: false };
+  const kind = verdict % symbols.length;
+  return {
+    colour: `verdict-${(kind + 1) as 1 | 2 | 3 | 4 | 5}`,
+    symbol: symbols[kind] as MarkSymbol,
+    open: Math.floor(verdict / symbols.length) % 2 === 1,
+  };
+}
+
+const curveColours = 8;
+
+export function curveColour(curve: number): ColourRole {
+  return `curve-${((curve % curveColours) + 1) as 1 | 2 | 3 | 4 | 5 | 6 | 7 | 8}`;
+}
+
+/** Names that tie what is drawn to its entry in the legend. */
+export const curveGroup = (curve: number): string => `curve-${curve}`;
+export const verdictGroup = (verdict: number | null): string => `verdict-${verdict ?? "none"}`;
+export const densityGroup = "density";

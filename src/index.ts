@@ -1,0 +1,54 @@
+export { type CurvePoint, sweepMasses } from "./curve/sweep.ts";
+export type { EosCurve } from "./eos/curve.ts";
+export { densityAt, type Material, type Phase, phaseAt, type Source } from "./eos/material.ts";
+export {
+  BulkwrightError,
+  ConvergenceError,
+  InputError,
+  ModelRangeError,
+  type Place,
+} from "./errors.ts";
+export type { FigureSpec } from "./figures/figureSpec.ts";
+export { massRadiusFigure } from "./figures/massRadiusFigure.ts";
+export type { MassRadiusInput } from "./figures/massRadiusInput.ts";
+export { plotlyHtml } from "./figures/plotlyHtml.ts";
+export {
+  type Classification,
+  type Classified,
+  type Classifier,
+  type ClassifierModels,
+  classifier,
+  type Refused,
+} from "./inference/classifier.ts";
+export { type DensityTable, type DensityTableProfile, integrateDensityTable } from "./interior/densityTable.ts";
+export type { Boundary, Planet, SolverCounters } from "./interior/planet.ts";
+export { type ProfilePoint, solveProfile } from "./interior/profile.ts";
+export { solvePlanet } from "./interior/solvePlanet.ts";
+export { checkLibrary } from "./library/checkLibrary.ts";
+export type { Composition, Layer } from "./library/composition.ts";
+export { type Library, loadLibrary } from "./library/library.ts";
+export type { Entry, LibraryFile } from "./library/libraryFiles.ts";
+export { shippedFiles } from "./library/shipped.generated.ts";
+export { sourcesOf, type UsedSource } from "./library/sources.ts";
+export type {
+  LimitCoding,
+  MeasuredQuantity,
+  Origin,
+  PlanetRow,
+  QuantityKind,
+  QuantityName,
+  RowIssue,
+  TextName,
+} from "./planets/quantity.ts";
+export { type ListOptions, type PlanetList, readPlanetList } from "./planets/readPlanetList.ts";
+export {
+  type Constant,
+  constants,
+  EARTH_MASS,
+  EARTH_RADIUS,
+  G,
+  JUPITER_MASS,
+  JUPITER_RADIUS,
+  SUN_MASS,
+  SUN_RADIUS,
+} from "./units/constants.ts";

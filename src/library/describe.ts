@@ -1,0 +1,120 @@
+import { densityAt, type Material, type Phase, type Source } from "../eos/material.ts";
+import { ModelRangeError } from "../errors.ts";
+import { GPA } from "../units/constants.ts";
+import type { Composition, Layer } from "./composition.ts";
+import { describeJoins, type JoinDescription } from "./describeJoins.ts";
+import type { Library } from "./library.ts";
+
+/** Pressures at which densities are given, so that materials can be compared at a glance. */
+const SAMPLE_GPA = [0, 100, 1000];
+
+/** One phase as a reader wants it; absent pressures mean that there is no such limit. */
+export interface PhaseDescription {
+  readonly name: string;
+  readonly form: string;
+  /** Keys of the form and their values, as in the material file. */
+  readonly parameters: Readonly<Record<string, number | string>>;
+  readonly fromGPa: number;
+  readonly untilGPa?: number;
+  readonly calibratedToGPa?: number;
+  /** Where the form itself breaks. */
+  readonly formEndsGPa?: number;
+  readonly source: Source;
+}
+
+export interface MaterialDescription {
+  readonly kind: "material";
+  readonly name: string;
+  readonly title: string;
+  readonly phases: readonly PhaseDescription[];
+  readonly joins: readonly JoinDescription[];
+  readonly densities: readonly SampledDensity[];
+}
+
+/** The density is absent where the material has none, outside the range of its form. */
+export interface SampledDensity {
+  readonly pressureGPa: number;
+  readonly densityKgM3?: number;
+}
+
+export interface CompositionDescription {
+  readonly kind: "composition";
+  readonly name: string;
+  readonly title: string;
+  readonly source?: Source;
+  readonly surface: Composition["surface"];
+  /** Centre to surface, nested compositions expanded. */
+  readonly layers: readonly { readonly name: string; readonly title: string; readonly massFraction: number }[];
+  /** Every material of the layers, once. */
+  readonly materials: readonly MaterialDescription[];
+}
+
+/** All there is to say about a composition or, where no composition has the name, a material. Throws like `Library`. */
+export function describe(library: Library, name: string): CompositionDescription | MaterialDescription {
+  const isMaterial = library.materials.some((entry) => entry.name === name);
+  const isComposition = library.compositions.some((entry) => entry.name === name);
+  return isMaterial && !isComposition ? describeMaterial(library, name) : describeComposition(library, name);
+}
+
+export function describeComposition(library: Library, name: string): CompositionDescription {
+  const { title, source, surface, layers } = library.composition(name);
+  const materials = new Set(layers.flatMap(materialNames));
+  return {
+    kind: "composition",
+    name,
+    title,
+    ...(source && { source }),
+    surface,
+    layers: layers.map((layer) => ({
+      name: layer.name,
+      title: layer.material.title,
+      massFraction: layer.massFraction,
+    })),
+    materials: [...materials].map((material) => describeMaterial(library, material)),
+  };
+}
+
+const materialNames = ({ material }: Layer): string[] =>
+  material.phases[0].components?.map((part) => part.material) ?? [material.name];
+
+export function describeMaterial(library: Library, name: string): MaterialDescription {
+  const material = library.material(name);
+  const formKeys = library.formKeys(name);
+  return {
+    kind: "material",
+    name,
+    title: material.title,
+    phases: material.phases.map((phase, i) => {
+      const { form: _, ...parameters } = formKeys[i];
+      return describePhase(phase, parameters);
+    }),
+    joins: describeJoins(material.phases),
+    densities: SAMPLE_GPA.map((pressureGPa) => sampleDensity(material, pressureGPa)),
+  };
+}
+
+function describePhase(phase: Phase, parameters: PhaseDescription["parameters"]): PhaseDescription {
+  const { name, form, curve, source } = phase;
+  return {
+    name,
+    form,
+    parameters,
+    fromGPa: phase.fromPressure / GPA,
+    ...limit("untilGPa", phase.untilPressure),
+    ...limit("calibratedToGPa", phase.calibratedTo),
+    ...limit("formEndsGPa", curve.maxPressure),
+    source,
+  };
+}
+
+const limit = <Key extends string>(key: Key, pressure: number): Partial<Record<Key, number>> =>
+  pressure === Number.POSITIVE_INFINITY ? {} : ({ [key]: pressure / GPA } as Record<Key, number>);
+
+function sampleDensity(material: Material, pressureGPa: number): SampledDensity {
+  try {
+    return { pressureGPa, densityKgM3: densityAt(material, pressureGPa * GPA) };
+  } catch (error) {
+    if (error instanceof ModelRangeError) return { pressureGPa };
+    throw error;
+  }
+}

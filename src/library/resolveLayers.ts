@@ -1,0 +1,43 @@
+import type { Material } from "../eos/material.ts";
+import { mixMaterials } from "../eos/mixMaterials.ts";
+import type { Composition, Layer } from "./composition.ts";
+import type { CompositionFile, PartEntry } from "./schemas.ts";
+
+/** How a layer's names become things; `key` is where the name stands in the file. */
+export interface NameLookup {
+  material(name: string, key: string): Material;
+  composition(name: string, key: string): Composition;
+}
+
+/** The layers of a composition file, nested compositions expanded and scaled, empty ones dropped, summing to 1. */
+export function resolveLayers(file: CompositionFile, lookup: NameLookup): Layer[] {
+  const layers = file.layers.flatMap(({ material, mixture, composition, massFraction }, i): Layer[] => {
+    const key = `layers[${i}]`;
+    if (composition !== undefined) {
+      const inner = lookup.composition(composition, `${key}.composition`);
+      return inner.layers.map((layer) => ({ ...layer, massFraction: layer.massFraction * massFraction }));
+    }
+    const substance =
+      material === undefined ? mix(mixture ?? [], key, lookup) : lookup.material(material, `${key}.material`);
+    return [{ name: substance.name, material: substance, massFraction }];
+  });
+  return normalised(layers.filter(({ massFraction }) => massFraction > 0));
+}
+
+function mix(parts: readonly PartEntry[], key: string, lookup: NameLookup): Material {
+  const resolved = parts.map(({ material, massFraction }, i) => ({
+    material: lookup.material(material, `${key}.mixture[${i}].material`),
+    massFraction,
+  }));
+  return mixMaterials(normalised(resolved.filter(({ massFraction }) => massFraction > 0)));
+}
+
+/** Beyond what adding a few fractions in binary loses. */
+const ROUNDING = 1e-14;
+
+/** Takes out what the check of the file tolerates, so that the fractions sum to 1 to rounding. */
+function normalised<Part extends { massFraction: number }>(parts: Part[]): Part[] {
+  const sum = parts.reduce((total, { massFraction }) => total + massFraction, 0);
+  if (Math.abs(sum - 1) <= ROUNDING) return parts;
+  return parts.map((part) => ({ ...part, massFraction: part.massFraction / sum }));
+}

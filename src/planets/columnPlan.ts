@@ -1,0 +1,44 @@
+import type { QuantityName, TextName } from "./quantity.ts";
+import type { Unit } from "./unitTable.ts";
+
+/** Where a unit was learnt; the surest first. */
+export type UnitSource = "option" | "file" | "column name" | "known list" | "values" | "usual";
+
+/** The columns, by position, from which one quantity is read. */
+export interface QuantitySource {
+  readonly quantity: QuantityName;
+  readonly value: number;
+  /** The same position twice where one column gives an error for both sides. */
+  readonly minus?: number;
+  readonly plus?: number;
+  /** `minus` and `plus` hold the ends of the interval instead of the distances to them. */
+  readonly errorsAreBounds: boolean;
+  readonly limit?: number;
+  readonly unit: Unit;
+  readonly unitSource: UnitSource;
+}
+
+/** How to read every row of a list. */
+export interface ColumnPlan {
+  /** Sources of each quantity in order of preference: the first that has a value in a row is used there. */
+  readonly quantities: ReadonlyMap<QuantityName, readonly QuantitySource[]>;
+  readonly texts: ReadonlyMap<TextName, number>;
+  /** What the reader wants the user to know about the columns, one sentence each. */
+  readonly notes: readonly string[];
+}
+
+/** How the list at hand writes what lists write in different ways; found from a sample of its rows. */
+export interface ListConventions {
+  /** `nan` stands for a missing value, so that as an error it cannot also mean "this is a limit". */
+  readonly nanIsMissing: boolean;
+  /** Lower errors carry a minus sign, so that -1 is an error of 1 and not a missing one. */
+  readonly lowerErrorsAreSigned: boolean;
+}
+
+/** A place where the reader could only guess. */
+export interface Ambiguity {
+  /** The column or columns, as written. */
+  readonly columns: readonly string[];
+  /** Each possible reading with the option that settles for it. */
+  readonly readings: readonly { readonly meaning: string; readonly option: string }[];
+}

@@ -1,0 +1,164 @@
+import { parse } from "csv-parse/sync";
+import { InputError } from "../../errors.ts";
+import { isKnownColumn } from "../columnMeaning.ts";
+import { LINE_LIMIT, type Line } from "../splitLines.ts";
+import { findUnit } from "../unitTable.ts";
+import { type Dialect, detectDialect } from "./dialect.ts";
+import type { LineReader } from "./lineReader.ts";
+import type { RawColumn, RawRecord, RawTable } from "./rawTable.ts";
+
+const SAMPLE_LINES = 50;
+/** Records handed to csv-parse at once; larger blocks are no faster. */
+const BLOCK_CHARACTERS = 2 ** 16;
+
+/**
+ * Text separated by commas, tabs, semicolons, bars or blanks, under `#` comments of any kind. The header may itself be
+ * commented out; a row of units and a row of dashes may follow it.
+ * Throws `empty-file`, `no-header`, `unclosed-quote`.
+ */
+export async function readDelimited(lines: LineReader, file: string): Promise<RawTable> {
+  const comments = await lines.takeWhile((line) => isBlank(line) || isComment(line.text));
+  const sample = (await lines.peek(SAMPLE_LINES)).filter((line) => !isBlank(line) && !isComment(line.text));
+  if (sample.length === 0 && comments.every(isBlank)) throw emptyFile(file);
+  const headerComment = uncomment(comments.findLast((line) => !isBlank(line))?.text ?? "");
+  const dialect = detectDialect(sample.length > 0 ? sample.map((line) => line.text) : [headerComment]);
+  const header = await takeHeader(lines, headerComment, dialect, file);
+  const units = await takeUnits(lines, header.length, dialect);
+  const described = describedColumns(comments);
+  const columns = header.map((name, index): RawColumn => {
+    const about = described.get(name);
+    return { name, unit: units?.[index] ?? about?.unit, description: about?.description };
+  });
+  return { format: dialect.format, columns, batches: parseRecords(lines.rest(), dialect, file) };
+}
+
+const isBlank = (line: Line): boolean => line.text.trim() === "";
+const isComment = (text: string): boolean => /^\s*"?#/.test(text);
+
+/** A commented line without its mark, and without the delimiters that a spreadsheet pads it with. */
+function uncomment(text: string): string {
+  let end = text.length;
+  while (end > 0 && ",;\t ".includes(text[end - 1] ?? "")) end--;
+  return text.slice(0, end).replace(/^\s*"?#+\s*/, "");
+}
+
+async function takeHeader(lines: LineReader, headerComment: string, dialect: Dialect, file: string): Promise<string[]> {
+  const [first] = await lines.peek(1);
+  const cells = first === undefined ? [] : splitCells(first.text, dialect);
+  const commented = splitCells(headerComment, dialect);
+  const known = cells.filter(isKnownColumn).length;
+  const numbers = cells.filter((cell) => cell.trim() !== "" && Number.isFinite(Number(cell))).length;
+  if (commented.filter(isKnownColumn).length > known && (cells.length === 0 || commented.length === cells.length)) {
+    return commented;
+  }
+  if (first === undefined) throw emptyFile(file);
+  if (numbers > 0 && numbers >= known) throw noHeader(file, first);
+  await lines.next();
+  return cells.map((cell) => cell.trim());
+}
+
+/** The row of units under the header and the row of dashes under that, as some archives write them. */
+async function takeUnits(
+  lines: LineReader,
+  width: number,
+  dialect: Dialect,
+): Promise<(string | undefined)[] | undefined> {
+  const [first, second] = await lines.peek(2);
+  const cells = first === undefined ? [] : splitCells(first.text, dialect);
+  const isDashes = (line: Line | undefined): boolean =>
+    line !== undefined && splitCells(line.text, dialect).every((cell) => /^\s*-+\s*$/.test(cell));
+  if (width > 1 && isDashes(first)) {
+    await lines.next();
+    return undefined;
+  }
+  const given = cells.filter((cell) => cell.trim() !== "");
+  const units = given.filter((cell) => findUnit(cell) !== undefined);
+  const isUnits = cells.length === width && units.length > 0 && (isDashes(second) || units.length === given.length);
+  if (!isUnits) return undefined;
+  await lines.next();
+  if (isDashes(second)) await lines.next();
+  return cells.map((cell) => (cell.trim() === "" ? undefined : cell.trim()));
+}
+
+/** `# COLUMN name: What it is [unit]` lines, as archives put them above a table. */
+function describedColumns(comments: readonly Line[]): Map<string, Omit<RawColumn, "name">> {
+  const described = new Map<string, Omit<RawColumn, "name">>();
+  for (const { text } of comments) {
+    const match = /^"?#\s*COLUMN\s+(\S+?)\s*:\s*([^"]{0,1000})/i.exec(text);
+    if (match?.[1] === undefined || match[2] === undefined) continue;
+    const unit = /\[([^\]]+)\]/.exec(match[2])?.[1];
+    described.set(match[1], { description: match[2].replace(/,+$/, "").trim(), unit });
+  }
+  return described;
+}
+
+/** Records of the lines, quoted line ends included; blank and commented lines are no records. */
+export async function* parseRecords(
+  batches: AsyncIterable<Line[]>,
+  dialect: Dialect,
+  file: string,
+): AsyncGenerator<RawRecord[]> {
+  let open: { line: number; text: string } | undefined;
+  for await (const batch of batches) {
+    let block: { line: number; text: string }[] = [];
+    let characters = 0;
+    for (const { number, text, ending } of batch) {
+      if (open === undefined && (text.trim() === "" || isComment(text))) continue;
+      const start: { line: number; text: string } = open ?? { line: number, text: "" };
+      const isOpen = dialect.endsInsideQuotes(text, open !== undefined);
+      open = isOpen ? { line: start.line, text: start.text + text + ending } : undefined;
+      if (open !== undefined && open.text.length > LINE_LIMIT) throw unclosedQuote(file, open.line);
+      if (open !== undefined) continue;
+      block.push({ line: start.line, text: start.text + text });
+      characters += start.text.length + text.length;
+      if (characters < BLOCK_CHARACTERS) continue;
+      yield parseBlock(block, dialect);
+      block = [];
+      characters = 0;
+    }
+    if (block.length > 0) yield parseBlock(block, dialect);
+  }
+  if (open !== undefined) throw unclosedQuote(file, open.line);
+}
+
+function parseBlock(block: readonly { line: number; text: string }[], dialect: Dialect): RawRecord[] {
+  const texts = block.map((record) => dialect.prepare(record.text));
+  const parsed = parseCells(texts.join("\n"), dialect);
+  // Stray quotes can make csv-parse see other records than the lines hold; then each line is taken by itself.
+  if (parsed?.length === block.length) return parsed.map((cells, i) => ({ line: block[i]?.line ?? 0, cells }));
+  return block.map(({ line }, i) => ({ line, cells: splitCells(texts[i] ?? "", dialect) }));
+}
+
+export function splitCells(text: string, dialect: Dialect): string[] {
+  const prepared = dialect.prepare(text);
+  const records = parseCells(prepared, dialect);
+  return records?.length === 1 ? (records[0] ?? []) : prepared.split(dialect.delimiter);
+}
+
+function parseCells(text: string, dialect: Dialect): string[][] | undefined {
+  try {
+    return parse(text, {
+      delimiter: dialect.delimiter,
+      trim: dialect.isPadded,
+      relax_quotes: true,
+      relax_column_count: true,
+      record_delimiter: "\n",
+    });
+  } catch {
+    return undefined;
+  }
+}
+
+const emptyFile = (file: string): InputError =>
+  new InputError("empty-file", `${file}: the list is empty; it needs a header line and one line per planet`, { file });
+
+const noHeader = (file: string, first: Line): InputError =>
+  new InputError(
+    "no-header",
+    `${file}, line ${first.number}: the first line holds numbers where the column names should be ` +
+      `("${first.text.slice(0, 60)}"); add a line of column names such as name,mass_earth,radius_earth`,
+    { file, line: first.number, found: first.text.slice(0, 200) },
+  );
+
+const unclosedQuote = (file: string, line: number): InputError =>
+  new InputError("unclosed-quote", `${file}, line ${line}: a quote is opened here and never closed`, { file, line });

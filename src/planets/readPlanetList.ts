@@ -1,0 +1,115 @@
+import { InputError } from "../errors.ts";
+import type { ColumnChoices } from "./columnChoices.ts";
+import type { Ambiguity, ColumnPlan } from "./columnPlan.ts";
+import { quantityColumns } from "./columnTable.ts";
+import { decodeText } from "./decodeText.ts";
+import type { ListFormat, RawColumn, RawRecord, RawTable } from "./formats/rawTable.ts";
+import { readTable } from "./formats/readTable.ts";
+import { findConventions, usesDecimalComma } from "./listConventions.ts";
+import { type RowReader, readRow } from "./planetRow.ts";
+import type { PlanetRow, QuantityName } from "./quantity.ts";
+import { recogniseColumns } from "./recogniseColumns.ts";
+
+export interface ListOptions extends ColumnChoices {
+  /** Named in messages and origins. */
+  readonly file: string;
+  /** [m], the unit behind Earth radii in the list. */
+  readonly earthRadius: number;
+  /** The list must have a column of at least one of these; mass, minimum mass or radius where nothing is said. */
+  readonly needs?: readonly QuantityName[];
+}
+
+export interface PlanetList {
+  readonly file: string;
+  readonly format: ListFormat;
+  readonly columns: readonly RawColumn[];
+  readonly plan: ColumnPlan;
+  /** One row per row of the list, in order. Can be walked through once. */
+  readonly rows: AsyncIterable<PlanetRow>;
+}
+
+/**
+ * Reads a planet list of any of the known formats, found from its content, in constant memory.
+ * Throws InputError: `empty-file`, `no-header`, `missing-columns`, `ambiguous-column`, and those of the format's reader;
+ * what is wrong with one row only is an issue of that row.
+ * Checked by test/planets/.
+ */
+export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options: ListOptions): Promise<PlanetList> {
+  const { file, table, sample, batches } = await openTable(chunks, options);
+  const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
+  if (ambiguities.length > 0) throw ambiguous(file, ambiguities);
+  requireColumns(file, table.columns, plan, options.needs ?? ["mass", "minimumMass", "radius"]);
+  const reader: RowReader = {
+    file,
+    columns: table.columns,
+    plan,
+    conventions: findConventions(plan, sample),
+    decimalComma: usesDecimalComma(table.format),
+    earthRadius: options.earthRadius,
+  };
+  return { file, format: table.format, columns: table.columns, plan, rows: readRows(batches, reader) };
+}
+
+const SAMPLE_RECORDS = 500;
+
+interface OpenTable {
+  readonly file: string;
+  readonly table: RawTable;
+  /** The first records, which are also the first of `batches`. */
+  readonly sample: readonly RawRecord[];
+  readonly batches: AsyncIterable<readonly RawRecord[]>;
+}
+
+export async function openTable(chunks: AsyncIterable<Uint8Array>, { file }: ListOptions): Promise<OpenTable> {
+  const table = await readTable(decodeText(chunks, file), file);
+  const iterator = table.batches[Symbol.asyncIterator]();
+  const head: RawRecord[] = [];
+  while (head.length < SAMPLE_RECORDS) {
+    const next = await iterator.next();
+    if (next.done) break;
+    head.push(...next.value);
+  }
+  async function* batches(): AsyncGenerator<readonly RawRecord[]> {
+    yield head;
+    yield* { [Symbol.asyncIterator]: () => iterator };
+  }
+  return { file, table, sample: head.slice(0, SAMPLE_RECORDS), batches: batches() };
+}
+
+async function* readRows(batches: AsyncIterable<readonly RawRecord[]>, reader: RowReader): AsyncGenerator<PlanetRow> {
+  let row = 0;
+  for await (const batch of batches) for (const record of batch) yield readRow(record, ++row, reader);
+}
+
+function requireColumns(file: string, columns: readonly RawColumn[], plan: ColumnPlan, needs: readonly QuantityName[]): void {
+  if (needs.some((quantity) => plan.quantities.has(quantity)) || canBeDerived(plan)) return;
+  const wanted = needs.map((quantity) => quantityColumns[quantity].title).join(" or ");
+  throw new InputError(
+    "missing-columns",
+    `${file}: no column of ${wanted} was recognised; the columns found are ${columns.map((column) => column.name).join(", ")}. ` +
+      "Needed are columns such as name, mass_earth, mass_earth_minus, mass_earth_plus, radius_earth, radius_earth_minus, " +
+      "radius_earth_plus; say which column is which with --column mass_earth=COLUMN",
+    { file, found: columns.map((column) => column.name).join(",") },
+  );
+}
+
+const canBeDerived = ({ quantities }: ColumnPlan): boolean =>
+  (quantities.has("radiusRatio") && quantities.has("starRadius")) ||
+  (quantities.has("velocityAmplitude") && quantities.has("period") && quantities.has("starMass"));
+
+function ambiguous(file: string, ambiguities: readonly Ambiguity[]): InputError {
+  const lines = ambiguities.flatMap(({ columns, readings }) => [
+    `  ${columns.map((name) => `"${name}"`).join(", ")} could be`,
+    ...readings.map(({ meaning, option }) => `    ${meaning}: ${option}`),
+  ]);
+  return new InputError(
+    "ambiguous-column",
+    `${file}: some columns can be read in more than one way; say which with the option behind the right reading\n${lines.join("\n")}`,
+    {
+      file,
+      column: ambiguities[0]?.columns[0],
+      found: ambiguities.flatMap(({ columns }) => columns).join(","),
+      remedy: ambiguities.flatMap(({ readings }) => readings.map(({ option }) => option)).join("\n"),
+    },
+  );
+}

@@ -1,0 +1,126 @@
+import { existsSync, mkdtempSync, readFileSync, rmSync } from "node:fs";
+import { tmpdir } from "node:os";
+import { join } from "node:path";
+import { parse } from "csv-parse/sync";
+import { afterAll, describe, expect, test } from "vitest";
+import { expectClose } from "../support/expectClose.ts";
+import { runCommand } from "./runCommand.ts";
+
+const folder = mkdtempSync(join(tmpdir(), "bulkwright-curve-"));
+afterAll(() => rmSync(folder, { recursive: true }));
+
+const columns =
+  "composition,mass_earth,radius_earth,radius_m,bulk_density_kg_m3,surface_gravity_m_s2,central_pressure_gpa,inertia_factor,radius_relative_error,extrapolated_layers,note";
+
+const readRows = (csv: string) =>
+  parse<Record<string, string>, Record<string, string>>(csv, { columns: true, comment: "#" });
+
+describe("curve", () => {
+  test("writes the agreed columns, one row a mass, in the order of names and masses", async () => {
+    const { code, out, err } = await runCommand(["curve", "iron", "earth-like", "--masses", "2,0.5"]);
+    expect({ code, err }).toEqual({ code: 0, err: "" });
+    expect(out.split("\n")).toContain(columns);
+    expect(readRows(out).map((row) => `${row.composition} ${Number(row.mass_earth)}`)).toEqual([
+      "iron 2",
+      "iron 0.5",
+      "earth-like 2",
+      "earth-like 0.5",
+    ]);
+  });
+
+  test("the columns of a row agree with each other", async () => {
+    const { out } = await runCommand(["curve", "earth-like", "--masses", "3"]);
+    const [row] = readRows(out);
+    const radius = Number(row.radius_m);
+    const rounding = { rel: 1e-11, because: "12 digits are printed" };
+    expectClose(Number(row.radius_earth), radius / 6.3781e6, rounding);
+    // IAU 2015 B3 nominal GM of the Earth; density 3M / (4πR³) with G of CODATA 2022.
+    const massParameter = 3 * 3.986004e14;
+    expectClose(Number(row.surface_gravity_m_s2), massParameter / radius ** 2, rounding);
+    const density = massParameter / 6.6743e-11 / ((4 / 3) * Math.PI * radius ** 3);
+    expectClose(Number(row.bulk_density_kg_m3), density, rounding);
+  });
+
+  test("60 masses from 0.1 to 20 unless told otherwise", async () => {
+    const rows = readRows((await runCommand(["curve", "water"])).out);
+    expect(rows).toHaveLength(60);
+    expect([rows[0].mass_earth, rows[59].mass_earth].map(Number)).toEqual([0.1, 20]);
+  });
+
+  test("the head says what is needed to judge and repeat the result", async () => {
+    const { out } = await runCommand(["--earth-radius-km", "mean", "curve", "earth-like", "--masses", "1"]);
+    const head = out.split("\n").filter((line) => line.startsWith("# "));
+    expect(head).toContain("# command: bulkwright --earth-radius-km mean curve earth-like --masses 1");
+    expect(head.join("\n")).toMatch(/# unit: Earth radius 6371 km/);
+    expect(head.join("\n")).toMatch(/# source: .*\(CODATA|# constant: G = 6\.6743e-11 /);
+    expect(head.filter((line) => line.startsWith("# source: ")).length).toBeGreaterThan(1);
+  });
+
+  test("the Earth radius is a unit: the planet stays the same", async () => {
+    const [nominal] = readRows((await runCommand(["curve", "earth-like", "--masses", "1"])).out);
+    const [mean] = readRows(
+      (await runCommand(["curve", "earth-like", "--masses", "1", "--earth-radius-km", "mean"])).out,
+    );
+    expect(mean.radius_m).toBe(nominal.radius_m);
+    expectClose(Number(mean.radius_earth) / Number(nominal.radius_earth), 6378.1 / 6371, {
+      rel: 1e-11,
+      because: "12 digits are printed",
+    });
+  });
+
+  test("a surface pressure makes the planet smaller", async () => {
+    const radius = async (...more: string[]) =>
+      Number(readRows((await runCommand(["curve", "water", "--masses", "1", ...more])).out)[0].radius_m);
+    expect(await radius("--surface-pressure-pa", "1e9")).toBeLessThan(await radius());
+  });
+
+  test("a mass that cannot be solved is a row with its reason beside the others", async () => {
+    const { code, out } = await runCommand(["curve", "earth-like", "--masses", "1,1e6"]);
+    expect(code).toBe(0);
+    const [solved, unsolved] = readRows(out);
+    expect(solved.note).toBe("");
+    expect(unsolved).toMatchObject({
+      radius_earth: "",
+      radius_m: "",
+      note: expect.stringContaining("1000 Earth masses"),
+    });
+  });
+
+  test("a run without a single solved planet ends with 1, its table written", async () => {
+    const { code, out, err } = await runCommand(["curve", "earth-like", "--masses", "1e6"]);
+    expect(code).toBe(1);
+    expect(readRows(out)).toHaveLength(1);
+    expect(err).toContain("None of the planets could be solved");
+  });
+
+  test("JSON holds the same rows", async () => {
+    const csv = readRows((await runCommand(["curve", "earth-like", "--masses", "1,1e6"])).out);
+    const { out } = await runCommand(["curve", "earth-like", "--masses", "1,1e6", "--format", "json"]);
+    const { provenance, rows } = JSON.parse(out);
+    expect(provenance.command).toBe("bulkwright curve earth-like --masses 1,1e6 --format json");
+    expect(Object.keys(rows[0])).toEqual(columns.split(","));
+    expect(rows[0].radius_m).toBe(Number(csv[0].radius_m));
+    expect(rows[1].radius_m).toBeNull();
+  });
+
+  test("the same command gives the same bytes", async () => {
+    const args = ["curve", "earth-like", "--masses", "0.5:5:7"];
+    expect(await runCommand(args)).toEqual(await runCommand(args));
+  });
+
+  test("--out and --html write files and leave standard output alone", async () => {
+    const [csv, html] = [join(folder, "c.csv"), join(folder, "c.html")];
+    const { code, out } = await runCommand(["curve", "earth-like", "--masses", "1,2", "--out", csv, "--html", html]);
+    expect({ code, out }).toEqual({ code: 0, out: "" });
+    expect(readRows(readFileSync(csv, "utf8"))).toHaveLength(2);
+    expect(readFileSync(html, "utf8")).toContain("Earth-like");
+  });
+
+  test("an unknown composition ends with 1 and the nearest name, and writes nothing", async () => {
+    const csv = join(folder, "none.csv");
+    const { code, out, err } = await runCommand(["curve", "earth-lik", "--out", csv]);
+    expect({ code, out }).toEqual({ code: 1, out: "" });
+    expect(err).toContain("earth-like");
+    expect(existsSync(csv)).toBe(false);
+  });
+});
