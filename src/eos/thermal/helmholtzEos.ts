@@ -38,7 +38,7 @@ export abstract class HelmholtzEos implements ThermalEos {
       });
     }
     checkPressure("warm", this, pressure);
-    let y = this.reference.coordinate(pressure);
+    let y = this.reference.invert(pressure);
     for (let i = 0; i < MAX_ITERATIONS; i++) {
       const state = this.helmholtz(y, temperature);
       if (!(state.bulkModulus > 0)) throw unstable(pressure, temperature);

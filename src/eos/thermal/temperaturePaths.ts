@@ -47,6 +47,7 @@ export function isotherm(eos: ThermalEos, temperature: number, fromPressure = 0)
       density: (y) => cold.density(y),
       slopes: (y, out) => cold.slopes(y, out),
       coordinate: (pressure) => cold.coordinate(pressure),
+      invert: (pressure) => cold.invert(pressure),
       coordinateAtDensity: (density) => cold.coordinateAtDensity(density),
       temperature: () => temperature,
     };

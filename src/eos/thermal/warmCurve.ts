@@ -68,9 +68,9 @@ export class PathCurve implements WarmCurve {
     this.scale = options.scale;
     this.minPressure = options.minPressure;
     this.maxPressure = options.maxPressure;
-    this.lowest = this.coordinateUnchecked(options.minPressure);
-    this.highest = this.coordinateUnchecked(options.maxPressure);
-    this.kinks = (options.kinks ?? []).map((pressure) => this.coordinateUnchecked(pressure));
+    this.lowest = this.invert(options.minPressure);
+    this.highest = this.invert(options.maxPressure);
+    this.kinks = (options.kinks ?? []).map((pressure) => this.invert(pressure));
   }
 
   pressure(y: number): number {
@@ -104,7 +104,11 @@ export class PathCurve implements WarmCurve {
 
   coordinate(pressure: number): number {
     checkPressure("warm", this, pressure);
-    return this.coordinateUnchecked(pressure);
+    return this.invert(pressure);
+  }
+
+  invert(pressure: number): number {
+    return (1 + pressure / this.scale) ** (1 / EXPONENT);
   }
 
   coordinateAtDensity(density: number): number {
@@ -127,10 +131,6 @@ export class PathCurve implements WarmCurve {
       `Density ${density} kg/m³ is not one this phase has at its temperature; its lowest is ${minimum} kg/m³.`,
       { quantity: "density", value: density, minimum },
     );
-  }
-
-  private coordinateUnchecked(pressure: number): number {
-    return (1 + pressure / this.scale) ** (1 / EXPONENT);
   }
 
   /** Pressure at a node, kept from leaving the range by rounding. */
