@@ -1,5 +1,6 @@
 import { camelKey, columnKey } from "./columnKey.ts";
-import { ambiguousNames, type KnownList, prefixRenames, quantityColumns, textColumns } from "./columnTable.ts";
+import { ambiguousNames, prefixRenames, quantityColumns, textColumns } from "./columnTable.ts";
+import type { KnownList } from "./knownLists.ts";
 import type { QuantityName, TextName } from "./quantity.ts";
 import { findUnit, type Unit, unitById } from "./unitTable.ts";
 
@@ -33,7 +34,9 @@ function fillTables(): void {
   for (const quantity of quantityNames) {
     const columns = quantityColumns[quantity];
     const bodies =
-      columns.body === "planet" ? ["planet", "pl", "planetary", "p", "b"] : ["star", "st", "stellar", "host", "host_star", "s"];
+      columns.body === "planet"
+        ? ["planet", "pl", "planetary", "p", "b"]
+        : ["star", "st", "stellar", "host", "host_star", "s"];
     for (const name of words(columns.names)) plainNames.set(name, quantity);
     plainNames.set(columns.ownName, quantity);
     for (const word of [...words(columns.words), ...(columns.body === "planet" ? words(columns.names) : [])]) {
@@ -63,7 +66,8 @@ export function quantityMeanings(name: string, known?: KnownList): QuantityMeani
   const keys = [columnKey(name), columnKey(base), camelKey(base)];
   for (const key of new Set([...keys, ...keys.map(renamed)])) {
     const special = known?.names?.[key];
-    if (special !== undefined && Object.hasOwn(known?.names ?? {}, key)) return [withUnitText({ quantity: special, stem: key }, unitText)];
+    if (special !== undefined && Object.hasOwn(known?.names ?? {}, key))
+      return [withUnitText({ quantity: special, stem: key }, unitText)];
     const carrying = unitNames.get(key);
     if (carrying !== undefined) return [{ ...carrying, stem: key }];
     const quantity = plainNames.get(key);
@@ -79,7 +83,7 @@ export function quantityMeanings(name: string, known?: KnownList): QuantityMeani
 }
 
 export const textMeaning = (name: string): TextMeaning | undefined =>
-  name.length > NAME_LIMIT ? undefined : textNames.get(columnKey(name)) ?? textNames.get(renamed(columnKey(name)));
+  name.length > NAME_LIMIT ? undefined : (textNames.get(columnKey(name)) ?? textNames.get(renamed(columnKey(name))));
 
 export const isKnownColumn = (name: string): boolean =>
   quantityMeanings(name).length > 0 || textMeaning(name) !== undefined;

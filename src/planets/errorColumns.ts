@@ -8,7 +8,7 @@ import {
   limitPrefixes,
   limitSuffixes,
   positionalErrors,
-} from "./columnTable.ts";
+} from "./errorNames.ts";
 
 export interface ErrorColumns {
   readonly minus?: number;
@@ -84,7 +84,9 @@ function attachmentByName(name: string, owners: ReadonlyMap<string, number>): At
     const owner = byEnding(boundSuffixes[side]);
     if (owner !== undefined) return { owner, role: side, mayBeBounds: true };
   }
-  const flagged = byEnding(limitSuffixes) ?? (written.startsWith(limitPrefixes) ? owners.get(columnKey(written.slice(2))) : undefined);
+  const flagged =
+    byEnding(limitSuffixes) ??
+    (written.startsWith(limitPrefixes) ? owners.get(columnKey(written.slice(2))) : undefined);
   return flagged === undefined ? undefined : { owner: flagged, role: "limit" };
 }
 

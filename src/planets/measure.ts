@@ -22,7 +22,14 @@ interface Reading {
 }
 
 const mayBeNegative = new Set<QuantityName>(["starMetallicity", "rightAscension", "declination"]);
-const mayBeZero = new Set<QuantityName>(["eccentricity", "inclination", "insolation", "starMetallicity", "rightAscension", "declination"]);
+const mayBeZero = new Set<QuantityName>([
+  "eccentricity",
+  "inclination",
+  "insolation",
+  "starMetallicity",
+  "rightAscension",
+  "declination",
+]);
 
 /**
  * One quantity of one row, or undefined where the row has none. What lists mean by their cells, in order: a limit that
@@ -41,14 +48,23 @@ export function measure(source: QuantitySource, context: MeasureContext): Measur
   return { value, minus, plus, kind, limitCoding, written: text.trim(), origin };
 }
 
-function readCell(text: string, index: number, quantity: QuantityName, context: MeasureContext): TypedNumber | undefined {
+function readCell(
+  text: string,
+  index: number,
+  quantity: QuantityName,
+  context: MeasureContext,
+): TypedNumber | undefined {
   const value = readPlainNumber(text);
   if (value !== undefined) return { value };
   if (isMissing(text)) return undefined;
   const typed = readTypedNumber(text, context.decimalComma);
   if (typed !== undefined && Number.isFinite(typed.value)) return typed;
   const found = typed === undefined ? "is not a number" : "is not finite";
-  context.issue("not-a-number", index, `${quantityColumns[quantity].title} "${text.trim()}" ${found}; the cell is ignored`);
+  context.issue(
+    "not-a-number",
+    index,
+    `${quantityColumns[quantity].title} "${text.trim()}" ${found}; the cell is ignored`,
+  );
   return undefined;
 }
 
@@ -59,7 +75,11 @@ function interpret(typed: TypedNumber, source: QuantitySource, context: MeasureC
   const own = quantityColumns[source.quantity];
   if (value < 0 && !isSigned) {
     if (isSentinel(value) && plus === undefined && minus === undefined) return undefined;
-    context.issue(`negative-${kebab(own.ownName)}`, source.value, `${own.title} ${value} is negative; the value is ignored`);
+    context.issue(
+      `negative-${kebab(own.ownName)}`,
+      source.value,
+      `${own.title} ${value} is negative; the value is ignored`,
+    );
     return undefined;
   }
   const flag = readFlag(source, context);
@@ -93,7 +113,11 @@ const kebab = (name: string): string => name.replace(/_/g, "-");
 const finite = (error: number | undefined): number | undefined => (Number.isFinite(error) ? error : undefined);
 
 /** Errors as positive sizes; undefined where missing, infinite where the list says that there is no bound. */
-function readErrors(typed: TypedNumber, source: QuantitySource, context: MeasureContext): { minus?: number; plus?: number } {
+function readErrors(
+  typed: TypedNumber,
+  source: QuantitySource,
+  context: MeasureContext,
+): { minus?: number; plus?: number } {
   if (typed.minus !== undefined || typed.plus !== undefined) return { minus: typed.minus, plus: typed.plus };
   if (source.minus === undefined && source.plus === undefined) return {};
   let plus = readError(source.plus, context);
@@ -108,7 +132,10 @@ function readErrors(typed: TypedNumber, source: QuantitySource, context: Measure
     const message = `the upper error ${plus} is negative and the lower one ${minus} positive; they may be swapped`;
     context.issue("error-signs-swapped", source.plus ?? source.value, message);
   }
-  return { plus: plus === undefined ? undefined : Math.abs(plus), minus: minus === undefined ? undefined : Math.abs(minus) };
+  return {
+    plus: plus === undefined ? undefined : Math.abs(plus),
+    minus: minus === undefined ? undefined : Math.abs(minus),
+  };
 }
 
 function readError(index: number | undefined, context: MeasureContext): number | undefined {
@@ -124,7 +151,10 @@ function readError(index: number | undefined, context: MeasureContext): number |
   return undefined;
 }
 
-function readFlag(source: QuantitySource, context: MeasureContext): "upper-limit" | "lower-limit" | "unknown" | undefined {
+function readFlag(
+  source: QuantitySource,
+  context: MeasureContext,
+): "upper-limit" | "lower-limit" | "unknown" | undefined {
   const text = source.limit === undefined ? "" : (context.cells[source.limit] ?? "").trim();
   if (text === "0" || text === "" || isMissing(text)) return undefined;
   const flag = Number(text);

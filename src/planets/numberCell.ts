@@ -6,7 +6,24 @@ export interface TypedNumber {
   readonly limit?: "upper" | "lower";
 }
 
-const missing = new Set(["", "null", "nan", "none", "na", "n/a", "-", "--", "---", "...", "…", "—", "?", '""', "\\n", "masked"]);
+const missing = new Set([
+  "",
+  "null",
+  "nan",
+  "none",
+  "na",
+  "n/a",
+  "-",
+  "--",
+  "---",
+  "...",
+  "…",
+  "—",
+  "?",
+  '""',
+  "\\n",
+  "masked",
+]);
 
 /** Longer cells hold no number, and the patterns would be slow on them. */
 const NUMBER_LIMIT = 100;
@@ -38,18 +55,23 @@ const infinite = /^[+-]?inf(?:inity)?$/i;
  */
 export function readTypedNumber(text: string, decimalComma = false): TypedNumber | undefined {
   if (text.length > NUMBER_LIMIT) return undefined;
-  let trimmed = text.trim().replace(/^\$|\$$/g, "").replace(/[−–]/g, "-");
+  let trimmed = text
+    .trim()
+    .replace(/^\$|\$$/g, "")
+    .replace(/[−–]/g, "-");
   if (decimalComma) trimmed = trimmed.replace(/(\d),(?=\d)/g, "$1.");
   if (plain.test(trimmed)) return { value: toNumber(trimmed) };
   if (infinite.test(trimmed)) return { value: trimmed.startsWith("-") ? -Infinity : Infinity };
   const limit = limited.exec(trimmed);
-  if (limit?.[1] && limit[2]) return { value: toNumber(limit[2]), limit: /^(?:<|≤|&lt;)/.test(limit[1]) ? "upper" : "lower" };
+  if (limit?.[1] && limit[2])
+    return { value: toNumber(limit[2]), limit: /^(?:<|≤|&lt;)/.test(limit[1]) ? "upper" : "lower" };
   const both = symmetric.exec(trimmed);
   if (both?.[1] && both[2]) return { value: toNumber(both[1]), minus: toNumber(both[2]), plus: toNumber(both[2]) };
   const up = upperFirst.exec(trimmed);
   if (up?.[1] && up[2] && up[3]) return { value: toNumber(up[1]), plus: toNumber(up[2]), minus: toNumber(up[3]) };
   const down = lowerFirst.exec(trimmed);
-  if (down?.[1] && down[2] && down[3]) return { value: toNumber(down[1]), minus: toNumber(down[2]), plus: toNumber(down[3]) };
+  if (down?.[1] && down[2] && down[3])
+    return { value: toNumber(down[1]), minus: toNumber(down[2]), plus: toNumber(down[3]) };
   return readLastDigits(trimmed);
 }
 

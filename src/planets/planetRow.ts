@@ -1,7 +1,7 @@
-import { type MeasureContext, measure } from "./measure.ts";
 import type { ColumnPlan, ListConventions, QuantitySource } from "./columnPlan.ts";
 import { deriveQuantities } from "./deriveQuantities.ts";
 import type { RawColumn, RawRecord } from "./formats/rawTable.ts";
+import { type MeasureContext, measure } from "./measure.ts";
 import { kindOfProvenance } from "./provenance.ts";
 import type { MeasuredQuantity, Origin, PlanetRow, QuantityName, RowIssue, TextName } from "./quantity.ts";
 import { siFactor } from "./unitTable.ts";
@@ -35,7 +35,7 @@ export function readRow(record: RawRecord, row: number, reader: RowReader): Plan
       readQuantity(name, sources, context, reader.earthRadius, found);
     }
     applyProvenance(found, texts);
-    deriveQuantities(found.quantities);
+    deriveQuantities(found.quantities, (name) => reader.plan.quantities.has(name));
   }
   return { row, line, name: nameOf(texts), quantities: found.quantities, twins: found.twins, texts, cells, issues };
 }
@@ -60,7 +60,10 @@ function readQuantity(
   }
 }
 
-function readTexts(cells: readonly string[], columns: ReadonlyMap<TextName, number>): Partial<Record<TextName, string>> {
+function readTexts(
+  cells: readonly string[],
+  columns: ReadonlyMap<TextName, number>,
+): Partial<Record<TextName, string>> {
   const texts: Mutable<PlanetRow["texts"]> = {};
   for (const [text, index] of columns) {
     const cell = cells[index];
@@ -82,8 +85,14 @@ function checkWidth(
   if (cells.length === width) return false;
   const isShifted = cells.slice(width).some((cell) => cell.trim() !== "");
   if (cells.length > width && !isShifted) return false;
-  const consequence = isShifted ? "its numbers may stand in the wrong columns and are not used" : "the rest counts as missing";
-  report("ragged-row", Math.min(cells.length, width) - 1, `the row has ${cells.length} cells, the header ${width}; ${consequence}`);
+  const consequence = isShifted
+    ? "its numbers may stand in the wrong columns and are not used"
+    : "the rest counts as missing";
+  report(
+    "ragged-row",
+    Math.min(cells.length, width) - 1,
+    `the row has ${cells.length} cells, the header ${width}; ${consequence}`,
+  );
   return isShifted;
 }
 

@@ -3,9 +3,11 @@ import type { ColumnChoices } from "./columnChoices.ts";
 import type { Ambiguity, ColumnPlan } from "./columnPlan.ts";
 import { quantityColumns } from "./columnTable.ts";
 import { decodeText } from "./decodeText.ts";
+import { type ColumnExplanation, explainColumns, misspellings } from "./explainColumns.ts";
 import type { ListFormat, RawColumn, RawRecord, RawTable } from "./formats/rawTable.ts";
 import { readTable } from "./formats/readTable.ts";
 import { findConventions, usesDecimalComma } from "./listConventions.ts";
+import { refuseLostDecimals } from "./lostDecimals.ts";
 import { type RowReader, readRow } from "./planetRow.ts";
 import type { PlanetRow, QuantityName } from "./quantity.ts";
 import { recogniseColumns } from "./recogniseColumns.ts";
@@ -24,6 +26,8 @@ export interface PlanetList {
   readonly format: ListFormat;
   readonly columns: readonly RawColumn[];
   readonly plan: ColumnPlan;
+  /** What the user should know about the columns, one sentence each. */
+  readonly notes: readonly string[];
   /** One row per row of the list, in order. Can be walked through once. */
   readonly rows: AsyncIterable<PlanetRow>;
 }
@@ -38,6 +42,7 @@ export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options:
   const { file, table, sample, batches } = await openTable(chunks, options);
   const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
   if (ambiguities.length > 0) throw ambiguous(file, ambiguities);
+  refuseLostDecimals(plan, table.columns, sample, file);
   requireColumns(file, table.columns, plan, options.needs ?? ["mass", "minimumMass", "radius"]);
   const reader: RowReader = {
     file,
@@ -47,7 +52,27 @@ export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options:
     decimalComma: usesDecimalComma(table.format),
     earthRadius: options.earthRadius,
   };
-  return { file, format: table.format, columns: table.columns, plan, rows: readRows(batches, reader) };
+  const notes = [...plan.notes, ...misspellings(explainColumns(table.columns, plan, [], sample))];
+  return { file, format: table.format, columns: table.columns, plan, notes, rows: readRows(batches, reader) };
+}
+
+/**
+ * What `readPlanetList` would take every column of a list for; columns it could only guess at are marked ambiguous, and
+ * `ambiguities` says how to settle them.
+ */
+export async function explainPlanetList(
+  chunks: AsyncIterable<Uint8Array>,
+  options: ListOptions,
+): Promise<{
+  format: ListFormat;
+  columns: ColumnExplanation[];
+  notes: readonly string[];
+  ambiguities: readonly Ambiguity[];
+}> {
+  const { table, sample } = await openTable(chunks, options);
+  const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
+  const columns = explainColumns(table.columns, plan, ambiguities, sample);
+  return { format: table.format, columns, notes: [...plan.notes, ...misspellings(columns)], ambiguities };
 }
 
 const SAMPLE_RECORDS = 500;
@@ -60,7 +85,7 @@ interface OpenTable {
   readonly batches: AsyncIterable<readonly RawRecord[]>;
 }
 
-export async function openTable(chunks: AsyncIterable<Uint8Array>, { file }: ListOptions): Promise<OpenTable> {
+async function openTable(chunks: AsyncIterable<Uint8Array>, { file }: ListOptions): Promise<OpenTable> {
   const table = await readTable(decodeText(chunks, file), file);
   const iterator = table.batches[Symbol.asyncIterator]();
   const head: RawRecord[] = [];
@@ -81,7 +106,12 @@ async function* readRows(batches: AsyncIterable<readonly RawRecord[]>, reader: R
   for await (const batch of batches) for (const record of batch) yield readRow(record, ++row, reader);
 }
 
-function requireColumns(file: string, columns: readonly RawColumn[], plan: ColumnPlan, needs: readonly QuantityName[]): void {
+function requireColumns(
+  file: string,
+  columns: readonly RawColumn[],
+  plan: ColumnPlan,
+  needs: readonly QuantityName[],
+): void {
   if (needs.some((quantity) => plan.quantities.has(quantity)) || canBeDerived(plan)) return;
   const wanted = needs.map((quantity) => quantityColumns[quantity].title).join(" or ");
   throw new InputError(

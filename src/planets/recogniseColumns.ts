@@ -1,12 +1,14 @@
+import { type ColumnChoices, chosenColumns } from "./columnChoices.ts";
 import { columnKey } from "./columnKey.ts";
 import { type QuantityMeaning, quantityMeanings, splitUnitText, textMeaning } from "./columnMeaning.ts";
 import type { Ambiguity, ColumnPlan, QuantitySource } from "./columnPlan.ts";
-import { type KnownList, knownLists, quantityColumns } from "./columnTable.ts";
-import { chosenColumns, type ColumnChoices } from "./columnChoices.ts";
+import { quantityColumns } from "./columnTable.ts";
 import { attachErrorColumns, type ErrorColumns } from "./errorColumns.ts";
 import type { RawColumn, RawRecord } from "./formats/rawTable.ts";
+import { type KnownList, knownLists } from "./knownLists.ts";
+import { ownColumn } from "./ownColumn.ts";
 import type { QuantityName, TextName } from "./quantity.ts";
-import { resolveBounds, type Resolved, resolveUnit } from "./resolveUnit.ts";
+import { type Resolved, resolveBounds, resolveUnit } from "./resolveUnit.ts";
 
 export interface Recognised {
   readonly plan: ColumnPlan;
@@ -31,7 +33,9 @@ export function recogniseColumns(
     const readings = quantityMeanings(name, known).filter((reading) => !chosen.settled.has(reading.quantity));
     if (readings.length > 0) meanings.set(index, readings);
   });
-  const stems = new Map([...meanings].map(([index, readings]) => [index, stemsOf(names[index] ?? "", readings)] as const));
+  const stems = new Map(
+    [...meanings].map(([index, readings]) => [index, stemsOf(names[index] ?? "", readings)] as const),
+  );
   const errors = attachErrorColumns(names, stems);
   for (const [index, given] of chosen.errors) errors.set(index, { ...errors.get(index), ...given, mayBeBounds: false });
 
@@ -93,13 +97,6 @@ const twoQuantities = (name: string, readings: readonly QuantityMeaning[]): Ambi
   })),
 });
 
-/** Our own column name of a quantity, with its unit. */
-export function ownColumn(quantity: QuantityName, unitId?: string): string {
-  const { ownName, ownUnit } = quantityColumns[quantity];
-  const unit = unitId ?? ownUnit;
-  return unit === "" || unit === "1" ? ownName : `${ownName}_${unit.replace(/-/g, "_")}`;
-}
-
 interface SourceRequest {
   readonly columns: readonly RawColumn[];
   readonly sample: readonly RawRecord[];
@@ -139,7 +136,8 @@ function preferred(
   const best = Math.min(...sources.map(rank));
   const ranked = sources.filter((source) => best === groups.length || rank(source) === best);
   const order = ["earth", "jupiter"];
-  const place = (source: QuantitySource): number => (order.indexOf(source.unit.id) + order.length + 1) % (order.length + 1);
+  const place = (source: QuantitySource): number =>
+    (order.indexOf(source.unit.id) + order.length + 1) % (order.length + 1);
   const used = ranked.toSorted((a, b) => place(a) - place(b));
   const unitsDiffer = new Set(used.map((source) => source.unit.id)).size === used.length;
   if (unitsDiffer) return { used };

@@ -1,9 +1,10 @@
 import { InputError } from "../errors.ts";
 import type { ColumnChoices } from "./columnChoices.ts";
 import type { Ambiguity, UnitSource } from "./columnPlan.ts";
-import { type KnownList, quantityColumns } from "./columnTable.ts";
+import { quantityColumns } from "./columnTable.ts";
 import type { ErrorColumns } from "./errorColumns.ts";
 import type { RawColumn, RawRecord } from "./formats/rawTable.ts";
+import type { KnownList } from "./knownLists.ts";
 import type { QuantityName } from "./quantity.ts";
 import { findUnit, type Unit, unitById, unitIds } from "./unitTable.ts";
 
@@ -48,7 +49,8 @@ export function resolveUnit(request: UnitRequest): Resolved<{ unit: Unit; unitSo
   if (usual !== undefined) return { value: { unit: usual, unitSource: "usual" }, note };
   const possible = ["earth", "jupiter"].flatMap((id) => unitById(id, dimension) ?? []);
   const fitting = possible.filter((unit) => isPossible(quantity, values, unit));
-  if (fitting.length === 1 && fitting[0] !== undefined) return { value: { unit: fitting[0], unitSource: "values" }, note };
+  if (fitting.length === 1 && fitting[0] !== undefined)
+    return { value: { unit: fitting[0], unitSource: "values" }, note };
   return { ambiguity: unitAmbiguity(column, quantity, possible), note };
 }
 

@@ -1,11 +1,4 @@
-import {
-  constants,
-  EARTH_MASS,
-  JUPITER_MASS,
-  JUPITER_RADIUS,
-  SUN_MASS,
-  SUN_RADIUS,
-} from "../units/constants.ts";
+import { constants, EARTH_MASS, JUPITER_MASS, JUPITER_RADIUS, SUN_MASS, SUN_RADIUS } from "../units/constants.ts";
 
 export type Dimension =
   | "mass"
@@ -43,20 +36,38 @@ const AU = constants.astronomicalUnit.value;
  * A spelling may stand for one unit per dimension, e.g. `earth`.
  */
 const table: readonly (readonly [unit: Unit, spellings: string])[] = [
-  [{ id: "earth", dimension: "mass", factor: EARTH_MASS }, "earth earths earthmass earthmasses massearth mearth me m⊕ mass⊕ ⊕ mterra geomass mgeo e"],
-  [{ id: "jupiter", dimension: "mass", factor: JUPITER_MASS }, "jupiter jup jupitermass jupitermasses massjupiter jovmass mjup mjupiter mj m♃ mjov j"],
+  [
+    { id: "earth", dimension: "mass", factor: EARTH_MASS },
+    "earth earths earthmass earthmasses massearth mearth me m⊕ mass⊕ ⊕ mterra geomass mgeo e",
+  ],
+  [
+    { id: "jupiter", dimension: "mass", factor: JUPITER_MASS },
+    "jupiter jup jupitermass jupitermasses massjupiter jovmass mjup mjupiter mj m♃ mjov j",
+  ],
   [{ id: "sun", dimension: "mass", factor: SUN_MASS }, "sun solar solarmass solarmasses solmass msun msol ms m☉ m⊙ s"],
   [{ id: "kg", dimension: "mass", factor: 1 }, "kg kilogram kilograms"],
   [{ id: "g", dimension: "mass", factor: 1e-3 }, "g gram grams"],
-  [{ id: "earth", dimension: "length", factor: constants.earthRadius.value }, "earth earths earthradius earthradii earthrad rearth re r⊕ radius⊕ ⊕ rterra georad rgeo e"],
-  [{ id: "jupiter", dimension: "length", factor: JUPITER_RADIUS }, "jupiter jup jupiterradius jupiterradii jupiterrad jovrad rjup rjupiter rj r♃ rjov j"],
-  [{ id: "sun", dimension: "length", factor: SUN_RADIUS }, "sun solar solarradius solarradii solrad rsun rsol r☉ r⊙ rs s"],
+  [
+    { id: "earth", dimension: "length", factor: constants.earthRadius.value },
+    "earth earths earthradius earthradii earthrad rearth re r⊕ radius⊕ ⊕ rterra georad rgeo e",
+  ],
+  [
+    { id: "jupiter", dimension: "length", factor: JUPITER_RADIUS },
+    "jupiter jup jupiterradius jupiterradii jupiterrad jovrad rjup rjupiter rj r♃ rjov j",
+  ],
+  [
+    { id: "sun", dimension: "length", factor: SUN_RADIUS },
+    "sun solar solarradius solarradii solrad rsun rsol r☉ r⊙ rs s",
+  ],
   [{ id: "au", dimension: "length", factor: AU }, "au astronomicalunit astronomicalunits ua"],
   [{ id: "km", dimension: "length", factor: 1e3 }, "km kilometer kilometers kilometre kilometres"],
   [{ id: "m", dimension: "length", factor: 1 }, "m meter meters metre metres"],
   [{ id: "g-cm3", dimension: "density", factor: 1e3 }, "gcm3 gcc gpercm3"],
   [{ id: "kg-m3", dimension: "density", factor: 1 }, "kgm3 kgperm3"],
-  [{ id: "jupiter", dimension: "density", factor: JUPITER_MASS / JUPITER_VOLUME }, "jupiter jup rhojup rhoj jovdensity j"],
+  [
+    { id: "jupiter", dimension: "density", factor: JUPITER_MASS / JUPITER_VOLUME },
+    "jupiter jup rhojup rhoj jovdensity j",
+  ],
   [{ id: "sun", dimension: "density", factor: SUN_MASS / SUN_VOLUME }, "sun solar rhosun solardensity rho☉ s"],
   [{ id: "day", dimension: "time", factor: DAY }, "d day days"],
   [{ id: "hour", dimension: "time", factor: 3600 }, "h hr hrs hour hours"],
@@ -67,8 +78,14 @@ const table: readonly (readonly [unit: Unit, spellings: string])[] = [
   [{ id: "k", dimension: "temperature", factor: 1 }, "k kelvin degk"],
   [{ id: "m-s2", dimension: "acceleration", factor: 1 }, "ms2 msec2 mpers2"],
   [{ id: "cm-s2", dimension: "acceleration", factor: 0.01 }, "cms2 cgs"],
-  [{ id: "log-cgs", dimension: "acceleration", factor: 0.01, isLogarithm: true }, "log10cms2 logcms2 logcgs logg dexcms2 dex"],
-  [{ id: "earth", dimension: "irradiance", factor: constants.solarIrradiance.value }, "earth earthflux searth fearth s⊕ f⊕ ⊕ earthinsolation"],
+  [
+    { id: "log-cgs", dimension: "acceleration", factor: 0.01, isLogarithm: true },
+    "log10cms2 logcms2 logcgs logg dexcms2 dex",
+  ],
+  [
+    { id: "earth", dimension: "irradiance", factor: constants.solarIrradiance.value },
+    "earth earthflux searth fearth s⊕ f⊕ ⊕ earthinsolation",
+  ],
   [{ id: "w-m2", dimension: "irradiance", factor: 1 }, "wm2"],
   [{ id: "cgs", dimension: "irradiance", factor: 1e-3 }, "ergscm2 ergcm2s ergs1cm2 cgs"],
   [{ id: "m-s", dimension: "speed", factor: 1 }, "ms ms1 msec mpers"],
@@ -104,4 +121,3 @@ export const unitById = (id: string, dimension: Dimension): Unit | undefined =>
 /** SI per unit, with the Earth radius [m] the user has chosen. */
 export const siFactor = (unit: Unit, earthRadius: number): number =>
   unit.id === "earth" && unit.dimension === "length" ? earthRadius : unit.factor;
-

@@ -56,7 +56,8 @@ function readColumns(description: readonly Line[], file: string): CdsColumn[] {
       start: Number(first ?? last) - 1,
       end: Number(last),
     };
-    if (!(column.start >= 0 && column.end > column.start)) throw badDescription(file, line, `"${line.text.trim()}" has no valid bytes`);
+    if (!(column.start >= 0 && column.end > column.start))
+      throw badDescription(file, line, `"${line.text.trim()}" has no valid bytes`);
     columns.push(column);
   }
   return columns;
@@ -75,7 +76,11 @@ async function skipNotes(lines: LineReader, file: string): Promise<void> {
   }
 }
 
-async function* readRecords(lines: LineReader, columns: readonly CdsColumn[], file: string): AsyncGenerator<RawRecord[]> {
+async function* readRecords(
+  lines: LineReader,
+  columns: readonly CdsColumn[],
+  file: string,
+): AsyncGenerator<RawRecord[]> {
   for await (const batch of lines.rest()) {
     const described = batch.find((line) => /Byte-by-byte Description/i.test(line.text));
     if (described !== undefined) throw severalTables(file, described);
@@ -107,7 +112,11 @@ const noData = (file: string): InputError =>
   );
 
 const severalTables = (file: string, line: Line): InputError =>
-  new InputError("several-tables", `${file}, line ${line.number}: a second table begins; put each table in a file of its own`, {
-    file,
-    line: line.number,
-  });
+  new InputError(
+    "several-tables",
+    `${file}, line ${line.number}: a second table begins; put each table in a file of its own`,
+    {
+      file,
+      line: line.number,
+    },
+  );

@@ -24,7 +24,10 @@ export async function readEcsv(lines: LineReader, file: string): Promise<RawTabl
   const comments = await lines.takeWhile((line) => line.text.startsWith("#"));
   const version = /%ECSV\s+(\S+)/.exec(comments[0]?.text ?? "")?.[1] ?? "";
   if (!/^(?:0\.9|1\.\d+)$/.test(version)) throw wrongVersion(file, version);
-  const header = readHeader(comments.map((line) => line.text.replace(/^# ?/, "")), file);
+  const header = readHeader(
+    comments.map((line) => line.text.replace(/^# ?/, "")),
+    file,
+  );
   const format = "ecsv";
   const dialect = { ...dialectOf("comma-separated", header.delimiter), format } as const;
   const names = await lines.next();

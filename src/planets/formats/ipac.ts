@@ -18,8 +18,11 @@ export function isIpac(head: string): boolean {
   const table = lines.slice(start);
   const headerEnd = table.findIndex((line) => !line.startsWith("|"));
   const header = table.slice(0, headerEnd === -1 ? table.length : headerEnd);
-  return header.length >= 1 && header.length <= 4 && header.every((line) => /\|\s*$/.test(line.slice(1)));
+  const isBarred = header.length >= 1 && header.length <= 4 && header.every((line) => /\|\s*$/.test(line.slice(1)));
+  return isBarred && (header[1] === undefined || header[1].split("|").every((cell) => typeWord.test(cell)));
 }
+
+const typeWord = /^[\s-]*(?:d|double|r|real|f|float|i|int|l|long|c|char|date)?[\s-]*$/i;
 
 /**
  * Table of the Infrared Processing and Analysis Center: up to four header lines (names, types, units, nulls) whose bars
@@ -37,13 +40,23 @@ export async function readIpac(lines: LineReader, file: string): Promise<RawTabl
     const start = bar + 1;
     const end = bars[index + 1] ?? start;
     const unit = clean(units?.slice(start, end));
-    return { name: clean(names?.slice(start, end)), unit: unit === "" ? undefined : unit, missing: clean(nulls?.slice(start, end)), start, end };
+    return {
+      name: clean(names?.slice(start, end)),
+      unit: unit === "" ? undefined : unit,
+      missing: clean(nulls?.slice(start, end)),
+      start,
+      end,
+    };
   });
   return { format: "ipac", columns, batches: readRecords(lines, columns) };
 }
 
 /** Names may be padded with dashes as well as blanks. */
-const clean = (text = ""): string => text.trim().replace(/^-+(?=\D)|-+$/g, "").trim();
+const clean = (text = ""): string =>
+  text
+    .trim()
+    .replace(/^-+(?=\D)|-+$/g, "")
+    .trim();
 
 async function* readRecords(lines: LineReader, columns: readonly IpacColumn[]): AsyncGenerator<RawRecord[]> {
   for await (const batch of lines.rest()) {
@@ -59,8 +72,12 @@ function readCell(text: string, { start, end, missing }: IpacColumn): string {
 }
 
 const badHeader = (file: string, line: number | undefined, found: string | undefined): InputError =>
-  new InputError("ipac-header", `${file}, line ${line ?? 1}: not a header of an IPAC table; it has up to four lines of bars`, {
-    file,
-    line,
-    found,
-  });
+  new InputError(
+    "ipac-header",
+    `${file}, line ${line ?? 1}: not a header of an IPAC table; it has up to four lines of bars`,
+    {
+      file,
+      line,
+      found,
+    },
+  );

@@ -42,21 +42,32 @@ async function peek(text: AsyncIterable<string>): Promise<{ head: string; all: A
   return { head, all: all() };
 }
 
-const otherFormats: readonly (readonly [RegExp, what: string, remedy: string])[] = [
-  [/^PK\x03\x04/, "a spreadsheet or zip file", "save the sheet as CSV, or unpack the file"],
-  [/^\xd0\xcf\x11\xe0|^ÐÏ/, "an old spreadsheet", "save the sheet as CSV"],
-  [/^BZh\d|^\xfd7zXZ|^ý7zXZ|^\x28\xb5\x2f\xfd|^\(µ\/ý/, "compressed in a way other than gzip", "unpack the file first"],
-  [/^SIMPLE\s+=/, "a FITS file", "convert the table to VOTable or CSV"],
-  [/^%PDF/, "a PDF document", "fetch the table itself"],
-  [/^\s*<(?:!doctype\s+html|html)/i, "a web page", "it may be an error message of the archive; fetch the table itself"],
-  [/^\s*[{[]\s*["{[]/, "JSON", "fetch the table as CSV or VOTable"],
-  // biome-ignore lint/suspicious/noControlCharactersInRegex: a NUL is what tells a binary file from a text
-  [/\0/, "a binary file", "save the table as text"],
-];
+/** Beginnings of files that are something else, as Windows-1252 or UTF-8 text has them. */
+const otherFormats: readonly { readonly starts: readonly string[]; readonly what: string; readonly remedy: string }[] =
+  [
+    {
+      starts: ["PK\u0003\u0004"],
+      what: "a spreadsheet or zip file",
+      remedy: "save the sheet as CSV, or unpack the file",
+    },
+    { starts: ["ÐÏ\u0011à"], what: "an old spreadsheet", remedy: "save the sheet as CSV" },
+    { starts: ["BZh", "ý7zXZ", "(µ/ý"], what: "compressed in a way other than gzip", remedy: "unpack the file first" },
+    { starts: ["SIMPLE  ="], what: "a FITS file", remedy: "convert the table to VOTable or CSV" },
+    { starts: ["%PDF"], what: "a PDF document", remedy: "fetch the table itself" },
+    {
+      starts: ["<!DOCTYPE HTML", "<HTML"],
+      what: "a web page",
+      remedy: "it may be an error message; fetch the table itself",
+    },
+    { starts: ["{", "["], what: "JSON", remedy: "fetch the table as CSV or VOTable" },
+  ];
 
 function refuseOtherFormats(head: string, file: string): void {
-  const other = otherFormats.find(([pattern]) => pattern.test(head));
-  if (other === undefined) return;
-  const [, what, remedy] = other;
-  throw new InputError("unsupported-format", `${file}: this is ${what}, not a planet list; ${remedy}`, { file, found: head.slice(0, 80) });
+  const start = head.slice(0, 1000).trimStart().toUpperCase();
+  const other = otherFormats.find(({ starts }) => starts.some((sign) => start.startsWith(sign.toUpperCase())));
+  const binary = { what: "a binary file", remedy: "save the table as text" };
+  const found = other ?? (head.includes("\0") ? binary : undefined);
+  if (found === undefined) return;
+  const message = `${file}: this is ${found.what}, not a planet list; ${found.remedy}`;
+  throw new InputError("unsupported-format", message, { file, found: head.slice(0, 80) });
 }

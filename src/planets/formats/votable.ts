@@ -4,7 +4,8 @@ import type { RawRecord, RawTable } from "./rawTable.ts";
 import { BinaryRows } from "./votableBinary.ts";
 import { parseField, readCellText, readTypedBase64, type VotableField } from "./votableField.ts";
 
-export const isVotable = (head: string): boolean => /^\s*(?:<\?xml|<!DOCTYPE\s+VOTABLE|<(?:\w+:)?VOTABLE|<!--)/.test(head);
+export const isVotable = (head: string): boolean =>
+  /^\s*(?:<\?xml|<!DOCTYPE\s+VOTABLE|<(?:\w+:)?VOTABLE|<!--)/.test(head);
 
 /** Characters between two tags; more than any cell needs. */
 const TEXT_LIMIT = 16 * 2 ** 20;
@@ -110,8 +111,7 @@ class VotableReader {
     if (name === "TABLE") this.isTable = true;
     else if (name === "FIELD" && this.isTable) {
       this.openField = this.decoded("field", () => parseField(attributes, this.fields.length + 1));
-    }
-    else if (name === "VALUES" && this.openField !== undefined) this.readValues(attributes);
+    } else if (name === "VALUES" && this.openField !== undefined) this.readValues(attributes);
     else if (name === "DATA" && this.fields.length > 0) this.hasFields = true;
     else if (!this.hasFields) return;
     else if (name === "TABLEDATA") this.mode = "rows";
@@ -145,8 +145,8 @@ class VotableReader {
   }
 
   private readValues(attributes: Readonly<Record<string, string>>): void {
-    const missing = attributes["null"] ?? this.missingById.get(attributes["ref"] ?? "");
-    if (missing !== undefined && attributes["ID"] !== undefined) this.missingById.set(attributes["ID"], missing);
+    const missing = attributes.null ?? this.missingById.get(attributes.ref ?? "");
+    if (missing !== undefined && attributes.ID !== undefined) this.missingById.set(attributes.ID, missing);
     if (this.openField !== undefined && missing !== undefined) this.openField = { ...this.openField, missing };
   }
 
@@ -157,7 +157,7 @@ class VotableReader {
 
   private openCell(attributes: Readonly<Record<string, string>>): void {
     this.cellText = "";
-    this.cellIsBase64 = attributes["encoding"] === "base64";
+    this.cellIsBase64 = attributes.encoding === "base64";
   }
 
   private closeCell(cells: string[]): void {
@@ -170,8 +170,8 @@ class VotableReader {
   }
 
   private openStream(attributes: Readonly<Record<string, string>>): void {
-    if (attributes["href"] !== undefined) throw external(this.file, this.xml.line, `its data are at ${attributes["href"]}`);
-    const encoding = attributes["encoding"] ?? "base64";
+    if (attributes.href !== undefined) throw external(this.file, this.xml.line, `its data are at ${attributes.href}`);
+    const encoding = attributes.encoding ?? "base64";
     if (encoding !== "base64") throw external(this.file, this.xml.line, `its stream is encoded as ${encoding}`);
     this.rowLine = this.xml.line;
     this.mode = "stream";
@@ -215,11 +215,15 @@ class VotableReader {
   private closeInfo(): void {
     if (this.infoText === undefined) return;
     const found = this.infoText.trim();
-    throw new InputError("votable-query-failed", `${this.file}: the archive answered with an error instead of a table: ${found}`, {
-      file: this.file,
-      line: this.xml.line,
-      found,
-    });
+    throw new InputError(
+      "votable-query-failed",
+      `${this.file}: the archive answered with an error instead of a table: ${found}`,
+      {
+        file: this.file,
+        line: this.xml.line,
+        found,
+      },
+    );
   }
 }
 
@@ -237,16 +241,27 @@ const noTable = (file: string): InputError =>
   new InputError("votable-no-table", `${file}: this XML file holds no VOTable table with fields`, { file });
 
 const external = (file: string, line: number, what: string): InputError =>
-  new InputError("votable-external-data", `${file}, line ${line}: ${what}, which is not read; save the table as TABLEDATA`, {
-    file,
-    line,
-  });
+  new InputError(
+    "votable-external-data",
+    `${file}, line ${line}: ${what}, which is not read; save the table as TABLEDATA`,
+    {
+      file,
+      line,
+    },
+  );
 
 const cutOff = (file: string, line: number, bytes: number): InputError =>
-  new InputError("votable-data", `${file}, line ${line}: the binary data end within a row (${bytes} bytes left over)`, { file, line });
-
-const textTooLong = (file: string, line: number): InputError =>
-  new InputError("line-too-long", `${file}, line ${line}: a cell is longer than the limit of ${TEXT_LIMIT} characters`, {
+  new InputError("votable-data", `${file}, line ${line}: the binary data end within a row (${bytes} bytes left over)`, {
     file,
     line,
   });
+
+const textTooLong = (file: string, line: number): InputError =>
+  new InputError(
+    "line-too-long",
+    `${file}, line ${line}: a cell is longer than the limit of ${TEXT_LIMIT} characters`,
+    {
+      file,
+      line,
+    },
+  );

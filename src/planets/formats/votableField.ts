@@ -1,5 +1,5 @@
-import type { RawColumn } from "./rawTable.ts";
 import { decodeBase64 } from "./base64.ts";
+import type { RawColumn } from "./rawTable.ts";
 
 export type Datatype =
   | "boolean"
@@ -28,9 +28,9 @@ export interface VotableField extends RawColumn {
 }
 
 const datatypes = new Map<string, Datatype>([
-  ...(["boolean", "bit", "unsignedByte", "short", "int", "long", "char", "unicodeChar", "float", "double"] as const).map(
-    (name) => [name, name] as const,
-  ),
+  ...(
+    ["boolean", "bit", "unsignedByte", "short", "int", "long", "char", "unicodeChar", "float", "double"] as const
+  ).map((name) => [name, name] as const),
   ["floatComplex", "floatComplex"],
   ["doubleComplex", "doubleComplex"],
   // Found in files although no standard knows them.
@@ -40,20 +40,20 @@ const datatypes = new Map<string, Datatype>([
 
 /** Throws RangeError for a datatype that the standard does not know. */
 export function parseField(attributes: Readonly<Record<string, string>>, number: number): VotableField {
-  const dimensions = (attributes["arraysize"] ?? "1").split("x").map((part) => part.trim());
+  const dimensions = (attributes.arraysize ?? "1").split("x").map((part) => part.trim());
   const isVariable = dimensions.at(-1)?.endsWith("*") === true;
   const fixed = (isVariable ? dimensions.slice(0, -1) : dimensions).map(Number);
-  const name = attributes["name"] ?? attributes["ID"] ?? `column ${number}`;
-  const datatype = datatypes.get(attributes["datatype"] ?? "char");
-  if (datatype === undefined) throw new RangeError(`field "${name}" has the unknown datatype "${attributes["datatype"]}"`);
+  const name = attributes.name ?? attributes.ID ?? `column ${number}`;
+  const datatype = datatypes.get(attributes.datatype ?? "char");
+  if (datatype === undefined) throw new RangeError(`field "${name}" has the unknown datatype "${attributes.datatype}"`);
   return {
     name,
-    id: attributes["ID"],
-    unit: attributes["unit"],
+    id: attributes.ID,
+    unit: attributes.unit,
     datatype,
     elements: fixed.reduce((product, size) => product * (Number.isSafeInteger(size) && size > 0 ? size : 1), 1),
     isVariable,
-    isScalar: attributes["arraysize"] === undefined,
+    isScalar: attributes.arraysize === undefined,
   };
 }
 
@@ -73,7 +73,8 @@ export function readCellText(text: string, field: VotableField): string {
   if (cell === missing) return "";
   if (!isScalar) return cell;
   const range = integerRanges[datatype];
-  if (range !== undefined && /^(?:[+-]?\d{1,30}|0x[0-9a-f]{1,30})$/i.test(cell)) return clampInteger(BigInt(cell.replace(/^\+/, "")), range, missing);
+  if (range !== undefined && /^(?:[+-]?\d{1,30}|0x[0-9a-f]{1,30})$/i.test(cell))
+    return clampInteger(BigInt(cell.replace(/^\+/, "")), range, missing);
   return /^[+-]?nan$/i.test(cell) ? "" : cell;
 }
 
@@ -86,7 +87,12 @@ function clampInteger(value: bigint, [low, high]: readonly [bigint, bigint], mis
 /** A TD may hold its value in binary; only whole numbers of elements can be read. */
 export function readTypedBase64(text: string, field: VotableField): string {
   const bytes = decodeBase64(text);
-  const read = readElements(new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength), 0, field, bytes.length / elementBytes(field));
+  const read = readElements(
+    new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength),
+    0,
+    field,
+    bytes.length / elementBytes(field),
+  );
   return read === field.missing ? "" : read;
 }
 

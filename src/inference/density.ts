@@ -1,0 +1,84 @@
+import type { QuadratureRule } from "../numerics/gaussLegendre.ts";
+import { evaluateLegendreSeries, legendreSeries } from "../numerics/legendreSeries.ts";
+
+export interface Panel {
+  readonly from: number;
+  readonly to: number;
+}
+
+/**
+ * A density known at Gauss–Legendre nodes on panels, normalised: the probabilities of its nodes sum to 1, and the mean
+ * of a smooth g is Σ probability g(node). Made by `densityQuadrature`.
+ */
+export class Density {
+  /** ln ∫ exp(logDensity(x)) dx, before normalisation. */
+  readonly logIntegral: number;
+  readonly nodes: Float64Array;
+  readonly probabilities: Float64Array;
+  private readonly panels: readonly Panel[];
+  private readonly rule: QuadratureRule;
+  /** Normalised log-density at the nodes. */
+  private readonly logDensities: Float64Array;
+
+  /** `peak` is taken off the log-density before any exponential, so that none underflows. */
+  constructor(panels: readonly Panel[], logDensity: (x: number) => number, peak: number, rule: QuadratureRule) {
+    const perPanel = rule.nodes.length;
+    const count = panels.length * perPanel;
+    this.panels = panels;
+    this.rule = rule;
+    this.nodes = new Float64Array(count);
+    this.logDensities = new Float64Array(count);
+    this.probabilities = new Float64Array(count);
+    let total = 0;
+    for (let at = 0; at < count; at++) {
+      const i = at % perPanel;
+      const { from, to } = panels[(at - i) / perPanel];
+      const half = (to - from) / 2;
+      this.nodes[at] = from + half * (1 + rule.nodes[i]);
+      this.logDensities[at] = logDensity(this.nodes[at]) - peak;
+      this.probabilities[at] = half * rule.weights[i] * Math.exp(this.logDensities[at]);
+      total += this.probabilities[at];
+    }
+    const logTotal = Math.log(total);
+    for (let at = 0; at < count; at++) {
+      this.logDensities[at] -= logTotal;
+      this.probabilities[at] /= total;
+    }
+    this.logIntegral = peak + logTotal;
+  }
+
+  /** The x below which lies the share `probability` (0 to 1) of the density. */
+  quantile(probability: number): number {
+    const perPanel = this.rule.nodes.length;
+    const last = this.panels.length - 1;
+    let below = 0;
+    for (let p = 0; ; p++) {
+      let inPanel = 0;
+      for (let i = 0; i < perPanel; i++) inPanel += this.probabilities[p * perPanel + i];
+      if (below + inPanel >= probability || p === last) return this.quantileInPanel(p, probability - below);
+      below += inPanel;
+    }
+  }
+
+  /** Bisection; between the nodes the log-density is the polynomial through them, as it is nearly straight. */
+  private quantileInPanel(p: number, wanted: number): number {
+    const { nodes, weights } = this.rule;
+    const half = (this.panels[p].to - this.panels[p].from) / 2;
+    const series = legendreSeries(this.rule, this.logDensities.subarray(p * nodes.length, (p + 1) * nodes.length));
+    const shareBelow = (u: number): number => {
+      let share = 0;
+      for (let i = 0; i < nodes.length; i++) {
+        share += weights[i] * Math.exp(evaluateLegendreSeries(series, -1 + ((u + 1) / 2) * (1 + nodes[i])));
+      }
+      return (share * half * (u + 1)) / 2;
+    };
+    let low = -1;
+    let high = 1;
+    for (let step = 0; step < 45; step++) {
+      const middle = (low + high) / 2;
+      if (shareBelow(middle) < wanted) low = middle;
+      else high = middle;
+    }
+    return this.panels[p].from + half * (1 + (low + high) / 2);
+  }
+}
