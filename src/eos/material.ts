@@ -28,7 +28,18 @@ export interface Material {
   readonly name: string;
   readonly title: string;
   readonly phases: readonly Phase[];
+  /**
+   * For a substance whose equation of state knows temperature: its phases in a layer whose top is at this pressure
+   * [Pa] and temperature [K], in the given mode. `phases` are then those of a cold planet.
+   */
+  readonly warmed?: (mode: TemperatureMode, topPressure: number, topTemperature: number) => readonly Phase[];
 }
+
+/** How temperature goes on below the top of a layer. */
+export type TemperatureMode =
+  | { readonly kind: "isothermal" | "adiabatic" }
+  /** Given as a function of pressure [Pa → K], smooth between the pressures listed in `kinks`. */
+  | { readonly kind: "table"; readonly temperatureAt: (pressure: number) => number; readonly kinks: readonly number[] };
 
 /** The phase stable at a pressure [Pa]; on a boundary the denser one, above it. */
 export function phaseAt({ phases }: Material, pressure: number): Phase {

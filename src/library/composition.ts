@@ -1,4 +1,4 @@
-import type { Material, Source } from "../eos/material.ts";
+import type { Material, Source, TemperatureMode } from "../eos/material.ts";
 
 /** A layer with its material resolved; fractions of the whole planet's mass. */
 export interface Layer {
@@ -6,6 +6,8 @@ export interface Layer {
   readonly name: string;
   readonly material: Material;
   readonly massFraction: number;
+  /** How much hotter its top is than the bottom of the layer above it [K]; 0 where not given. */
+  readonly temperatureJump?: number;
 }
 
 /** What a planet is made of, centre to surface, nested compositions already expanded. */
@@ -16,4 +18,10 @@ export interface Composition {
   readonly source?: Source;
   readonly surface: { readonly pressurePa: number; readonly temperatureK: number };
   readonly layers: readonly Layer[];
+  /** Absent for a cold planet, whose materials are taken as their files give them. */
+  readonly temperature?: {
+    readonly mode: TemperatureMode;
+    /** At the top of the outermost layer; along an adiabat this is the potential temperature [K]. */
+    readonly top: number;
+  };
 }
