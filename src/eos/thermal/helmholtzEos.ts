@@ -5,13 +5,15 @@ import { stateFromHelmholtz, type ThermalEos, type ThermalState } from "./therma
 import type { HelmholtzState } from "./thermalTerm.ts";
 
 const MAX_ITERATIONS = 60;
-/** Newton converges quadratically: a step this small leaves an error near rounding level. */
-const LAST_STEP = 1e-8;
+/** The iteration converges quadratically: a step this small leaves an error near rounding level. */
+const LAST_STEP = 1e-7;
+/** dK/dP of a typical solid, so that a step follows K = K0 + 4 P (Murnaghan) and not a straight line. */
+const STIFFENING = 4;
 
 /**
  * A single phase: its pressure and entropy are explicit in the coordinate y of a reference curve and temperature, so
  * only density at a given pressure has to be found.
- * Checked test/eos/thermal/helmholtzEos.test.ts
+ * Checked test/eos/thermal/isothermBasedEos.test.ts
  */
 export abstract class HelmholtzEos implements ThermalEos {
   /** The curve the phase follows at its reference: an isotherm or an isentrope. */
@@ -42,16 +44,15 @@ export abstract class HelmholtzEos implements ThermalEos {
     for (let i = 0; i < MAX_ITERATIONS; i++) {
       const state = this.helmholtz(y, temperature);
       if (!(state.bulkModulus > 0)) throw unstable(pressure, temperature);
-      const step = (pressure - state.pressure) / (state.bulkModulus * this.logDensitySlope(y));
-      if (Math.abs(step) <= LAST_STEP * y) return this.stateAt(y + step, temperature);
+      const logDensityStep = murnaghanStep((pressure - state.pressure) / state.bulkModulus);
+      const step = logDensityStep / this.logDensitySlope(y);
       y += step;
       if (!(y > 0)) throw unstable(pressure, temperature);
+      if (Math.abs(step) <= LAST_STEP * y) {
+        return stateFromHelmholtz(this.reference.density(y), temperature, this.helmholtz(y, temperature));
+      }
     }
     throw new ConvergenceError("thermal-density", `No density found at ${pressure} Pa and ${temperature} K.`);
-  }
-
-  private stateAt(y: number, temperature: number): ThermalState {
-    return stateFromHelmholtz(this.reference.density(y), temperature, this.helmholtz(y, temperature));
   }
 
   /** d ln ρ / dy of the reference curve. */
@@ -65,6 +66,11 @@ export abstract class HelmholtzEos implements ThermalEos {
     this.reference.slopes(y, this.slopes);
     return this.slopes[0] / this.slopes[2];
   }
+}
+
+/** Change of ln ρ that raises the pressure by `excess` bulk moduli; linear where Murnaghan's curve has no such pressure. */
+function murnaghanStep(excess: number): number {
+  return excess > -1 / (2 * STIFFENING) ? Math.log1p(STIFFENING * excess) / STIFFENING : excess;
 }
 
 function unstable(pressure: number, temperature: number): ModelRangeError {

@@ -25,8 +25,9 @@ export class IsothermBasedEos extends HelmholtzEos {
     let pressureSlope = 0;
     let heatCapacity = 0;
     for (const term of this.terms) {
-      const warm = term.at(density, temperature);
-      const cold = term.at(density, this.referenceTemperature);
+      const part = term.at(density);
+      const warm = part(temperature);
+      const cold = part(this.referenceTemperature);
       pressure += warm.pressure - cold.pressure;
       bulkModulus += warm.bulkModulus - cold.bulkModulus;
       entropy += warm.entropy;

@@ -1,9 +1,11 @@
 import { ConvergenceError, ModelRangeError } from "../../errors.ts";
 import { IsothermBasedEos } from "./isothermBasedEos.ts";
 import type { ThermalEos, ThermalState } from "./thermalState.ts";
-import { PathCurve, type PathPoint, type WarmCurve } from "./warmCurve.ts";
+import { type Path, PathCurve, type PathPoint, type WarmCurve } from "./warmCurve.ts";
 
 const MAX_ITERATIONS = 60;
+/** Newton in ln T: after a step this small the density is carried along it to first order, with an error of its square. */
+const LAST_STEP = 1e-6;
 
 /**
  * The curve of constant entropy through an anchor, which serves as an adiabat of a well-mixed layer.
@@ -15,22 +17,21 @@ const MAX_ITERATIONS = 60;
 export function isentrope(eos: ThermalEos, anchorPressure: number, anchorTemperature: number): WarmCurve {
   const anchor = eos.at(anchorPressure, anchorTemperature);
   const scale = pressureScale(anchor, anchorPressure);
-  const point = (pressure: number): PathPoint => {
+  const start: PathPoint = { pressure: anchorPressure, density: anchor.density, temperature: anchorTemperature };
+  const path: Path = (pressure, near = start) => {
     // First guess: d ln T/dP = γ/K with constant γ and K = 4 (P + P*).
-    const stiffening = (pressure + scale) / (anchorPressure + scale);
-    let temperature = anchorTemperature * stiffening ** (anchor.gruneisen / 4);
+    let temperature = near.temperature * ((pressure + scale) / (near.pressure + scale)) ** (anchor.gruneisen / 4);
     for (let i = 0; i < MAX_ITERATIONS; i++) {
       const state = eos.at(pressure, temperature);
       const step = (anchor.entropy - state.entropy) / state.heatCapacityP;
       temperature *= Math.exp(step);
-      if (Math.abs(step) < 1e-9) {
-        // The density of the last state, carried over a step too small to need another evaluation.
-        return { density: state.density * (1 - state.expansivity * temperature * step), temperature };
+      if (Math.abs(step) < LAST_STEP) {
+        return { pressure, density: state.density * (1 - state.expansivity * temperature * step), temperature };
       }
     }
     throw new ConvergenceError("isentrope", `No temperature found on the isentrope at ${pressure} Pa.`, temperature);
   };
-  return pathCurve(eos, point, anchorPressure, scale);
+  return pathCurve(eos, path, anchorPressure, scale);
 }
 
 /**
@@ -67,11 +68,11 @@ export function alongTemperature(
 ): WarmCurve {
   const { fromPressure = 0, kinks } = options;
   const start = eos.at(fromPressure, temperatureAt(fromPressure));
-  const point = (pressure: number): PathPoint => {
+  const path: Path = (pressure) => {
     const temperature = temperatureAt(pressure);
-    return { density: eos.at(pressure, temperature).density, temperature };
+    return { pressure, density: eos.at(pressure, temperature).density, temperature };
   };
-  return pathCurve(eos, point, fromPressure, pressureScale(start, fromPressure), kinks);
+  return pathCurve(eos, path, fromPressure, pressureScale(start, fromPressure), kinks);
 }
 
 /** P* of K = 4 (P + P*), kept positive where compression has made K/P smaller than 4. */
@@ -82,16 +83,22 @@ function pressureScale({ bulkModulusT }: ThermalState, pressure: number): number
 /** A path begins at zero pressure where the substance can be decompressed that far, else where it is anchored. */
 function pathCurve(
   eos: ThermalEos,
-  path: (pressure: number) => PathPoint,
+  path: Path,
   anchorPressure: number,
   scale: number,
   kinks?: readonly number[],
 ): WarmCurve {
   const minPressure = reachesZero(path) ? 0 : anchorPressure;
-  return new PathCurve(path, { minPressure, maxPressure: eos.maxPressure, scale, kinks });
+  return new PathCurve(path, {
+    minPressure,
+    maxPressure: eos.maxPressure,
+    startPressure: anchorPressure,
+    scale,
+    kinks,
+  });
 }
 
-function reachesZero(path: (pressure: number) => PathPoint): boolean {
+function reachesZero(path: Path): boolean {
   try {
     path(0);
     return true;

@@ -18,18 +18,19 @@ export interface HelmholtzState {
   readonly heatCapacity: number;
 }
 
-/** A thermal part at a density [kg m^-3] and temperature [K]. */
+/** A thermal part of the energy. */
 export interface ThermalTerm {
   /** Density beyond which the term cannot be evaluated; Infinity for most. */
   readonly maxDensity: number;
-  at(density: number, temperature: number): HelmholtzState;
+  /** The part at a density [kg m^-3], as a function of temperature [K]: one is always compared with another. */
+  at(density: number): (temperature: number) => HelmholtzState;
 }
 
 /**
  * Lattice vibrations by the Mie–Grüneisen–Debye model, without the zero-point energy (it is part of the cold curve).
  * Formula F = r T (3 ln(1 - e^-t) - D3(t)), t = θ(V)/T, r = n R / M
  * Source  Stixrude & Lithgow-Bertelloni 2005, Geophys. J. Int. 162, 610, equations 5-10 and appendix
- * Checked test/eos/thermal/thermalTerm.test.ts
+ * Checked test/eos/thermal/isothermBasedEos.test.ts
  */
 export function debyeTerm(parameters: {
   /** Density at V0 [kg m^-3]. */
@@ -43,18 +44,21 @@ export function debyeTerm(parameters: {
   const { densityZero, gasConstant, debyeTemperature, law } = parameters;
   return {
     maxDensity: densityZero * law.maxCompression,
-    at(density, temperature) {
+    at(density) {
       const { debyeRatio, gamma, gammaSlope } = law.at(densityZero / density);
-      const debye = debyeState((debyeTemperature * debyeRatio) / temperature);
-      const energy = 3 * gasConstant * temperature * debye.energy;
-      const heatCapacity = 3 * gasConstant * debye.heatCapacity;
-      return {
-        pressure: density * gamma * energy,
-        entropy: 3 * gasConstant * debye.entropy,
-        bulkModulus:
-          density * ((gamma + gamma * gamma - gammaSlope) * energy - gamma * gamma * temperature * heatCapacity),
-        pressureSlope: density * gamma * heatCapacity,
-        heatCapacity,
+      const theta = debyeTemperature * debyeRatio;
+      return (temperature) => {
+        const debye = debyeState(theta / temperature);
+        const energy = 3 * gasConstant * temperature * debye.energy;
+        const heatCapacity = 3 * gasConstant * debye.heatCapacity;
+        return {
+          pressure: density * gamma * energy,
+          entropy: 3 * gasConstant * debye.entropy,
+          bulkModulus:
+            density * ((gamma + gamma * gamma - gammaSlope) * energy - gamma * gamma * temperature * heatCapacity),
+          pressureSlope: density * gamma * heatCapacity,
+          heatCapacity,
+        };
       };
     },
   };
@@ -65,7 +69,7 @@ export function debyeTerm(parameters: {
  * Formula F = -β0 (V/V0)^k T²/2, so c_V = β0 (V/V0)^k T
  * Source  electrons Fei et al. 2016, Geophys. Res. Lett. 43, 6837; anharmonic and electrons Dewaele et al. 2006,
  *         Phys. Rev. Lett. 97, 215504, whose a0 and e0 give β0 = 3 R a0 / M
- * Checked test/eos/thermal/thermalTerm.test.ts
+ * Checked test/eos/thermal/isothermBasedEos.test.ts
  */
 export function quadraticTerm(parameters: {
   densityZero: number;
@@ -77,16 +81,19 @@ export function quadraticTerm(parameters: {
   const { densityZero, coefficient, exponent } = parameters;
   return {
     maxDensity: Number.POSITIVE_INFINITY,
-    at(density, temperature) {
-      const heatCapacity = coefficient * (densityZero / density) ** exponent * temperature;
-      const pressureSlope = density * exponent * heatCapacity;
-      const pressure = (pressureSlope * temperature) / 2;
-      return {
-        pressure,
-        entropy: heatCapacity,
-        bulkModulus: (1 - exponent) * pressure,
-        pressureSlope,
-        heatCapacity,
+    at(density) {
+      const perKelvin = coefficient * (densityZero / density) ** exponent;
+      return (temperature) => {
+        const heatCapacity = perKelvin * temperature;
+        const pressureSlope = density * exponent * heatCapacity;
+        const pressure = (pressureSlope * temperature) / 2;
+        return {
+          pressure,
+          entropy: heatCapacity,
+          bulkModulus: (1 - exponent) * pressure,
+          pressureSlope,
+          heatCapacity,
+        };
       };
     },
   };

@@ -9,19 +9,23 @@ export interface WarmCurve extends EosCurve {
   temperature(y: number): number;
 }
 
-/** Density and temperature at one pressure of the path a warm curve follows. */
+/** One point of the path a warm curve follows. */
 export interface PathPoint {
+  readonly pressure: number;
   readonly density: number;
   readonly temperature: number;
 }
 
 /** y = (1 + P/P*)^(1/12) grows like the cube root of density where the bulk modulus grows as 4 (P + P*). */
 const EXPONENT = 12;
-const CELL_WIDTH = 0.04;
-const DEGREE = 10;
+const CELL_WIDTH = 0.02;
+const DEGREE = 8;
 /** Allowed size of the last coefficients of ln ρ; a piece that has larger ones is halved, this often at most. */
-const TOLERANCE = 1e-11;
+const TOLERANCE = 1e-9;
 const MAX_HALVINGS = 8;
+
+/** The path at a pressure; `near` is a point close by, where a search may start. */
+export type Path = (pressure: number, near?: PathPoint) => PathPoint;
 
 interface Polynomials {
   readonly logDensity: ChebyshevPolynomial;
@@ -39,27 +43,31 @@ type Piece = Polynomials | Halves;
 /**
  * Turns a path (pressure → density, temperature) into a curve the structure equations can be integrated along.
  * Pressure is explicit in y; density and temperature are piecewise polynomials in y, each piece made when first
- * asked for, so no upper pressure has to be known beforehand.
- * Range   relative error of density and its slope below 1e-9 for the materials shipped (measured by the test)
- * Checked test/eos/thermal/warmCurve.test.ts
+ * asked for, so no upper pressure has to be known beforehand; a piece does not depend on what was asked before.
+ * Range   relative error of density below 1e-10 and of its slope below 5e-9 (measured by the test)
+ * Checked test/eos/thermal/temperaturePaths.test.ts
  */
 export class PathCurve implements WarmCurve {
   readonly minPressure: number;
   readonly maxPressure: number;
-  private readonly path: (pressure: number) => PathPoint;
+  private readonly path: Path;
   private readonly scale: number;
   private readonly lowest: number;
   private readonly highest: number;
+  /** Left edge of cell 0. */
+  private readonly origin: number;
   private readonly kinks: readonly number[];
   private readonly pieces: Piece[] = [];
 
   constructor(
-    path: (pressure: number) => PathPoint,
+    path: Path,
     options: {
       minPressure: number;
       maxPressure: number;
       /** P* [Pa]. */
       scale: number;
+      /** Pressure from which the path will be followed upwards [Pa]: the pieces are laid out from there. */
+      startPressure: number;
       /** Pressures where the path is not smooth, ascending [Pa]. */
       kinks?: readonly number[];
     },
@@ -70,6 +78,9 @@ export class PathCurve implements WarmCurve {
     this.maxPressure = options.maxPressure;
     this.lowest = this.invert(options.minPressure);
     this.highest = this.invert(options.maxPressure);
+    // A quarter of a cell to spare, for trial steps that fall short of the start; whole cells down to the lowest y.
+    const first = this.invert(options.startPressure) - CELL_WIDTH / 4;
+    this.origin = first - CELL_WIDTH * Math.max(Math.ceil((first - this.lowest) / CELL_WIDTH), 0);
     this.kinks = (options.kinks ?? []).map((pressure) => this.invert(pressure));
   }
 
@@ -142,13 +153,13 @@ export class PathCurve implements WarmCurve {
   private pieceAt(y: number): Polynomials {
     // Steps that overshoot the lowest pressure see the lowest piece continued.
     const inside = Math.max(y, this.lowest);
-    const cell = Math.floor((inside - 1) / CELL_WIDTH);
+    const cell = Math.floor((inside - this.origin) / CELL_WIDTH);
     let passed = 0;
     while (passed < this.kinks.length && this.kinks[passed] <= inside) passed++;
     const index = cell + passed;
     this.pieces[index] ??= this.makePiece(
-      Math.max(1 + cell * CELL_WIDTH, this.kinks[passed - 1] ?? 0, this.lowest),
-      Math.min(1 + (cell + 1) * CELL_WIDTH, this.kinks[passed] ?? Number.POSITIVE_INFINITY, this.highest),
+      Math.max(this.origin + cell * CELL_WIDTH, this.kinks[passed - 1] ?? 0, this.lowest),
+      Math.min(this.origin + (cell + 1) * CELL_WIDTH, this.kinks[passed] ?? Number.POSITIVE_INFINITY, this.highest),
       MAX_HALVINGS,
     );
     let piece = this.pieces[index];
@@ -157,7 +168,8 @@ export class PathCurve implements WarmCurve {
   }
 
   private makePiece(from: number, to: number, halvingsLeft: number): Piece {
-    const points = Array.from(chebyshevNodes(from, to, DEGREE), (y) => this.path(this.pressureInRange(y)));
+    const points: PathPoint[] = [];
+    for (const y of chebyshevNodes(from, to, DEGREE)) points.push(this.path(this.pressureInRange(y), points.at(-1)));
     const through = (values: number[]) => new ChebyshevPolynomial(from, to, values);
     const logDensity = through(points.map((point) => Math.log(point.density)));
     if (logDensity.tail > TOLERANCE && halvingsLeft > 0) {

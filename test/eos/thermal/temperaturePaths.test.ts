@@ -32,7 +32,7 @@ describe.each(paths)("isentrope of %s", (_, eos, anchorPressure, anchorTemperatu
     for (const pressure of sampled.filter((p) => p >= curve.minPressure)) {
       const y = curve.coordinate(pressure);
       const state = eos.at(pressure, curve.temperature(y));
-      const because = "pieces halved until their last coefficients are below 1e-11";
+      const because = "pieces halved until their last coefficients are below 1e-9";
       expectClose(state.entropy, entropy, { rel: 1e-10, because });
       expectClose(curve.density(y), state.density, { rel: 1e-10, because });
       expect(Math.abs(curve.pressure(y) - pressure)).toBeLessThan(1e-14 * Math.max(pressure, state.bulkModulusT));
@@ -45,7 +45,7 @@ describe.each(paths)("isentrope of %s", (_, eos, anchorPressure, anchorTemperatu
       const y = curve.coordinate(pressure);
       const state = eos.at(pressure, curve.temperature(y));
       curve.slopes(y, slopes);
-      expectClose(slopes[0] / slopes[2], state.bulkModulusS, { rel: 1e-9, because: "slope of the pieces" });
+      expectClose(slopes[0] / slopes[2], state.bulkModulusS, { rel: 5e-9, because: "slope of the pieces" });
       const h = 1e-5;
       const warming = (curve.temperature(y + h) - curve.temperature(y - h)) / (2 * h * slopes[0]);
       expectClose(warming, state.adiabaticGradient, { rel: 1e-6, because: "differences of step 1e-5" });
@@ -129,9 +129,9 @@ describe("alongTemperature", () => {
     const curve = alongTemperature(bridgmanite, temperatureAt, { kinks: rows });
     for (const pressure of pressures) {
       const y = curve.coordinate(pressure);
-      expectClose(curve.temperature(y), temperatureAt(pressure), { rel: 1e-11, because: "pieces end at the kinks" });
+      expectClose(curve.temperature(y), temperatureAt(pressure), { rel: 1e-10, because: "pieces end at the kinks" });
       expectClose(curve.density(y), bridgmanite.at(pressure, temperatureAt(pressure)).density, {
-        rel: 1e-11,
+        rel: 1e-10,
         because: "pieces end at the kinks",
       });
     }

@@ -1,0 +1,59 @@
+import { describe, expect, it } from "vitest";
+import { thermalMixture } from "../../../src/eos/thermal/thermalMixture.ts";
+import { GPA } from "../../../src/units/constants.ts";
+import { expectClose } from "../../support/expectClose.ts";
+import { bridgmanite, forsterite, ironFei } from "../../support/thermalSubstances.ts";
+
+const parts = [
+  { eos: bridgmanite, massFraction: 0.5 },
+  { eos: forsterite, massFraction: 0.3 },
+  { eos: ironFei, massFraction: 0.2 },
+];
+const mixture = thermalMixture(parts);
+const [pressure, temperature] = [60 * GPA, 2500];
+
+describe("thermalMixture", () => {
+  it("adds volumes and entropies", () => {
+    const states = parts.map(({ eos }) => eos.at(pressure, temperature));
+    const sum = (f: (i: number) => number): number =>
+      parts.reduce((total, part, i) => total + part.massFraction * f(i), 0);
+    const state = mixture.at(pressure, temperature);
+    const exact = { rel: 1e-14, because: "sums" };
+    expectClose(
+      1 / state.density,
+      sum((i) => 1 / states[i].density),
+      exact,
+    );
+    expectClose(
+      state.entropy,
+      sum((i) => states[i].entropy),
+      exact,
+    );
+  });
+
+  it("has derivatives that agree with differences of those sums", () => {
+    const [dP, dT] = [1e-4 * pressure, 1e-4 * temperature];
+    const state = mixture.at(pressure, temperature);
+    const [hot, cold] = [mixture.at(pressure, temperature + dT), mixture.at(pressure, temperature - dT)];
+    const [high, low] = [mixture.at(pressure + dP, temperature), mixture.at(pressure - dP, temperature)];
+    const difference = { rel: 1e-6, because: "central differences of relative step 1e-4" };
+    expectClose(state.expansivity, Math.log(cold.density / hot.density) / (2 * dT), difference);
+    expectClose(state.bulkModulusT, (2 * dP) / Math.log(high.density / low.density), difference);
+    expectClose(state.heatCapacityP, (temperature * (hot.entropy - cold.entropy)) / (2 * dT), difference);
+    // dT/dP at constant entropy.
+    const gradient = -((high.entropy - low.entropy) / dP) / ((hot.entropy - cold.entropy) / dT);
+    expectClose(state.adiabaticGradient, gradient, difference);
+    expectClose(state.adiabaticGradient, (state.gruneisen * temperature) / state.bulkModulusS, {
+      rel: 1e-13,
+      because: "identity",
+    });
+    expectClose(state.bulkModulusS / state.bulkModulusT, state.heatCapacityP / state.heatCapacityV, {
+      rel: 1e-13,
+      because: "identity",
+    });
+  });
+
+  it("reaches as far as the first of its parts to break", () => {
+    expect(mixture.maxPressure).toBe(Math.min(...parts.map(({ eos }) => eos.maxPressure)));
+  });
+});
