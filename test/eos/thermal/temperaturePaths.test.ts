@@ -129,10 +129,10 @@ describe("alongTemperature", () => {
     const curve = alongTemperature(bridgmanite, temperatureAt, { kinks: rows });
     for (const pressure of pressures) {
       const y = curve.coordinate(pressure);
-      expectClose(curve.temperature(y), temperatureAt(pressure), { rel: 1e-10, because: "pieces end at the kinks" });
+      expectClose(curve.temperature(y), temperatureAt(pressure), { rel: 1e-9, because: "pieces end at the kinks" });
       expectClose(curve.density(y), bridgmanite.at(pressure, temperatureAt(pressure)).density, {
-        rel: 1e-10,
-        because: "pieces end at the kinks",
+        rel: 1e-9,
+        because: "hardest case: 130 K/GPa from 300 K, where vibrations freeze out",
       });
     }
     expectConsistentCurve(
