@@ -5,11 +5,11 @@ import { CRITICAL_DENSITY, CRITICAL_TEMPERATURE, WATER_GAS_CONSTANT } from "./ia
 import { saturation, TRIPLE_POINT_TEMPERATURE } from "./saturation.ts";
 
 /**
- * How far the fluid is carried [Pa, K]. IAPWS-95 is calibrated to 1 GPa and 1273 K. Beyond, its extrapolation stays smooth and
- * monotone; its density on the shock Hugoniot of water differs from the fit of Steinberg 1987 (UCRL-MA-106439, water;
- * coefficients from memory) by 0.3 % at 5.5 GPa, 0.7 % at 13 GPa, 1.5 % at 26 GPa, 3 % at 50 GPa (3500 K) and 5 % at
- * 84 GPa (6000 K): test/eos/water/extrapolation.test.ts. Dissociation (above about 2000 K at low pressure) and superionic
- * water (above about 2000 K at 50 GPa) are not in it.
+ * How far the fluid is carried [Pa, K]. IAPWS-95 is calibrated to 1 GPa and 1273 K; beyond, its extrapolation stays smooth
+ * and monotone. On the shock Hugoniot its density differs from the fit of Steinberg 1987 (UCRL-MA-106439, water;
+ * coefficients from memory) by +1.4 % at 1.7 GPa, which is mostly the fit's, +0.4 % at 5.5 GPa, -0.6 % at 13 GPa, -1.4 %
+ * at 26 GPa, -2.9 % at 49 GPa (3400 K) and -6.3 % at 84 GPa (6000 K): test/eos/water/extrapolation.test.ts. Dissociation
+ * (above about 2000 K at low pressure) and superionic water (above about 2000 K at 50 GPa) are not in it.
  */
 export const fluidLimits = {
   calibratedPressure: 1e9,
