@@ -50,12 +50,13 @@ export function meltingTemperature(curve: MeltingCurve, pressure: number): numbe
 }
 
 /**
- * Pressure at which the pure substance melts at a temperature [K], so that it is solid above; the lowest pressure of the
- * curve for anything colder than its beginning.
+ * Pressure at which the pure substance melts at a temperature [K], so that it is solid above; 0 for anything colder
+ * than the beginning of the curve, as if it went on straight down in pressure.
  * Checked test/eos/melting/meltingCurves.test.ts
  */
 export function meltingPressure(curve: MeltingCurve, temperature: number): number {
   const { branches } = curve;
+  if (temperature < meltingTemperature(curve, branches[0].fromPressure)) return 0;
   let i = branches.length - 1;
   while (i > 0 && temperature < meltingTemperature(curve, branches[i].fromPressure)) i--;
   const { fromPressure, temperatureZero, pressureZero, scale, exponent } = branches[i];
