@@ -3,8 +3,8 @@ import { RungeKutta8 } from "../numerics/rungeKutta8.ts";
 import { G } from "../units/constants.ts";
 import { CentralBall } from "./centralBall.ts";
 import type { Planet } from "./planet.ts";
-import { CONTROLLED, STATE_SIZE, StructureEquations } from "./structureEquations.ts";
 import { planetSolver } from "./planetSolver.ts";
+import { CONTROLLED, STATE_SIZE, StructureEquations } from "./structureEquations.ts";
 import { DEFAULT_TOLERANCE } from "./structureSolver.ts";
 import { type Stretch, TrialIntegration } from "./trialIntegration.ts";
 

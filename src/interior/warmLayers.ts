@@ -32,7 +32,7 @@ export class WarmLayers {
     let temperature = this.surfaceTop().temperature;
     for (let i = last - 1; i >= 0; i--) {
       const pressure = topPressures[i];
-      temperature = temperatureAt(resolved[i + 1], pressure, temperature) + (layers[i].temperatureJump ?? 0);
+      temperature = topTemperature(layers[i], temperatureAt(resolved[i + 1], pressure, temperature));
       resolved[i] = warm(composition, layers[i], { pressure, temperature });
     }
     return { ...composition, layers: resolved };
@@ -50,6 +50,11 @@ function warm({ temperature }: Composition, layer: Layer, top: LayerTop): Layer 
   if (temperature === undefined || material.warmed === undefined) return layer;
   const phases: readonly Phase[] = material.warmed(temperature.mode, top.pressure, top.temperature);
   return { ...layer, material: { name: material.name, title: material.title, phases } };
+}
+
+function topTemperature({ heating }: Layer, above: number): number {
+  if (heating === undefined) return above;
+  return "top" in heating ? heating.top : above + heating.jump;
 }
 
 /** Temperature in a resolved layer; one without temperature passes on what it got from above. */

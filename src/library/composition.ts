@@ -6,8 +6,11 @@ export interface Layer {
   readonly name: string;
   readonly material: Material;
   readonly massFraction: number;
-  /** How much hotter its top is than the bottom of the layer above it [K]; 0 where not given. */
-  readonly temperatureJump?: number;
+  /**
+   * At its top [K]: how much hotter than the bottom of the layer above, or how hot. Continuous where absent; of no
+   * account in the outermost layer and in a cold planet.
+   */
+  readonly heating?: { readonly jump: number } | { readonly top: number };
 }
 
 /** What a planet is made of, centre to surface, nested compositions already expanded. */

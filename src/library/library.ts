@@ -6,6 +6,7 @@ import { type Entry, entryOf, isJson, type LibraryFile, siblingPath } from "./li
 import { suggestion } from "./nearest.ts";
 import { readDensityTable } from "./readDensityTable.ts";
 import { resolveLayers } from "./resolveLayers.ts";
+import { resolveTemperature } from "./resolveTemperature.ts";
 import { type CompositionFile, compositionSchema, type MaterialFile, materialSchema } from "./schemas.ts";
 import { validate } from "./validate.ts";
 
@@ -73,7 +74,7 @@ class FileLibrary implements Library {
   }
 
   formKeys(name: string): readonly Readonly<Record<string, number | string>>[] {
-    return this.materialFile(name).phases.map(({ eos }) => eos);
+    return this.materialFile(name).phases?.map(({ eos }) => eos) ?? [];
   }
 
   private materialFile(name: string): MaterialFile {
@@ -147,7 +148,8 @@ class FileLibrary implements Library {
 
 function compositionOf(file: CompositionFile, layers: Composition["layers"]): Composition {
   const { composition: name, title, source, surface = DEFAULT_SURFACE } = file;
-  return { name, title, ...(source && { source }), surface, layers };
+  const temperature = resolveTemperature(file.temperature, layers, surface.temperatureK);
+  return { name, title, ...(source && { source }), surface, layers, ...(temperature && { temperature }) };
 }
 
 /** Runs `action`; an error that does not yet say in which file it arose is given this one, and the key there. */

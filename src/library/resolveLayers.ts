@@ -11,7 +11,7 @@ export interface NameLookup {
 
 /** The layers of a composition file, nested compositions expanded and scaled, empty ones dropped, summing to 1. */
 export function resolveLayers(file: CompositionFile, lookup: NameLookup): Layer[] {
-  const layers = file.layers.flatMap(({ material, mixture, composition, massFraction }, i): Layer[] => {
+  const layers = file.layers.flatMap(({ material, mixture, composition, massFraction, ...heat }, i): Layer[] => {
     const key = `layers[${i}]`;
     if (composition !== undefined) {
       const inner = lookup.composition(composition, `${key}.composition`);
@@ -19,9 +19,14 @@ export function resolveLayers(file: CompositionFile, lookup: NameLookup): Layer[
     }
     const substance =
       material === undefined ? mix(mixture ?? [], key, lookup) : lookup.material(material, `${key}.material`);
-    return [{ name: substance.name, material: substance, massFraction }];
+    return [{ name: substance.name, material: substance, massFraction, ...heating(heat) }];
   });
   return normalised(layers.filter(({ massFraction }) => massFraction > 0));
+}
+
+function heating(keys: { temperatureJumpK?: number; topTemperatureK?: number }): Pick<Layer, "heating"> {
+  if (keys.topTemperatureK !== undefined) return { heating: { top: keys.topTemperatureK } };
+  return keys.temperatureJumpK === undefined ? {} : { heating: { jump: keys.temperatureJumpK } };
 }
 
 function mix(parts: readonly PartEntry[], key: string, lookup: NameLookup): Material {

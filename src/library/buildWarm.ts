@@ -1,0 +1,104 @@
+import type { Material, Phase, TemperatureMode } from "../eos/material.ts";
+import { alongTemperature, isentrope, isotherm } from "../eos/thermal/temperaturePaths.ts";
+import { type TemperaturePath, type WarmPhase, warmStack } from "../eos/thermal/warmStack.ts";
+import { waterAdiabat, waterIsotherm } from "../eos/water/barotrope.ts";
+import { InputError } from "../errors.ts";
+import { GPA } from "../units/constants.ts";
+import { alloyed, buildThermalEos, freezingPressure } from "./buildThermal.ts";
+import { buildCurve } from "./forms.ts";
+import type { PhaseEntry } from "./schemas.ts";
+
+/** Where a warm material is taken when nothing says how warm it is. */
+const ROOM_TEMPERATURE = 300;
+
+/** A material whose phases depend on temperature; cold, it is at room temperature throughout. */
+export function warmMaterial(name: string, title: string, warmPhases: readonly WarmPhase[]): Material {
+  const warmed = (mode: TemperatureMode, topPressure: number, topTemperature: number): readonly Phase[] =>
+    warmStack(warmPhases, pathOf(mode), topPressure, topTemperature);
+  let cold: readonly Phase[] | undefined;
+  return {
+    name,
+    title,
+    get phases() {
+      cold ??= warmed({ kind: "isothermal" }, 0, ROOM_TEMPERATURE);
+      return cold;
+    },
+    warmed,
+  };
+}
+
+function pathOf(mode: TemperatureMode): TemperaturePath {
+  switch (mode.kind) {
+    case "isothermal":
+      return (eos, pressure, temperature) => isotherm(eos, temperature, pressure);
+    case "adiabatic":
+      return isentrope;
+    case "table":
+      return (eos, pressure) =>
+        alongTemperature(eos, mode.temperatureAt, { fromPressure: pressure, kinks: mode.kinks });
+  }
+}
+
+/** A phase of a material file as part of a warm stack; it begins where the phase `before` it ends. */
+export function warmPhase(phase: PhaseEntry, before: PhaseEntry | undefined): WarmPhase {
+  const { phase: name, eos: keys, thermal, alloy, calibratedToGPa = 0, source } = phase;
+  const curve = buildCurve(keys, noTable);
+  if (curve === "bridge" || thermal === undefined) {
+    throw new InputError("thermal-missing", `phase "${name}": a bridge has no temperature.`, { column: "eos" });
+  }
+  const eos = buildThermalEos(curve, keys, thermal);
+  return {
+    name,
+    form: keys.form,
+    eos: alloy === undefined ? eos : alloyed(eos, alloy),
+    stableFrom: endOf(before),
+    calibratedTo: calibratedToGPa * GPA,
+    source,
+  };
+}
+
+/** The pressure [Pa] at which a phase gives way to the next, by temperature [K]. */
+function endOf(phase: PhaseEntry | undefined): (temperature: number) => number {
+  if (phase === undefined) return () => 0;
+  if (phase.untilFreezing) return freezingPressure(phase.untilFreezing);
+  const end = (phase.untilGPa ?? 0) * GPA;
+  const { slopeMPaPerK = 0, atTemperatureK = 0 } = phase.clapeyron ?? {};
+  return (temperature) => end + slopeMPaPerK * 1e6 * (temperature - atTemperatureK);
+}
+
+function noTable(): never {
+  throw new InputError("thermal-table", "a table has no temperature: it cannot stand in a phase with `thermal`.");
+}
+
+/** The highest pressure water is traced to [Pa]; the equations of state of its ices are stretched long before. */
+const DEEPEST_WATER = 2e13;
+/** Cold water without anything above it is ice: a surface at this temperature holds in vacuum [K]. */
+const COLD_ICE = 250;
+
+/** Water with its phases by pressure and temperature. */
+export function waterMaterial(name: string, title: string): Material {
+  const warmed = (mode: TemperatureMode, topPressure: number, topTemperature: number): readonly Phase[] => {
+    switch (mode.kind) {
+      case "isothermal":
+        return waterIsotherm(topTemperature, topPressure, DEEPEST_WATER);
+      case "adiabatic":
+        return waterAdiabat(topPressure, topTemperature, DEEPEST_WATER);
+      case "table":
+        throw new InputError(
+          "temperature-table",
+          `${name}: water follows an isotherm or an adiabat, not a table of temperatures.`,
+          { column: "temperature" },
+        );
+    }
+  };
+  let cold: readonly Phase[] | undefined;
+  return {
+    name,
+    title,
+    get phases() {
+      cold ??= warmed({ kind: "isothermal" }, 0, COLD_ICE);
+      return cold;
+    },
+    warmed,
+  };
+}
