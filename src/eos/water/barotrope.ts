@@ -7,7 +7,7 @@ import { followStretch, type PathPoint, type Stretch } from "./barotropeStretch.
 import { fluidLimits } from "./fluidDensity.ts";
 import { triplePoints, type WaterPhaseName } from "./phaseBoundaries.ts";
 import { requireDiagramTemperature, waterPhase } from "./phaseDiagram.ts";
-import { isFluid, waterPhases } from "./waterPhases.ts";
+import { isFluid, stableWater, waterPhases } from "./waterPhases.ts";
 import { isentropicGradient } from "./waterState.ts";
 import { type PhaseAt, stretchFrom } from "./waterStretches.ts";
 
@@ -16,7 +16,7 @@ const BARE_ICE_PRESSURE = triplePoints.solidLiquidGas.pressure;
 /** A state within this relative distance below a boundary's pressure counts as past it. */
 const ON_BOUNDARY = 1e-12;
 /** Beyond, water dissociates (Pickard, Martinez-Canales & Needs 2013, Phys. Rev. Lett. 110, 245701: 5 TPa) [Pa]. */
-const MAX_PRESSURE = 2e13;
+const WATER_MAX_PRESSURE = 2e13;
 /** More than any path through water has; one that runs along a boundary would cross it for ever. */
 const MAX_STRETCHES = 20;
 
@@ -24,10 +24,15 @@ const MAX_STRETCHES = 20;
  * The phases of water, lowest pressure first, between two pressures [Pa] at one temperature [K].
  * A start at 0 Pa means ice with nothing above it and needs at most 273.16 K.
  * Fluid water ends at 100 GPa or 5000 K, whatever `toPressure` is: the last curve's `maxPressure` says where.
- * Throws  ModelRangeError `water-temperature-range`, `water-pressure-range`, `water-bare-surface`
+ * Throws  ModelRangeError `water-temperature-range`, `water-pressure-range`, `water-bare-surface`, `water-fluid-range`;
+ *         ConvergenceError `water-barotrope` within about 0.1 K of the critical point
  * Checked test/eos/water/barotrope.test.ts
  */
-export function waterIsotherm(temperature: number, fromPressure: number, toPressure: number): WarmStackPhase[] {
+export function waterIsotherm(
+  temperature: number,
+  fromPressure: number,
+  toPressure = WATER_MAX_PRESSURE,
+): WarmStackPhase[] {
   return trace(fromPressure, temperature, toPressure, () => 0);
 }
 
@@ -35,10 +40,14 @@ export function waterIsotherm(temperature: number, fromPressure: number, toPress
  * The phases of water, lowest pressure first, along the adiabat that leaves a pressure [Pa] and temperature [K] downward.
  * Within a phase dT/dP = alpha T / (rho c_p). Where it meets a boundary the next phase starts at the same temperature:
  * in a layer that convects on both sides, the latent heat is carried through the boundary rather than warming the ice, so
- * temperature is continuous and entropy jumps. Ice that would
- * melt again deeper down stays on its melting curve instead, as a phase of its own. Start, limits, throws and checks as for `waterIsotherm`.
+ * temperature is continuous and entropy jumps. Ice that would melt again deeper down stays on its melting curve instead,
+ * as a phase of its own. Start, limits, throws and checks as for `waterIsotherm`.
  */
-export function waterAdiabat(anchorPressure: number, anchorTemperature: number, toPressure: number): WarmStackPhase[] {
+export function waterAdiabat(
+  anchorPressure: number,
+  anchorTemperature: number,
+  toPressure = WATER_MAX_PRESSURE,
+): WarmStackPhase[] {
   return trace(anchorPressure, anchorTemperature, toPressure, isentropicGradient);
 }
 
@@ -52,6 +61,7 @@ function trace(
   requireDiagramTemperature(temperature);
   const phaseAt = phaseFinder(fromPressure);
   if (fromPressure === 0) requireBareIce(phaseAt({ pressure: 0, temperature }), temperature);
+  else stableWater(fromPressure, temperature);
   const phases: WarmStackPhase[] = [];
   let foot: PathPoint = { pressure: fromPressure, temperature };
   while (foot.pressure < toPressure && foot.temperature < fluidLimits.maxTemperature) {
@@ -88,11 +98,11 @@ function warmPhase(stretch: Stretch, curve: WarmCurve, end: PathPoint): WarmStac
 }
 
 function requirePressures(fromPressure: number, toPressure: number): void {
-  if (fromPressure >= 0 && toPressure > fromPressure && toPressure <= MAX_PRESSURE) return;
+  if (fromPressure >= 0 && toPressure > fromPressure && toPressure <= WATER_MAX_PRESSURE) return;
   throw new ModelRangeError(
     "water-pressure-range",
-    `A water layer from ${fromPressure} to ${toPressure} Pa cannot be traced; give 0 <= from < to <= ${MAX_PRESSURE} Pa.`,
-    { quantity: "pressure", value: toPressure, minimum: Math.max(0, fromPressure), maximum: MAX_PRESSURE },
+    `A water layer from ${fromPressure} to ${toPressure} Pa cannot be traced; give 0 <= from < to <= ${WATER_MAX_PRESSURE} Pa.`,
+    { quantity: "pressure", value: toPressure, minimum: Math.max(0, fromPressure), maximum: WATER_MAX_PRESSURE },
   );
 }
 

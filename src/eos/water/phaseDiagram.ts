@@ -17,7 +17,7 @@ export function highPressureMelting(temperature: number): WaterBoundary | undefi
 /**
  * The stable phase of water at a pressure [Pa] and temperature [K]. "ice-VII" stands also for ices VIII and X,
  * "supercritical" for any fluid above both critical values.
- * Valid   50-5000 K; solid-solid lines below 200 K and melting above 715 K are extrapolations, see above
+ * Valid   50-5000 K; solid-solid lines below 200 K and melting above 715 K are extrapolations, see phaseBoundaries.ts
  * Throws  ModelRangeError `water-temperature-range`, `water-pressure-range`
  * Checked known states, triple points: test/eos/water/phaseDiagram.test.ts
  */

@@ -20,8 +20,8 @@ export interface Saturation {
 /** Near the critical point the two phases differ too little for Newton's method in double precision. */
 const CRITICAL_MARGIN = 1e-6;
 const MAX_ITERATIONS = 40;
-/** Relative, in density; divided by the distance to the critical temperature, where round-off grows in that measure. */
-const TOLERANCE = 1e-13;
+/** Last relative step in density (what is left is rounding); divided by the distance to the critical temperature. */
+const TOLERANCE = 1e-11;
 
 /**
  * Liquid and vapour in equilibrium at a temperature [K]: equal pressure and Gibbs energy (Maxwell's construction).

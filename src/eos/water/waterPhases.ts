@@ -77,11 +77,11 @@ export function isFluid(name: WaterPhaseName): boolean {
 
 /**
  * The stable phase of water at a pressure [Pa] and temperature [K], and its state.
- * Throws  as `waterPhase`; ModelRangeError `water-fluid-range` for fluid above 100 GPa, where no form here holds
+ * Throws  as `waterPhase`; ModelRangeError `water-fluid-range` for fluid at 100 GPa or more, where no form here holds
  */
 export function stableWater(pressure: number, temperature: number): WaterState & { readonly phase: WaterPhaseName } {
   const phase = waterPhase(pressure, temperature);
-  if (isFluid(phase) && pressure > fluidLimits.maxPressure) {
+  if (isFluid(phase) && pressure >= fluidLimits.maxPressure) {
     throw new ModelRangeError(
       "water-fluid-range",
       `Water at ${pressure} Pa and ${temperature} K is fluid, and IAPWS-95 is extrapolated to ${fluidLimits.maxPressure} Pa ` +

@@ -117,6 +117,22 @@ describe("adiabats", () => {
     }
   });
 
+  test("from any start the phases follow each other without gaps, slivers or a fall in density", () => {
+    const logs = fc.double({ min: 0, max: 10.5, noNaN: true });
+    const property = fc.property(logs, fc.double({ min: 60, max: 1200, noNaN: true }), (exponent, temperature) => {
+      const phases = waterAdiabat(10 ** exponent, temperature, 200e9);
+      phases.forEach(({ curve, fromPressure, untilPressure }, i) => {
+        expect(curve.maxPressure).toBeGreaterThan(curve.minPressure * (1 + 1e-7));
+        expect(untilPressure).toBe(phases[i + 1]?.fromPressure ?? Number.POSITIVE_INFINITY);
+        if (i === 0) return;
+        const above = phases[i - 1].curve;
+        const [before, after] = [above.density(above.invert(fromPressure)), curve.density(curve.invert(fromPressure))];
+        expect(after).toBeGreaterThan(before * (1 - 1e-9));
+      });
+    });
+    fc.assert(property, { seed: 21, numRuns: 40 });
+  });
+
   test("fluid hotter than 1273 K counts as extrapolated from its top; steam ends at 5000 K", () => {
     const phases = waterAdiabat(1e5, 1000, 100e9);
     const last = phases[phases.length - 1];

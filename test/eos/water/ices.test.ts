@@ -65,9 +65,14 @@ test("the two published forms of ice VI differ as iceVI.ts says", () => {
   expect(ratio(2.216e9)).toBeCloseTo(0.967, 3);
 });
 
-/** Entropy of fusion [J/kg/K] that a melting curve implies at 355 K by Clapeyron's equation. */
-function fusionEntropy(melting: (temperature: number) => number, iceDensity: number, liquidDensity: number): number {
-  const slope = (melting(355.01) - melting(354.99)) / 0.02;
+/** Entropy of fusion [J/kg/K] that a melting curve implies by Clapeyron's equation. */
+function fusionEntropy(
+  melting: (temperature: number) => number,
+  iceDensity: number,
+  liquidDensity: number,
+  temperature = 355,
+): number {
+  const slope = (melting(temperature + 0.01) - melting(temperature - 0.01)) / 0.02;
   return (1 / liquidDensity - 1 / iceDensity) * slope;
 }
 
@@ -82,6 +87,17 @@ test("volumes at the VI-VII-liquid triple point give the VI-VII boundary its slo
   expect(implied(iceVIState(pressure, 355).density) / 1e6).toBeGreaterThan(0);
   expect(implied(iceVIState(pressure, 355).density) / 1e6).toBeLessThan(3);
   expect(implied(tanhState(tanhVolumes.VI, pressure, 355, 1).density) / 1e6).toBeGreaterThan(8);
+});
+
+test.each([
+  [355, 1340],
+  [420, 1470],
+  [650, 5290],
+])("R14-08 implies at %s K a fusion entropy of %s J/kg/K, as meltingCurves.ts says", (temperature, entropy) => {
+  const pressure = meltingPressureVII(temperature);
+  const liquid = fluidDensity(pressure, temperature, "dense");
+  const found = fusionEntropy(meltingPressureVII, iceVIIState(pressure, temperature).density, liquid, temperature);
+  expectClose(found, entropy, { rel: 0.01, because: "three digits" });
 });
 
 // Birch-Murnaghan with the parameters of Hemley et al. 1987, computed independently (SciPy).

@@ -39,6 +39,11 @@ test("both phases have one pressure and one Gibbs energy, up to 6 mK below the c
   }
 });
 
+test("the balance is found at every temperature", () => {
+  for (let i = 0; i <= 1000; i++)
+    expect(saturation(248.15 + (i / 1000) * (647.096 - 248.15)).pressure).toBeGreaterThan(0);
+});
+
 test.each([240, 647.1, Number.NaN])("no equilibrium at %s K", (temperature) => {
   expect(() => saturation(temperature)).toThrow(ModelRangeError);
 });
