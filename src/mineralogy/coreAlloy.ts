@@ -1,5 +1,4 @@
-import { scaledEos } from "../eos/thermal/scaledEos.ts";
-import { type MixturePart, thermalMixture } from "../eos/thermal/thermalMixture.ts";
+import { type MixturePart, scaledEos, thermalMixture } from "../eos/thermal/thermalMixture.ts";
 import type { ThermalEos } from "../eos/thermal/thermalState.ts";
 import { InputError } from "../errors.ts";
 import { molarMass } from "./formula.ts";

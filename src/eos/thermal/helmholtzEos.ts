@@ -1,14 +1,12 @@
 import { ConvergenceError, ModelRangeError } from "../../errors.ts";
 import type { EosCurve } from "../curve.ts";
 import { checkPressure } from "../range.ts";
-import { stateFromHelmholtz, type ThermalEos, type ThermalState } from "./thermalState.ts";
+import { type Member, stateFromHelmholtz, type ThermalEos, type ThermalState } from "./thermalState.ts";
 import type { HelmholtzState } from "./thermalTerm.ts";
 
 const MAX_ITERATIONS = 60;
 /** The iteration converges quadratically: a step this small leaves an error near rounding level. */
 const LAST_STEP = 1e-7;
-/** dK/dP of a typical solid, so that a step follows K = K0 + 4 P (Murnaghan) and not a straight line. */
-const STIFFENING = 4;
 
 /**
  * A single phase: its pressure and entropy are explicit in the coordinate y of a reference curve and temperature, so
@@ -18,6 +16,7 @@ const STIFFENING = 4;
 export abstract class HelmholtzEos implements ThermalEos {
   /** The curve the phase follows at its reference: an isotherm or an isentrope. */
   readonly reference: EosCurve;
+  readonly members: readonly Member[] = [{ phase: this, amount: 1 }];
   readonly minPressure: number;
   readonly maxPressure: number;
   private readonly slopes = new Float64Array(4);
@@ -44,8 +43,7 @@ export abstract class HelmholtzEos implements ThermalEos {
     for (let i = 0; i < MAX_ITERATIONS; i++) {
       const state = this.helmholtz(y, temperature);
       if (!(state.bulkModulus > 0)) throw unstable(pressure, temperature);
-      const logDensityStep = murnaghanStep((pressure - state.pressure) / state.bulkModulus);
-      const step = logDensityStep / this.logDensitySlope(y);
+      const step = this.step(y, pressure - state.pressure, state.bulkModulus);
       y += step;
       if (!(y > 0)) throw unstable(pressure, temperature);
       if (Math.abs(step) <= LAST_STEP * y) {
@@ -55,10 +53,10 @@ export abstract class HelmholtzEos implements ThermalEos {
     throw new ConvergenceError("thermal-density", `No density found at ${pressure} Pa and ${temperature} K.`);
   }
 
-  /** d ln ρ / dy of the reference curve. */
-  protected logDensitySlope(y: number): number {
+  /** Change of y that raises the pressure by `excess` where the bulk modulus is K. */
+  step(y: number, excess: number, bulkModulus: number): number {
     this.reference.slopes(y, this.slopes);
-    return this.slopes[2];
+    return murnaghanStep(excess / bulkModulus) / this.slopes[2];
   }
 
   /** Bulk modulus dP / d ln ρ along the reference curve [Pa]. */
@@ -68,12 +66,16 @@ export abstract class HelmholtzEos implements ThermalEos {
   }
 }
 
+/** dK/dP of a typical solid, so that a step follows K = K0 + 4 P (Murnaghan) and not a straight line. */
+const STIFFENING = 4;
+
 /** Change of ln ρ that raises the pressure by `excess` bulk moduli; linear where Murnaghan's curve has no such pressure. */
 function murnaghanStep(excess: number): number {
   return excess > -1 / (2 * STIFFENING) ? Math.log1p(STIFFENING * excess) / STIFFENING : excess;
 }
 
-function unstable(pressure: number, temperature: number): ModelRangeError {
+/** The error for a pressure and temperature at which a phase cannot hold together. */
+export function unstable(pressure: number, temperature: number): ModelRangeError {
   return new ModelRangeError(
     "thermal-unstable",
     `At ${pressure} Pa and ${temperature} K the phase has no state with a positive bulk modulus: it would expand without limit. Lower the temperature or use another phase there.`,

@@ -1,15 +1,11 @@
-import { ConvergenceError, ModelRangeError } from "../../errors.ts";
+import { ModelRangeError } from "../../errors.ts";
+import { isentropicState } from "./isentropicState.ts";
 import { IsothermBasedEos } from "./isothermBasedEos.ts";
 import type { ThermalEos, ThermalState } from "./thermalState.ts";
-import { type Path, PathCurve, type PathPoint, type WarmCurve } from "./warmCurve.ts";
-
-const MAX_ITERATIONS = 60;
-/** Newton in ln T: after a step this small the density is carried along it to first order, with an error of its square. */
-const LAST_STEP = 1e-6;
+import { type Path, PathCurve, type WarmCurve } from "./warmCurve.ts";
 
 /**
  * The curve of constant entropy through an anchor, which serves as an adiabat of a well-mixed layer.
- * Formula S(P, T) = S(P_a, T_a), solved for T at every pressure sampled
  * Units   Pa, K
  * Throws  ModelRangeError as `ThermalEos.at`, for the anchor
  * Checked test/eos/thermal/temperaturePaths.test.ts
@@ -17,19 +13,13 @@ const LAST_STEP = 1e-6;
 export function isentrope(eos: ThermalEos, anchorPressure: number, anchorTemperature: number): WarmCurve {
   const anchor = eos.at(anchorPressure, anchorTemperature);
   const scale = pressureScale(anchor, anchorPressure);
-  const start: PathPoint = { pressure: anchorPressure, density: anchor.density, temperature: anchorTemperature };
-  const path: Path = (pressure, near = start) => {
+  const { members } = eos;
+  const path: Path = (pressure, near) => {
     // First guess: d ln T/dP = γ/K with constant γ and K = 4 (P + P*).
-    let temperature = near.temperature * ((pressure + scale) / (near.pressure + scale)) ** (anchor.gruneisen / 4);
-    for (let i = 0; i < MAX_ITERATIONS; i++) {
-      const state = eos.at(pressure, temperature);
-      const step = (anchor.entropy - state.entropy) / state.heatCapacityP;
-      temperature *= Math.exp(step);
-      if (Math.abs(step) < LAST_STEP) {
-        return { pressure, density: state.density * (1 - state.expansivity * temperature * step), temperature };
-      }
-    }
-    throw new ConvergenceError("isentrope", `No temperature found on the isentrope at ${pressure} Pa.`, temperature);
+    const stiffening = (pressure + scale) / ((near?.pressure ?? anchorPressure) + scale);
+    const temperature = (near?.temperature ?? anchorTemperature) * stiffening ** (anchor.gruneisen / 4);
+    const coordinates = near?.coordinates ?? members.map(({ phase }) => phase.reference.invert(pressure));
+    return { pressure, ...isentropicState(members, pressure, anchor.entropy, { temperature, coordinates }) };
   };
   return pathCurve(eos, path, anchorPressure, scale);
 }

@@ -1,4 +1,5 @@
-import type { ThermalEos, ThermalState } from "./thermalState.ts";
+import type { HelmholtzEos } from "./helmholtzEos.ts";
+import type { Member, ThermalEos, ThermalState } from "./thermalState.ts";
 
 export interface MixturePart {
   readonly eos: ThermalEos;
@@ -12,23 +13,47 @@ export interface MixturePart {
  * Checked test/eos/thermal/thermalMixture.test.ts
  */
 export function thermalMixture(parts: readonly MixturePart[]): ThermalEos {
-  if (parts.length === 1) return parts[0].eos;
+  if (parts.length === 1 && parts[0].massFraction === 1) return parts[0].eos;
+  return sumOf(mergeMembers(parts.map(({ eos, massFraction }) => ({ eos, amount: massFraction }))));
+}
+
+/**
+ * The same crystal or liquid with other atoms on the same sites: density times `factor` at every pressure and
+ * temperature, properties per atom unchanged. Bulk modulus, expansivity, γ and the adiabatic gradient stay; entropy and
+ * heat capacity per kilogram go down with the mass of the atoms.
+ * Checked test/mineralogy/coreAlloy.test.ts
+ */
+export function scaledEos(eos: ThermalEos, factor: number): ThermalEos {
+  return sumOf(mergeMembers([{ eos, amount: 1 / factor }]));
+}
+
+/** Each phase once, however often it occurs among the parts. */
+function mergeMembers(parts: readonly { eos: ThermalEos; amount: number }[]): Member[] {
+  const amounts = new Map<HelmholtzEos, number>();
+  for (const { eos, amount: share } of parts) {
+    for (const { phase, amount } of eos.members) amounts.set(phase, (amounts.get(phase) ?? 0) + share * amount);
+  }
+  return Array.from(amounts, ([phase, amount]) => ({ phase, amount }));
+}
+
+function sumOf(members: readonly Member[]): ThermalEos {
   return {
-    maxPressure: Math.min(...parts.map((part) => part.eos.maxPressure)),
+    members,
+    maxPressure: Math.min(...members.map(({ phase }) => phase.maxPressure)),
     at(pressure, temperature) {
       let volume = 0;
       let entropy = 0;
       let expansion = 0;
       let compliance = 0;
       let heatCapacityP = 0;
-      for (const { eos, massFraction } of parts) {
-        const state = eos.at(pressure, temperature);
-        const partVolume = massFraction / state.density;
+      for (const { phase, amount } of members) {
+        const state = phase.at(pressure, temperature);
+        const partVolume = amount / state.density;
         volume += partVolume;
-        entropy += massFraction * state.entropy;
+        entropy += amount * state.entropy;
         expansion += partVolume * state.expansivity;
         compliance += partVolume / state.bulkModulusT;
-        heatCapacityP += massFraction * state.heatCapacityP;
+        heatCapacityP += amount * state.heatCapacityP;
       }
       return stateFromGibbs({ volume, entropy, expansion, compliance, heatCapacityP }, temperature);
     },

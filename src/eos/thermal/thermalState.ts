@@ -1,3 +1,4 @@
+import type { HelmholtzEos } from "./helmholtzEos.ts";
 import type { HelmholtzState } from "./thermalTerm.ts";
 
 /** Everything a planet model asks of a substance at one pressure and temperature. SI, per kilogram. */
@@ -16,8 +17,9 @@ export interface ThermalState {
   readonly adiabaticGradient: number;
 }
 
-/** A substance with temperature. */
+/** A substance with temperature: one phase, or several whose volumes and entropies add. */
 export interface ThermalEos {
+  readonly members: readonly Member[];
   /** Pressure beyond which the form breaks, at the reference temperature and so at any higher one [Pa]. */
   readonly maxPressure: number;
   /**
@@ -25,6 +27,13 @@ export interface ThermalEos {
    * `eos-pressure-range` beyond the cold curve, `temperature-range` unless the temperature is positive.
    */
   at(pressure: number, temperature: number): ThermalState;
+}
+
+/** A phase and how much of it makes up one kilogram of the substance. */
+export interface Member {
+  readonly phase: HelmholtzEos;
+  /** [kg/kg]; the amounts need not sum to 1 where one substance stands in for atoms of another mass. */
+  readonly amount: number;
 }
 
 /**

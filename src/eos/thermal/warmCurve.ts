@@ -14,11 +14,18 @@ export interface PathPoint {
   readonly pressure: number;
   readonly density: number;
   readonly temperature: number;
+  /** Where a search for a neighbour may start, if the path keeps such a thing. */
+  readonly coordinates?: readonly number[];
 }
 
 /** y = (1 + P/P*)^(1/12) grows like the cube root of density where the bulk modulus grows as 4 (P + P*). */
 const EXPONENT = 12;
-const CELL_WIDTH = 0.02;
+/**
+ * Paths are the less smooth the nearer they are to y = 0.9 or so, where a hot phase would fly apart: cells grow in
+ * proportion to the distance from there.
+ */
+const WALL = 0.9;
+const CELL_GROWTH = 0.2;
 const DEGREE = 8;
 /** Allowed size of the last coefficients of ln ρ; a piece that has larger ones is halved, this often at most. */
 const TOLERANCE = 1e-9;
@@ -54,7 +61,7 @@ export class PathCurve implements WarmCurve {
   private readonly scale: number;
   private readonly lowest: number;
   private readonly highest: number;
-  /** Left edge of cell 0. */
+  /** Left edge of cell 0, in cells from y = WALL + 1. */
   private readonly origin: number;
   private readonly kinks: readonly number[];
   private readonly pieces: Piece[] = [];
@@ -79,8 +86,8 @@ export class PathCurve implements WarmCurve {
     this.lowest = this.invert(options.minPressure);
     this.highest = this.invert(options.maxPressure);
     // A quarter of a cell to spare, for trial steps that fall short of the start; whole cells down to the lowest y.
-    const first = this.invert(options.startPressure) - CELL_WIDTH / 4;
-    this.origin = first - CELL_WIDTH * Math.max(Math.ceil((first - this.lowest) / CELL_WIDTH), 0);
+    const first = inCells(this.invert(options.startPressure)) - 0.25;
+    this.origin = first - Math.max(Math.ceil(first - inCells(this.lowest)), 0);
     this.kinks = (options.kinks ?? []).map((pressure) => this.invert(pressure));
   }
 
@@ -149,17 +156,17 @@ export class PathCurve implements WarmCurve {
     return Math.min(Math.max(this.pressure(y), this.minPressure), this.maxPressure);
   }
 
-  /** Cells of equal width, further divided at kinks; cell number plus kinks passed numbers the pieces uniquely. */
+  /** Cells are further divided at kinks; cell number plus kinks passed numbers the pieces uniquely. */
   private pieceAt(y: number): Polynomials {
     // Steps that overshoot the lowest pressure see the lowest piece continued.
     const inside = Math.max(y, this.lowest);
-    const cell = Math.floor((inside - this.origin) / CELL_WIDTH);
+    const cell = Math.floor(inCells(inside) - this.origin);
     let passed = 0;
     while (passed < this.kinks.length && this.kinks[passed] <= inside) passed++;
     const index = cell + passed;
     this.pieces[index] ??= this.makePiece(
-      Math.max(this.origin + cell * CELL_WIDTH, this.kinks[passed - 1] ?? 0, this.lowest),
-      Math.min(this.origin + (cell + 1) * CELL_WIDTH, this.kinks[passed] ?? Number.POSITIVE_INFINITY, this.highest),
+      Math.max(fromCells(this.origin + cell), this.kinks[passed - 1] ?? 0, this.lowest),
+      Math.min(fromCells(this.origin + cell + 1), this.kinks[passed] ?? Number.POSITIVE_INFINITY, this.highest),
       MAX_HALVINGS,
     );
     let piece = this.pieces[index];
@@ -182,4 +189,12 @@ export class PathCurve implements WarmCurve {
     }
     return { logDensity, temperature: through(points.map((point) => point.temperature)) };
   }
+}
+
+function inCells(y: number): number {
+  return Math.log(y - WALL) / CELL_GROWTH;
+}
+
+function fromCells(cells: number): number {
+  return WALL + Math.exp(cells * CELL_GROWTH);
 }
