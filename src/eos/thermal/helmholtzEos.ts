@@ -1,7 +1,7 @@
 import { ConvergenceError, ModelRangeError } from "../../errors.ts";
 import type { EosCurve } from "../curve.ts";
 import { checkPressure } from "../range.ts";
-import { type Member, stateFromHelmholtz, type ThermalEos, type ThermalState } from "./thermalState.ts";
+import { type Member, stateFromHelmholtz, type ThermalPhase, type ThermalState } from "./thermalState.ts";
 import type { HelmholtzState } from "./thermalTerm.ts";
 
 const MAX_ITERATIONS = 60;
@@ -13,8 +13,7 @@ const LAST_STEP = 1e-7;
  * only density at a given pressure has to be found.
  * Checked test/eos/thermal/isothermBasedEos.test.ts
  */
-export abstract class HelmholtzEos implements ThermalEos {
-  /** The curve the phase follows at its reference: an isotherm or an isentrope. */
+export abstract class HelmholtzEos implements ThermalPhase {
   readonly reference: EosCurve;
   readonly members: readonly Member[] = [{ phase: this, amount: 1 }];
   readonly minPressure: number;
@@ -27,7 +26,6 @@ export abstract class HelmholtzEos implements ThermalEos {
     this.maxPressure = maxPressure;
   }
 
-  /** Derivatives of the Helmholtz energy at a coordinate of the reference curve and a temperature [K]. */
   abstract helmholtz(y: number, temperature: number): HelmholtzState;
 
   at(pressure: number, temperature: number): ThermalState {
@@ -53,7 +51,6 @@ export abstract class HelmholtzEos implements ThermalEos {
     throw new ConvergenceError("thermal-density", `No density found at ${pressure} Pa and ${temperature} K.`);
   }
 
-  /** Change of y that raises the pressure by `excess` where the bulk modulus is K. */
   step(y: number, excess: number, bulkModulus: number): number {
     this.reference.slopes(y, this.slopes);
     return murnaghanStep(excess / bulkModulus) / this.slopes[2];

@@ -1,5 +1,4 @@
-import type { HelmholtzEos } from "./helmholtzEos.ts";
-import type { Member, ThermalEos, ThermalState } from "./thermalState.ts";
+import type { Member, ThermalEos, ThermalPhase, ThermalState } from "./thermalState.ts";
 
 export interface MixturePart {
   readonly eos: ThermalEos;
@@ -29,7 +28,7 @@ export function scaledEos(eos: ThermalEos, factor: number): ThermalEos {
 
 /** Each phase once, however often it occurs among the parts. */
 function mergeMembers(parts: readonly { eos: ThermalEos; amount: number }[]): Member[] {
-  const amounts = new Map<HelmholtzEos, number>();
+  const amounts = new Map<ThermalPhase, number>();
   for (const { eos, amount: share } of parts) {
     for (const { phase, amount } of eos.members) amounts.set(phase, (amounts.get(phase) ?? 0) + share * amount);
   }

@@ -1,4 +1,4 @@
-import type { HelmholtzEos } from "./helmholtzEos.ts";
+import type { EosCurve } from "../curve.ts";
 import type { HelmholtzState } from "./thermalTerm.ts";
 
 /** Everything a planet model asks of a substance at one pressure and temperature. SI, per kilogram. */
@@ -29,9 +29,19 @@ export interface ThermalEos {
   at(pressure: number, temperature: number): ThermalState;
 }
 
+/** A single phase, explicit in the coordinate y of a reference curve and temperature. */
+export interface ThermalPhase extends ThermalEos {
+  /** The curve the phase follows at its reference: an isotherm or an isentrope. */
+  readonly reference: EosCurve;
+  /** Derivatives of the Helmholtz energy at y and a temperature [K]. */
+  helmholtz(y: number, temperature: number): HelmholtzState;
+  /** Change of y that raises the pressure by `excess` [Pa] where the bulk modulus is K, at constant temperature. */
+  step(y: number, excess: number, bulkModulus: number): number;
+}
+
 /** A phase and how much of it makes up one kilogram of the substance. */
 export interface Member {
-  readonly phase: HelmholtzEos;
+  readonly phase: ThermalPhase;
   /** [kg/kg]; the amounts need not sum to 1 where one substance stands in for atoms of another mass. */
   readonly amount: number;
 }
