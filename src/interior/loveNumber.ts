@@ -1,6 +1,6 @@
 import { type DensityTable, integrateDensityTable } from "./densityTable.ts";
 
-/** Longest Runge–Kutta step in ln r, and where the first shell is entered, as a share of its outer radius. */
+/** Longest Runge–Kutta step in ln r, and where the innermost shell is entered, as a share of its outer radius. */
 const LONGEST_STEP = 0.02;
 const ENTRANCE = 1e-4;
 
@@ -41,10 +41,9 @@ function crossShell({ inner, outer }: { inner: Row; outer: Row }, etaInside: num
     const meanDensity = (offset + massIntegral(r)) / ((4 / 3) * Math.PI * r ** 3);
     return 6 + eta - eta * eta - 6 * ((intercept + slope * r) / meanDensity) * (eta + 1);
   };
-  const atCentre = inner.radius === 0;
-  const start = atCentre ? ENTRANCE * outer.radius : inner.radius;
-  // Near the centre η = -(r/4) dρ/dr / ρ, the regular solution.
-  let eta = atCentre ? (-slope * start) / (4 * intercept) : etaInside;
+  // Close to the centre η is nearly 0, and what is missed there fades as r^-5.
+  const start = Math.max(inner.radius, ENTRANCE * outer.radius);
+  let eta = etaInside;
   const span = Math.log(outer.radius / start);
   const steps = Math.ceil(span / LONGEST_STEP);
   const h = span / steps;

@@ -38,6 +38,16 @@ describe("liquid iron", () => {
     expectClose(state.bulkModulusS, 109.7 * GPA, { rel: 1e-4, because: "1 bar above zero pressure" });
   });
 
+  it("has the bulk modulus of its own density away from the isentrope", () => {
+    const [pressure, temperature, dP] = [200 * GPA, 6000, 1e8];
+    const density = (p: number): number => liquid.at(p, temperature).density;
+    expectClose(
+      liquid.at(pressure, temperature).bulkModulusT,
+      (2 * dP) / Math.log(density(pressure + dP) / density(pressure - dP)),
+      { rel: 1e-6, because: "central differences" },
+    );
+  });
+
   it("obeys Maxwell's relation away from the isentrope", () => {
     const [pressure, temperature, dP, dT] = [200 * GPA, 6000, 1e7, 0.5];
     const volume = (t: number): number => 1 / liquid.at(pressure, t).density;

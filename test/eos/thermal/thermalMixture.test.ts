@@ -53,6 +53,18 @@ describe("thermalMixture", () => {
     });
   });
 
+  it("of a phase with itself is that phase", () => {
+    const halves = thermalMixture([
+      { eos: ironFei, massFraction: 0.5 },
+      { eos: ironFei, massFraction: 0.5 },
+    ]);
+    expect(halves.members).toHaveLength(1);
+    const [sum, phase] = [halves.at(pressure, temperature), ironFei.at(pressure, temperature)];
+    for (const key of Object.keys(phase) as (keyof typeof phase)[]) {
+      expectClose(sum[key], phase[key], { rel: 1e-13, because: `identity of ${key}` });
+    }
+  });
+
   it("reaches as far as the first of its parts to break", () => {
     expect(mixture.maxPressure).toBe(Math.min(...parts.map(({ eos }) => eos.maxPressure)));
   });
