@@ -20,14 +20,14 @@ export interface GruneisenLaw {
  * Finite-strain law.
  * Formula θ² = θ0² (1 + a1 f + a2 f²/2), f = ((V/V0)^(-2/3) - 1)/2, a1 = 6γ0, a2 = -12γ0 + 36γ0² - 18 q0 γ0
  * Source  Stixrude & Lithgow-Bertelloni 2005, Geophys. J. Int. 162, 610, equations 24-28
- * Range   until θ² falls to 0, which it does where a2 < 0
+ * Range   until γ falls to 0, which it does where a2 < 0; beyond, heating would contract
  * Checked test/eos/thermal/gruneisenLaw.test.ts
  */
 export function finiteStrainGruneisen(gammaZero: number, qZero: number): GruneisenLaw {
   const a1 = 6 * gammaZero;
   const a2 = -12 * gammaZero + 36 * gammaZero ** 2 - 18 * qZero * gammaZero;
   return {
-    maxCompression: a2 < 0 ? (1 + (2 * (-a1 - Math.sqrt(a1 * a1 - 2 * a2))) / a2) ** 1.5 : Number.POSITIVE_INFINITY,
+    maxCompression: a1 > 0 && a2 < 0 ? (1 - (2 * a1) / a2) ** 1.5 : Number.POSITIVE_INFINITY,
     at(volumeRatio) {
       const stretch = volumeRatio ** (-2 / 3);
       const strain = (stretch - 1) / 2;

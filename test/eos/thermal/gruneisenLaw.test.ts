@@ -31,10 +31,11 @@ describe.each(laws)("Grüneisen law: %s", (_, law, qZero) => {
 });
 
 describe("finiteStrainGruneisen", () => {
-  it("knows where θ² falls to zero", () => {
+  it("ends where γ falls to zero", () => {
     const law = finiteStrainGruneisen(1.06023, 3.6466);
-    expect(law.at(1.001 / law.maxCompression).debyeRatio).toBeGreaterThan(0);
-    expect(law.at(0.999 / law.maxCompression).debyeRatio).toBeNaN();
+    expect(law.at(1.001 / law.maxCompression).gamma).toBeGreaterThan(0);
+    expect(law.at(0.999 / law.maxCompression).gamma).toBeLessThan(0);
     expect(finiteStrainGruneisen(1.56508, 1.10945).maxCompression).toBe(Number.POSITIVE_INFINITY);
+    expect(finiteStrainGruneisen(-0.00296, 1).maxCompression).toBe(Number.POSITIVE_INFINITY);
   });
 });
