@@ -1,4 +1,5 @@
-import { boundaryPressure, mantleBoundaries } from "../eos/melting/phaseBoundaries.ts";
+import { boundaryPressure, mantleBoundaries, postPerovskiteDissociation } from "../eos/melting/phaseBoundaries.ts";
+import { GPA } from "../units/constants.ts";
 import type { EndMember } from "./endMember.ts";
 import { endMembers } from "./endMembers.ts";
 import { ironAnalogues } from "./ironAnalogues.ts";
@@ -18,6 +19,8 @@ export interface MantleDomain {
   readonly silica: EndMember;
   /** Pressure at which the domain begins [Pa], at a temperature [K]. */
   readonly stableFrom: (temperature: number) => number;
+  /** What a user of the domain should know. */
+  readonly remark?: string;
 }
 
 const { forsterite, fayalite, mgWadsleyite, mgRingwoodite, feRingwoodite, enstatite, mgMajorite } = endMembers;
@@ -71,5 +74,6 @@ export const mantleDomains: readonly MantleDomain[] = [
     oxide,
     silica: seifertite,
     stableFrom: (temperature) => boundaryPressure(mantleBoundaries.bridgmaniteToPostPerovskite, temperature),
+    remark: `post-perovskite decomposes from ${postPerovskiteDissociation.toMgSi2O5 / GPA} GPa (Umemoto & Wentzcovitch 2011) and stands in for its products there`,
   },
 ];

@@ -22,7 +22,9 @@ export function mantlePhases(composition: MantleComposition): WarmPhase[] {
     calibratedTo: CALIBRATED_TO,
     source: {
       citation: minerals[0].endMember.source.citation,
-      note: `minerals by mass balance: ${minerals.map(({ endMember }) => endMember.name).join(", ")}`,
+      note: [`minerals by mass balance: ${minerals.map(({ endMember }) => endMember.name).join(", ")}`, domain.remark]
+        .filter((part) => part !== undefined)
+        .join("; "),
     },
   }));
 }

@@ -39,4 +39,9 @@ describe("a mantle of the Earth's composition on a 1600 K adiabat", () => {
     // Brown & Shankland 1981, Geophys. J. R. astr. Soc. 66, 579: about 2450 K at the base from 1600 K (from memory).
     expectClose(at(130 * GPA).temperature, 2450, { rel: 0.06, because: "no latent heat, other minerals" });
   });
+
+  it("says what is in each domain, and where post-perovskite is no more", () => {
+    expect(stack[0].source.note).toMatch(/forsterite, fayalite, enstatite/);
+    expect(stack[4].source.note).toMatch(/900 GPa/);
+  });
 });

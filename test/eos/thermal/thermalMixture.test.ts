@@ -1,4 +1,6 @@
 import { describe, expect, it } from "vitest";
+import { mixCurves } from "../../../src/eos/mixCurves.ts";
+import { isotherm } from "../../../src/eos/thermal/temperaturePaths.ts";
 import { thermalMixture } from "../../../src/eos/thermal/thermalMixture.ts";
 import { GPA } from "../../../src/units/constants.ts";
 import { expectClose } from "../../support/expectClose.ts";
@@ -62,6 +64,19 @@ describe("thermalMixture", () => {
     const [sum, phase] = [halves.at(pressure, temperature), ironFei.at(pressure, temperature)];
     for (const key of Object.keys(phase) as (keyof typeof phase)[]) {
       expectClose(sum[key], phase[key], { rel: 1e-13, because: `identity of ${key}` });
+    }
+  });
+
+  it("is the cold mixture of its cold curves at 300 K", () => {
+    const rocks = parts.slice(0, 2).map(({ eos }, i) => ({ eos, massFraction: [0.6, 0.4][i] }));
+    const warm = isotherm(thermalMixture(rocks), 300);
+    const cold = mixCurves(rocks.map(({ eos, massFraction }) => ({ curve: eos.reference, massFraction })));
+    for (const gpa of [0, 0.1, 5, 30, 130, 400]) {
+      const pressure = gpa * GPA;
+      expectClose(warm.density(warm.coordinate(pressure)), cold.density(cold.coordinate(pressure)), {
+        rel: 1e-10,
+        because: "polynomial pieces",
+      });
     }
   });
 
