@@ -1,6 +1,6 @@
 import type { EosCurve } from "../eos/curve.ts";
 import { meltingCurves } from "../eos/melting/meltingCurves.ts";
-import { meltingDepression, meltingPressure } from "../eos/melting/meltingTemperature.ts";
+import { type MeltingCurve, meltingDepression, meltingPressure } from "../eos/melting/meltingTemperature.ts";
 import {
   altshulerGruneisen,
   finiteStrainGruneisen,
@@ -78,9 +78,13 @@ export function alloyed(iron: ThermalEos, keys: AlloyKeys): ThermalEos {
   return coreAlloyEos(iron, { kind: "elements", nickel, sulphur, silicon, oxygen });
 }
 
+const curvesByName: Readonly<Record<string, MeltingCurve>> = Object.fromEntries(
+  Object.values(meltingCurves).map((curve) => [curve.name, curve]),
+);
+
 /** Pressure [Pa] at which a liquid freezes, as a function of temperature [K]. */
 export function freezingPressure({ curve, ironMoleFraction = 1 }: FreezingKeys): (temperature: number) => number {
-  const melting = Object.values(meltingCurves).find(({ name }) => name === curve) ?? meltingCurves.ironAnzellini;
+  const melting = curvesByName[curve];
   const depression = meltingDepression(ironMoleFraction);
   return (temperature) => meltingPressure(melting, temperature / depression);
 }

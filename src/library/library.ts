@@ -5,7 +5,7 @@ import type { Composition } from "./composition.ts";
 import { type Entry, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
 import { suggestion } from "./nearest.ts";
 import { readDensityTable } from "./readDensityTable.ts";
-import { resolveLayers } from "./resolveLayers.ts";
+import { type NameLookup, resolveLayers } from "./resolveLayers.ts";
 import { resolveTemperature } from "./resolveTemperature.ts";
 import { type CompositionFile, compositionSchema, type MaterialFile, materialSchema } from "./schemas.ts";
 import { validate } from "./validate.ts";
@@ -128,11 +128,11 @@ class FileLibrary implements Library {
     }
     const { value: file, problems } = validate(compositionSchema, path, content);
     if (problems) throw problems[0];
-    const layers = resolveLayers(file, {
+    const lookup: NameLookup = {
       material: (wanted, key) => inFile(path, () => this.material(wanted), key),
       composition: (wanted, key) => inFile(path, () => this.resolve(wanted, chain), key),
-    });
-    return compositionOf(file, layers);
+    };
+    return inFile(path, () => compositionOf(file, resolveLayers(file, lookup)));
   }
 
   private table(materialPath: string, name: string): ReturnType<typeof readDensityTable> {

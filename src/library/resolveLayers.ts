@@ -1,5 +1,6 @@
 import type { Material } from "../eos/material.ts";
 import { mixMaterials } from "../eos/mixMaterials.ts";
+import { InputError } from "../errors.ts";
 import type { Composition, Layer } from "./composition.ts";
 import type { CompositionFile, PartEntry } from "./schemas.ts";
 
@@ -15,7 +16,11 @@ export function resolveLayers(file: CompositionFile, lookup: NameLookup): Layer[
     const key = `layers[${i}]`;
     if (composition !== undefined) {
       const inner = lookup.composition(composition, `${key}.composition`);
-      return inner.layers.map((layer) => ({ ...layer, massFraction: layer.massFraction * massFraction }));
+      return inner.layers.map((layer, j) => ({
+        ...layer,
+        massFraction: layer.massFraction * massFraction,
+        ...(j === inner.layers.length - 1 && heating(heat)),
+      }));
     }
     const substance =
       material === undefined ? mix(mixture ?? [], key, lookup) : lookup.material(material, `${key}.material`);
@@ -34,7 +39,17 @@ function mix(parts: readonly PartEntry[], key: string, lookup: NameLookup): Mate
     material: lookup.material(material, `${key}.mixture[${i}].material`),
     massFraction,
   }));
-  return mixMaterials(normalised(resolved.filter(({ massFraction }) => massFraction > 0)));
+  const present = resolved.filter(({ massFraction }) => massFraction > 0);
+  const warm = present.find(({ material }) => material.warmed);
+  if (present.length > 1 && warm) {
+    throw new InputError(
+      "mixture-temperature",
+      `${key}.mixture: "${warm.material.name}" depends on temperature, and a mixture has none here; ` +
+        "give its parts as layers, or use materials without temperature.",
+      { column: `${key}.mixture`, found: warm.material.name },
+    );
+  }
+  return mixMaterials(normalised(present));
 }
 
 /** Beyond what adding a few fractions in binary loses. */

@@ -8,13 +8,14 @@ type Temperature = NonNullable<Composition["temperature"]>;
 /**
  * The temperature of a composition file. Without one a planet is cold, unless a material exists only with temperature
  * (rock by its minerals, water): then all is as warm as the surface.
- * Throws InputError `temperature-table`
+ * Throws InputError `temperature-table`; `temperature-unused` for the temperature of a layer that nothing would heed
  */
 export function resolveTemperature(
   keys: CompositionFile["temperature"],
   layers: Composition["layers"],
   surfaceTemperature: number,
 ): Temperature | undefined {
+  requireHeed(keys, layers);
   if (keys === undefined) {
     const warm = layers.some(({ material }) => material.warmed);
     return warm ? { mode: { kind: "isothermal" }, top: surfaceTemperature } : undefined;
@@ -30,6 +31,21 @@ export function resolveTemperature(
         keys.temperatureK,
       );
   }
+}
+
+function requireHeed(keys: CompositionFile["temperature"], layers: Composition["layers"]): void {
+  const heated = layers.findIndex(({ heating }) => heating !== undefined);
+  if (heated === -1) return;
+  const refuse = (reason: string): never => {
+    throw new InputError(
+      "temperature-unused",
+      `layer ${heated + 1} from the centre, ${layers[heated].name}, has "temperatureJumpK" or "topTemperatureK", but ${reason}`,
+      { column: "layers" },
+    );
+  };
+  if (keys === undefined) refuse('the composition has no "temperature".');
+  if (keys?.mode === "table") refuse("a table gives the temperature at every pressure.");
+  if (layers[layers.length - 1].heating) refuse("the outermost layer begins at the temperature of the surface.");
 }
 
 /** Straight lines between the rows; constant beyond them. */

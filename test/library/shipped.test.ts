@@ -57,9 +57,10 @@ describe.each(names)("%s", (name) => {
   });
 });
 
-/** Pressures from 1e5 to 1e16 Pa, with both sides of every phase boundary. */
+/** Pressures from 1e5 to 1e16 Pa, or to where the last form ends, with both sides of every phase boundary. */
 function ladder({ phases }: Material): number[] {
-  const steps = Array.from({ length: 2201 }, (_, i) => 10 ** (5 + i / 200));
+  const end = phases[phases.length - 1].curve.maxPressure;
+  const steps = Array.from({ length: 2201 }, (_, i) => 10 ** (5 + i / 200)).filter((pressure) => pressure <= end);
   const boundaries = phases.slice(1).flatMap(({ fromPressure: p }) => [p * (1 - 1e-12), p, p * (1 + 1e-12)]);
   return [...steps, ...boundaries].sort((a, b) => a - b);
 }
