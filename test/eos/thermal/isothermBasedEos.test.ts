@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { finiteStrainGruneisen } from "../../../src/eos/thermal/gruneisenLaw.ts";
 import type { IsothermBasedEos } from "../../../src/eos/thermal/isothermBasedEos.ts";
 import { GPA } from "../../../src/units/constants.ts";
 import reference from "../../fixtures/thermal/thermal-reference.json" with { type: "json" };
@@ -64,6 +65,14 @@ describe("IsothermBasedEos", () => {
       rel: 0.06,
       because: "one Debye temperature cannot fit all vibrations of a silicate",
     });
+  });
+
+  it("ends where heating would contract it, at the cold pressure there", () => {
+    const { maxCompression } = finiteStrainGruneisen(0.99282, 2.10672);
+    const cold = forsterite.reference;
+    const limit = cold.pressure(cold.coordinateAtDensity(cold.density(1) * maxCompression));
+    expectClose(forsterite.maxPressure, limit, { rel: 1e-12, because: "same point" });
+    expect(bridgmanite.maxPressure).toBe(Number.POSITIVE_INFINITY);
   });
 
   it("refuses states that do not exist", () => {

@@ -127,7 +127,8 @@ describe("alongTemperature", () => {
     const temperatureAt = (p: number): number =>
       p < rows[1] ? 300 + 80e-9 * p : 1100 + 10e-9 * (Math.min(p, rows[2]) - rows[1]);
     const curve = alongTemperature(bridgmanite, temperatureAt, { kinks: rows });
-    for (const pressure of pressures) {
+    const besideKinks = [9.99, 9.99999, 10, 10.00001, 10.01, 39.999, 40.001].map((gpa) => gpa * GPA);
+    for (const pressure of [...pressures, ...besideKinks]) {
       const y = curve.coordinate(pressure);
       expectClose(curve.temperature(y), temperatureAt(pressure), { rel: 1e-9, because: "pieces end at the kinks" });
       expectClose(curve.density(y), bridgmanite.at(pressure, temperatureAt(pressure)).density, {
