@@ -8,7 +8,7 @@ import {
   powerLawGruneisen,
 } from "../eos/thermal/gruneisenLaw.ts";
 import { IsothermBasedEos } from "../eos/thermal/isothermBasedEos.ts";
-import { liquidMetal } from "../eos/thermal/liquidIron.ts";
+import { liquidMetal } from "../eos/thermal/liquidMetal.ts";
 import type { ThermalEos } from "../eos/thermal/thermalState.ts";
 import { debyeTerm, quadraticTerm } from "../eos/thermal/thermalTerm.ts";
 import { InputError } from "../errors.ts";

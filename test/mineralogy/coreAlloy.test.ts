@@ -1,14 +1,11 @@
 import { describe, expect, it } from "vitest";
-import { liquidIronParameters, liquidMetal } from "../../src/eos/thermal/liquidIron.ts";
 import { alloyPhases, coreAlloyEos } from "../../src/mineralogy/coreAlloy.ts";
 import { molarMass } from "../../src/mineralogy/formula.ts";
 import { GPA } from "../../src/units/constants.ts";
 import { expectClose } from "../support/expectClose.ts";
-import { ironFei } from "../support/thermalSubstances.ts";
+import { ironFei, liquidIron as liquid } from "../support/thermalSubstances.ts";
 
 const none = { kind: "elements", nickel: 0, sulphur: 0, silicon: 0, oxygen: 0 } as const;
-const liquid = liquidMetal(liquidIronParameters);
-
 describe("coreAlloyEos", () => {
   it("is iron where nothing is added", () => {
     expect(coreAlloyEos(ironFei, none)).toBe(ironFei);

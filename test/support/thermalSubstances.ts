@@ -1,6 +1,7 @@
 import { birchMurnaghan } from "../../src/eos/birchMurnaghan.ts";
 import { altshulerGruneisen, finiteStrainGruneisen, powerLawGruneisen } from "../../src/eos/thermal/gruneisenLaw.ts";
 import { IsothermBasedEos } from "../../src/eos/thermal/isothermBasedEos.ts";
+import { liquidMetal } from "../../src/eos/thermal/liquidMetal.ts";
 import { debyeTerm, quadraticTerm } from "../../src/eos/thermal/thermalTerm.ts";
 import { vinet } from "../../src/eos/vinet.ts";
 import { constants, GPA } from "../../src/units/constants.ts";
@@ -55,3 +56,21 @@ export const ironDewaele = new IsothermBasedEos(
     quadraticTerm({ densityZero: dewaeleDensity, coefficient: (3 * R * 1.95e-4) / IRON_MASS, exponent: 1.339 }),
   ],
 );
+
+/**
+ * Liquid iron. γ' is -0.13 kg/MJ and K_S'' -0.043 / GPa in the paper's abstract. c_V is that of the liquid at 1 bar and
+ * 1811 K, from γ = α K_S/(ρ c_P) with α = 9.2e-5 / K of the same paper (from memory): c_P = 829, c_V = 643 J/(kg K).
+ * Source  Anderson & Ahrens 1994, J. Geophys. Res. 99, 4273, doi:10.1029/93JB03158
+ * Range   data to about 1000 GPa; the form turns over where `maxPressure` says
+ */
+export const liquidIron = liquidMetal({
+  densityZero: 7019,
+  temperatureZero: 1811,
+  bulkModulus: 109.7e9,
+  bulkModulusPrime: 4.66,
+  bulkModulusSecond: -0.043e-9,
+  gammaZero: 1.735,
+  gammaPerEnergy: -0.13e-6,
+  gammaExponent: -1.87,
+  heatCapacity: 643,
+});

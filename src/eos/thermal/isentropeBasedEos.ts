@@ -15,7 +15,7 @@ export interface IsentropeHeat {
  * A fluid known along one isentrope, carried to other temperatures with a constant heat capacity c_V and γ(ρ).
  * Formula P = P_S(ρ) + ρ γ c_V (T - T_S(ρ)), S = c_V ln(T/T_S(ρ)); exact thermodynamics under that assumption: every
  *         isentrope has T/T_S constant.
- * Checked test/eos/thermal/liquidIron.test.ts
+ * Checked test/eos/thermal/liquidMetal.test.ts
  */
 export class IsentropeBasedEos extends HelmholtzEos {
   private readonly heatCapacity: number;

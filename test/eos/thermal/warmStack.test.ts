@@ -2,13 +2,12 @@ import { describe, expect, it } from "vitest";
 import { meltingCurves } from "../../../src/eos/melting/meltingCurves.ts";
 import { meltingPressure, meltingTemperature } from "../../../src/eos/melting/meltingTemperature.ts";
 import { boundaryPressure, mantleBoundaries } from "../../../src/eos/melting/phaseBoundaries.ts";
-import { liquidIronParameters, liquidMetal } from "../../../src/eos/thermal/liquidIron.ts";
 import { isentrope, isotherm } from "../../../src/eos/thermal/temperaturePaths.ts";
 import type { ThermalEos } from "../../../src/eos/thermal/thermalState.ts";
 import { type WarmPhase, warmStack } from "../../../src/eos/thermal/warmStack.ts";
 import { GPA } from "../../../src/units/constants.ts";
 import { expectClose } from "../../support/expectClose.ts";
-import { bridgmanite, forsterite, ironFei } from "../../support/thermalSubstances.ts";
+import { bridgmanite, forsterite, ironFei, liquidIron as liquid } from "../../support/thermalSubstances.ts";
 
 const phase = (name: string, eos: ThermalEos, stableFrom: WarmPhase["stableFrom"]): WarmPhase => ({
   name,
@@ -27,7 +26,6 @@ const mantle = [
   phase("bridgmanite", bridgmanite, (t) => boundaryPressure(mantleBoundaries.ringwooditeToBridgmanite, t)),
   phase("post-perovskite", bridgmanite, (t) => boundaryPressure(mantleBoundaries.bridgmaniteToPostPerovskite, t)),
 ];
-const liquid = liquidMetal(liquidIronParameters);
 const core = [
   phase("liquid", liquid, () => 0),
   phase("hcp", ironFei, (t) => meltingPressure(meltingCurves.ironAnzellini, t)),

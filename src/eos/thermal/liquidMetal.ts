@@ -18,28 +18,11 @@ export interface LiquidMetalParameters {
 }
 
 /**
- * Liquid iron. γ' is -0.13 kg/MJ and K_S'' -0.043 / GPa in the paper's abstract. c_V is that of the liquid at 1 bar and
- * 1811 K, from γ = α K_S/(ρ c_P) with α = 9.2e-5 / K of the same paper (from memory): c_P = 829, c_V = 643 J/(kg K).
- * Source  Anderson & Ahrens 1994, J. Geophys. Res. 99, 4273, doi:10.1029/93JB03158
- * Range   data to about 1000 GPa; the form turns over where `maxPressure` says
- */
-export const liquidIronParameters: LiquidMetalParameters = {
-  densityZero: 7019,
-  temperatureZero: 1811,
-  bulkModulus: 109.7e9,
-  bulkModulusPrime: 4.66,
-  bulkModulusSecond: -0.043e-9,
-  gammaZero: 1.735,
-  gammaPerEnergy: -0.13e-6,
-  gammaExponent: -1.87,
-  heatCapacity: 643,
-};
-
-/**
  * A liquid metal from its fourth-order Birch–Murnaghan isentrope, with γ as a function of density and energy.
  * Formula T_S = T0 exp ∫ γ d ln ρ along the isentrope. E - E0 is a polynomial in u = (ρ/ρ0)^(2/3), so the integral is
  *         a sum of powers of u.
- * Checked test/eos/thermal/liquidIron.test.ts
+ * Source  Anderson & Ahrens 1994, J. Geophys. Res. 99, 4273, doi:10.1029/93JB03158
+ * Checked with their liquid iron: test/eos/thermal/liquidMetal.test.ts
  */
 export function liquidMetal(parameters: LiquidMetalParameters): IsentropeBasedEos {
   const { densityZero, temperatureZero, gammaZero, gammaPerEnergy, gammaExponent } = parameters;

@@ -1,11 +1,9 @@
 import { describe, expect, it } from "vitest";
-import { liquidIronParameters, liquidMetal } from "../../../src/eos/thermal/liquidIron.ts";
 import { isentrope } from "../../../src/eos/thermal/temperaturePaths.ts";
 import { GPA } from "../../../src/units/constants.ts";
 import reference from "../../fixtures/thermal/liquid-iron.json" with { type: "json" };
 import { expectClose } from "../../support/expectClose.ts";
-
-const liquid = liquidMetal(liquidIronParameters);
+import { liquidIron as liquid } from "../../support/thermalSubstances.ts";
 
 describe("liquid iron", () => {
   it.each(reference)("follows its isentrope from 1811 K by quadrature: $density kg/m³", (row) => {
