@@ -39,6 +39,6 @@ function pointCells({ mass, planet, error }: CurvePoint, earthRadius: number): C
     planet.inertiaFactor,
     planet.radiusRelativeError,
     planet.extrapolatedLayers.join(";"),
-    undefined,
+    planet.notes.join("; ") || undefined,
   ];
 }

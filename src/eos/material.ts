@@ -23,11 +23,22 @@ export interface Phase {
   readonly components?: readonly { readonly material: string; readonly phase: Phase }[];
 }
 
+/** Where rock melts. Molten rock has no equation of state here: the solid's goes on, and a planet gets a note. */
+export interface RockMelting {
+  /** Name of the published curve. */
+  readonly curve: string;
+  /** Where that curve begins [Pa]; nothing is said below. */
+  readonly fromPressure: number;
+  /** Melting temperature [K] at a pressure [Pa]. */
+  readonly temperatureAt: (pressure: number) => number;
+}
+
 /** A substance as a stack of phases, lowest pressure first, without gaps. */
 export interface Material {
   readonly name: string;
   readonly title: string;
   readonly phases: readonly Phase[];
+  readonly melting?: RockMelting;
   /**
    * For a substance whose equation of state knows temperature: its phases in a layer whose top is at this pressure
    * [Pa] and temperature [K], in the given mode. `phases` are then those of a cold planet.

@@ -9,6 +9,8 @@ export interface Boundary {
   readonly enclosedMass: number;
   readonly radius: number;
   readonly pressure: number;
+  /** Just below; absent where the equation of state follows no temperature. */
+  readonly temperature?: number;
 }
 
 /** Work done, for tests that count it and for benchmarks. */
@@ -34,5 +36,7 @@ export interface Planet {
   readonly radiusRelativeError: number;
   /** Names of layers whose pressure went beyond the data behind their equation of state. */
   readonly extrapolatedLayers: readonly string[];
+  /** What else a reader should know, e.g. that rock treated as solid would be molten. */
+  readonly notes: readonly string[];
   readonly counters: SolverCounters;
 }

@@ -114,6 +114,7 @@ export class StructureSolver {
       boundaries: trial.boundaries,
       radiusRelativeError: integrationError + ROUND_OFF,
       extrapolatedLayers: trial.extrapolated,
+      notes: [],
       counters: {
         integrations: trial.runs - before.integrations,
         rightHandSides: trial.evaluations - before.rightHandSides,

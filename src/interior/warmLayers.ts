@@ -49,7 +49,8 @@ function warm({ temperature }: Composition, layer: Layer, top: LayerTop): Layer 
   const { material } = layer;
   if (temperature === undefined || material.warmed === undefined) return layer;
   const phases: readonly Phase[] = material.warmed(temperature.mode, top.pressure, top.temperature);
-  return { ...layer, material: { name: material.name, title: material.title, phases } };
+  const { name, title, melting } = material;
+  return { ...layer, material: { name, title, phases, melting } };
 }
 
 function topTemperature({ heating }: Layer, above: number): number {

@@ -4,6 +4,7 @@ import { G } from "../units/constants.ts";
 import type { Planet } from "./planet.ts";
 import { DEFAULT_TOLERANCE, StructureSolver } from "./structureSolver.ts";
 import { WarmLayers } from "./warmLayers.ts";
+import { warmNotes } from "./warmNotes.ts";
 
 const MAX_ROUNDS = 40;
 /** Relative change of the boundary pressures that ends the iteration, over the tolerance of an integration step. */
@@ -57,7 +58,12 @@ export class WarmSolver {
       if (change <= SETTLED * this.tolerance && !coarse) {
         this.shares = found.map((pressure) => pressure / pressureScale(mass));
         const integrationError = planet.radiusRelativeError * (this.hasKinks ? KINKED : 1);
-        return { ...planet, counters, radiusRelativeError: integrationError + EXPANSION * change };
+        return {
+          ...planet,
+          counters,
+          radiusRelativeError: integrationError + EXPANSION * change,
+          notes: warmNotes(planet),
+        };
       }
       coarse &&= change > NEARLY_SETTLED;
       const lastStep = step;

@@ -2,7 +2,7 @@ import type { Material } from "../eos/material.ts";
 import { type PhaseSpec, stackPhases } from "../eos/phaseStack.ts";
 import { mantlePhases } from "../mineralogy/mantlePhases.ts";
 import { GPA } from "../units/constants.ts";
-import { warmMaterial, warmPhase, waterMaterial } from "./buildWarm.ts";
+import { rockMelting, warmMaterial, warmPhase, waterMaterial } from "./buildWarm.ts";
 import { buildCurve, type TableReader } from "./forms.ts";
 import type { MaterialFile, PhaseEntry } from "./schemas.ts";
 
@@ -10,7 +10,7 @@ import type { MaterialFile, PhaseEntry } from "./schemas.ts";
 export function buildMaterial(file: MaterialFile, readTable: TableReader): Material {
   const { material, title, phases = [], mantle, water } = file;
   if (water) return waterMaterial(material, title);
-  if (mantle) return warmMaterial(material, title, mantlePhases(mantle));
+  if (mantle) return warmMaterial(material, title, mantlePhases(mantle), rockMelting);
   if (phases[0].thermal)
     return warmMaterial(
       material,

@@ -1,4 +1,6 @@
-import type { Material, Phase, TemperatureMode } from "../eos/material.ts";
+import type { Material, Phase, RockMelting, TemperatureMode } from "../eos/material.ts";
+import { meltingCurves } from "../eos/melting/meltingCurves.ts";
+import { meltingTemperature } from "../eos/melting/meltingTemperature.ts";
 import { alongTemperature, isentrope, isotherm } from "../eos/thermal/temperaturePaths.ts";
 import { type TemperaturePath, type WarmPhase, warmStack } from "../eos/thermal/warmStack.ts";
 import { waterAdiabat, waterIsotherm } from "../eos/water/barotrope.ts";
@@ -12,7 +14,12 @@ import type { PhaseEntry } from "./schemas.ts";
 const ROOM_TEMPERATURE = 300;
 
 /** A material whose phases depend on temperature; cold, it is at room temperature throughout. */
-export function warmMaterial(name: string, title: string, warmPhases: readonly WarmPhase[]): Material {
+export function warmMaterial(
+  name: string,
+  title: string,
+  warmPhases: readonly WarmPhase[],
+  melting?: RockMelting,
+): Material {
   const warmed = (mode: TemperatureMode, topPressure: number, topTemperature: number): readonly Phase[] =>
     warmStack(warmPhases, pathOf(mode), topPressure, topTemperature);
   let cold: readonly Phase[] | undefined;
@@ -24,8 +31,18 @@ export function warmMaterial(name: string, title: string, warmPhases: readonly W
       return cold;
     },
     warmed,
+    ...(melting && { melting }),
   };
 }
+
+const { silicateStixrude } = meltingCurves;
+
+/** Melting of MgSiO3, which stands for a mantle's: rock of several minerals begins to melt some hundred kelvin below. */
+export const rockMelting: RockMelting = {
+  curve: silicateStixrude.name,
+  fromPressure: silicateStixrude.branches[0].fromPressure,
+  temperatureAt: (pressure) => meltingTemperature(silicateStixrude, pressure),
+};
 
 function pathOf(mode: TemperatureMode): TemperaturePath {
   switch (mode.kind) {

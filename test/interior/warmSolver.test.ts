@@ -33,6 +33,10 @@ const library = loadLibrary([
   files.compositionOf("hot", layers("iron", "rock"), { temperature: { mode: "isothermal", temperatureK: 2000 } }),
   files.compositionOf("jump", layers("iron", "rock", { temperatureJumpK: 1500 }), adiabatic),
   files.compositionOf("full", layers("core", "minerals", { topTemperatureK: 4500 }), adiabatic),
+  files.compositionOf("no-jump", layers("iron", "minerals"), adiabatic),
+  files.compositionOf("magma", layers("core", "minerals", { topTemperatureK: 5500 }), {
+    temperature: { mode: "adiabatic", potentialTemperatureK: 2300 },
+  }),
   files.compositionOf("half-warm", layers("cold-iron", "rock"), adiabatic),
   files.compositionOf(
     "over-cold-shell",
@@ -199,6 +203,41 @@ describe("phases in a warm planet", () => {
     expectClose(temperature, 3712 * ((pressure / GPA - 98.5) / 161.2 + 1) ** (1 / 1.72), {
       rel: 1e-6,
       because: "the core's adiabat starts 1e-7 from where the boundary came to lie",
+    });
+  });
+});
+
+describe("notes", () => {
+  const note = (name: string, mass?: number) => planet(name, mass).notes;
+
+  it("say where a core begins as warm as the rock above it", () => {
+    const { boundaries, notes } = planet("no-jump");
+    const top = boundaries.find(({ kind }) => kind === "layer");
+    expect(notes).toEqual([
+      `iron begins as warm as minerals ends, at ${top?.temperature?.toFixed(0)} K: a jump of 0 K, as none is stated; ` +
+        "the Earth's is some 1500 K",
+    ]);
+  });
+
+  it("are not needed with a jump, at one temperature throughout, or along a table", () => {
+    for (const name of ["jump", "full", "hot", "tabled", "cold"]) expect(note(name)).toEqual([]);
+  });
+
+  it("mark rock above its melting curve, and say what the solid costs", () => {
+    const [melt, ...others] = note("magma");
+    expect(others).toEqual([]);
+    expect(melt).toMatch(
+      /^minerals is molten \(above mgsio3-stixrude-2014\) from 25\.0 to [\d.]+ GPa but taken as solid: its density there is [\d.]+ to 15 % too high, the radius up to [\d.]+ % too small$/,
+    );
+    // There the adiabat meets 5400 (P/140)^0.48 K, Stixrude 2014.
+    const high = Number(/to ([\d.]+) GPa/.exec(melt)?.[1]);
+    const { curve } = planet("magma").composition.layers[1].material.phases.findLast(
+      ({ fromPressure }) => fromPressure < high * GPA,
+    ) as { curve: { coordinate(p: number): number; temperature?(y: number): number } };
+    const kelvins = curve.temperature?.(curve.coordinate(high * GPA)) ?? 0;
+    expectClose(kelvins, 5400 * (high / 140) ** 0.48, {
+      rel: 0.01,
+      because: "three digits, and samples 0.6 GPa apart",
     });
   });
 });

@@ -84,7 +84,8 @@ async function profileOfTable(file: string, options: ProfileOptions, { io, args 
 
 function planetNotes(planet: Planet, options: ProfileOptions): string[] {
   const extrapolated = planet.extrapolatedLayers.map((layer) => `${layer} is used beyond the data behind it`);
-  return [bulkNote(planet, options), `radius good to ${planet.radiusRelativeError.toExponential(1)}`, ...extrapolated];
+  const accuracy = `radius good to ${planet.radiusRelativeError.toExponential(1)}`;
+  return [bulkNote(planet, options), accuracy, ...extrapolated, ...planet.notes];
 }
 
 function bulkNote(
