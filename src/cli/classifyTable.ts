@@ -3,18 +3,13 @@ import type { FractionEstimate } from "../inference/fractionPosterior.ts";
 import type { PlanetRow } from "../planets/quantity.ts";
 import { EARTH_MASS } from "../units/constants.ts";
 import type { Cell } from "./csv.ts";
+import type { KeptColumn } from "./keptColumns.ts";
 import type { Table } from "./table.ts";
 
 /** A row of the user's list and what could be said about it. */
 export interface ClassifiedRow {
   readonly row: PlanetRow;
   readonly result: Classification;
-}
-
-/** A column of the user's own that is carried along: its place in the list, and what it is called in the output. */
-export interface KeptColumn {
-  readonly index: number;
-  readonly name: string;
 }
 
 export const classifyColumns = [

@@ -15,6 +15,11 @@ export const commands: readonly CommandEntry[] = [
     load: () => import("./commands/profile.ts"),
   },
   { name: "classify", summary: "what measured planets can be made of", load: () => import("./commands/classify.ts") },
+  {
+    name: "crosscheck",
+    summary: "what is wrong with a planet list, or where lists disagree",
+    load: () => import("./commands/crosscheck.ts"),
+  },
   { name: "library", summary: "the compositions and materials at hand", load: () => import("./commands/library.ts") },
   { name: "demo", summary: "classify an invented survey and draw it", load: () => import("./commands/demo.ts") },
 ];

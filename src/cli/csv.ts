@@ -1,5 +1,5 @@
-/** Text, a computed number (12 significant digits), or nothing. */
-export type Cell = string | number | undefined;
+/** Text, a computed number (12 significant digits), a whole number such as a row of a file, or nothing. */
+export type Cell = string | number | bigint | undefined;
 
 /**
  * One record of RFC 4180 with a line feed. Text is kept verbatim: a name that a spreadsheet would take for a formula
@@ -13,5 +13,6 @@ export function csvRecord(cells: readonly Cell[]): string {
 function csvField(cell: Cell): string {
   if (cell === undefined) return "";
   if (typeof cell === "number") return cell.toPrecision(12);
+  if (typeof cell === "bigint") return String(cell);
   return /["#,\r\n]/.test(cell) ? `"${cell.replaceAll('"', '""')}"` : cell;
 }

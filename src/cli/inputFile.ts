@@ -1,4 +1,5 @@
 import { createReadStream } from "node:fs";
+import { access } from "node:fs/promises";
 import { InputError } from "../errors.ts";
 import type { Io } from "./io.ts";
 import { systemReason } from "./systemReason.ts";
@@ -23,6 +24,18 @@ export async function readText(path: string, io: Io): Promise<string> {
     throw error instanceof InputError ? error : unreadable(path, error);
   }
   return parts.join("");
+}
+
+export async function isThere(path: string): Promise<boolean> {
+  return access(path).then(
+    () => true,
+    () => false,
+  );
+}
+
+/** Text of our own, as if it were read. */
+export async function* bytesOf(text: string): AsyncGenerator<Uint8Array> {
+  yield new TextEncoder().encode(text);
 }
 
 /** How messages call an input. */

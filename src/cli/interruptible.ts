@@ -11,3 +11,10 @@ export async function* interruptible<T>(items: Iterable<T>): AsyncGenerator<T> {
     if (done % itemsPerTurn === 0) await setImmediate();
   }
 }
+
+/** All items, once they have come. */
+export async function allOf<T>(items: AsyncIterable<T>): Promise<T[]> {
+  const all: T[] = [];
+  for await (const item of items) all.push(item);
+  return all;
+}

@@ -17,7 +17,7 @@ export interface Curve {
 }
 
 /** What only a list of planets adds to a mass–radius page. */
-type PlanetPart = Pick<MassRadiusInput, "title" | "planets" | "columns" | "verdicts" | "warnings">;
+export type PlanetPart = Pick<MassRadiusInput, "title" | "planets" | "columns" | "verdicts" | "warnings">;
 
 /** The self-contained page with the mass–radius diagram, as HTML. */
 export async function massRadiusPage(

@@ -35,6 +35,11 @@ export function parseMasses(text: string): readonly number[] {
       "Give from:to:count, masses above 0 and a whole number of points from 2 to 1000000.",
     );
   }
+  return geometricMasses(first, last, count);
+}
+
+/** Evenly spaced in the logarithm, both ends exactly included. */
+export function geometricMasses(first: number, last: number, count: number): number[] {
   return Array.from({ length: count }, (_, i) =>
     i === count - 1 ? last : first * (last / first) ** (i / (count - 1)),
   );

@@ -1,3 +1,4 @@
+import { bytesOf } from "./inputFile.ts";
 import type { ValueWithErrors } from "./numberOptions.ts";
 
 export interface OnePlanet {
@@ -6,7 +7,7 @@ export interface OnePlanet {
 }
 
 /** A planet given by options, as the list of one row it stands for, so that both go the same way. */
-export async function* onePlanetList({ massEarth, radiusEarth }: OnePlanet): AsyncGenerator<Uint8Array> {
+export function onePlanetList({ massEarth, radiusEarth }: OnePlanet): AsyncGenerator<Uint8Array> {
   const quantities = Object.entries({ mass_earth: massEarth, radius_earth: radiusEarth });
   const cells = quantities.flatMap(([name, given]) =>
     given
@@ -19,5 +20,5 @@ export async function* onePlanetList({ massEarth, radiusEarth }: OnePlanet): Asy
   );
   const header = ["name", ...cells.map(([column]) => column)];
   const record = ["planet", ...cells.map(([, value]) => value)];
-  yield new TextEncoder().encode(`${header.join(",")}\n${record.join(",")}\n`);
+  return bytesOf(`${header.join(",")}\n${record.join(",")}\n`);
 }

@@ -1,3 +1,4 @@
+import { SingleBar } from "cli-progress";
 import type { Io } from "./io.ts";
 
 /** Shows how far a long run has come, on a terminal only. */
@@ -8,9 +9,8 @@ export interface Progress {
 
 const silent: Progress = { advanceTo: () => {}, stop: () => {} };
 
-export async function startProgress(total: number, io: Io, quiet: boolean): Promise<Progress> {
+export function startProgress(total: number, io: Io, quiet = false): Progress {
   if (quiet || !io.isTerminal) return silent;
-  const { SingleBar } = await import("cli-progress");
   const bar = new SingleBar({ format: "{bar} {value} of {total}", clearOnComplete: true });
   bar.start(total, 0);
   return { advanceTo: (done) => bar.update(done), stop: () => bar.stop() };

@@ -9,6 +9,9 @@ import { version } from "./version.ts";
 
 const nominalRadiusKm = "6378.1";
 
+/** Errors that an option mends, found only once the list is open. */
+const usageErrors = ["ambiguous-column", "unknown-column-choice", "unknown-unit"];
+
 /**
  * Runs one command line. Resolves to the exit code: 0 a result was produced, 1 nothing could be read, solved or
  * written, 2 wrong usage. (130, interrupted, is given by main.ts.)
@@ -20,7 +23,7 @@ export async function run(args: readonly string[], io: Io): Promise<number> {
   } catch (error) {
     if (error instanceof CommanderError) return error.exitCode === 0 ? 0 : 2;
     io.err(`${errorLabel(io)} ${escapeControls(messageOf(error))}\n`);
-    return 1;
+    return error instanceof InputError && usageErrors.includes(error.code) ? 2 : 1;
   }
 }
 

@@ -23,5 +23,6 @@ function toJson({ columns, rows }: Table, provenance: Provenance): string {
 }
 
 function jsonValue(cell: Cell): string | number | null {
+  if (typeof cell === "bigint") return Number(cell);
   return typeof cell === "number" ? Number(cell.toPrecision(12)) : (cell ?? null);
 }

@@ -1,4 +1,5 @@
 import type { MeasuredQuantity, PlanetRow, QuantityName } from "../planets/quantity.ts";
+import { isSet } from "./flag.ts";
 import { groupBy } from "./groupBy.ts";
 import { nameKey } from "./planetName.ts";
 import { positive } from "./significance.ts";
@@ -37,7 +38,7 @@ type Choice = Pick<ChosenRow, "row" | "choice">;
 const choosers: Readonly<Record<PublicationRule, (rows: readonly PlanetRow[]) => Choice>> = {
   preferred(rows) {
     const [first] = rows as [PlanetRow];
-    const marked = rows.find(({ texts }) => /^\s*(1|true|yes|y)\s*$/i.test(texts.preferred ?? ""));
+    const marked = rows.find(({ texts }) => isSet(texts.preferred));
     const choice = marked ? `preferred of ${rows.length}` : `first of ${rows.length}, none is marked as preferred`;
     return { row: marked ?? first, choice };
   },

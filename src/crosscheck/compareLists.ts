@@ -1,14 +1,15 @@
-import type { QuantityName } from "../planets/quantity.ts";
+import type { MeasuredQuantity, QuantityName } from "../planets/quantity.ts";
 import type { MatchedPair } from "./listMatch.ts";
 import { type PullSummary, summarisePulls } from "./pulls.ts";
+import { quantitiesOf } from "./quantitiesOf.ts";
 import { tensionSigma } from "./significance.ts";
 import type { QuantityTension } from "./tension.ts";
 
-/** What a verdict function says of both rows; `moved` where they differ. */
+/** What a verdict function says of both rows, at least one of which has a verdict; `moved` where two verdicts differ. */
 export interface VerdictChange {
   readonly pair: MatchedPair;
-  readonly verdict: string;
-  readonly verdictOther: string;
+  readonly verdict?: string;
+  readonly verdictOther?: string;
   readonly moved: boolean;
 }
 
@@ -23,7 +24,7 @@ export interface ListComparison {
 export type ClassifyRow = (row: MatchedPair["row"]) => string | undefined;
 
 /** Places are used for matching; they have no errors. */
-const notCompared: readonly string[] = ["rightAscension", "declination"];
+const notCompared: readonly QuantityName[] = ["rightAscension", "declination"];
 
 /**
  * Tension of every quantity of every pair, pulls of each quantity over the whole list, and, if `classify` is given,
@@ -37,22 +38,25 @@ export function compareLists(pairs: readonly MatchedPair[], classify?: ClassifyR
 }
 
 function tensionsOf(pair: MatchedPair): QuantityTension[] {
-  return Object.entries(pair.row.quantities).flatMap(([name, value]) => {
-    const quantity = name as QuantityName;
+  return quantitiesOf(pair.row).flatMap(([quantity, value]) => {
     const other = pair.other.quantities[quantity];
-    if (!other || notCompared.includes(name)) return [];
+    if (!other || notCompared.includes(quantity)) return [];
     const measured = value.kind === other.kind && (value.kind === "measured" || value.kind === "minimum");
     const sigma = measured ? tensionSigma(value, other) : undefined;
-    return [{ pair, quantity, value, other, tensionSigma: sigma, identical: sameNumber(value.value, other.value) }];
+    return [{ pair, quantity, value, other, tensionSigma: sigma, identical: isQuotedTwice(value, other, sigma) }];
   });
 }
 
-/** Equal but for the rounding of two unit conversions. */
-const sameNumber = (a: number, b: number) => Math.abs(a - b) <= 1e-9 * Math.abs(a);
+/** Equal but for the rounding of unit conversions: in value against its error, and in the error against itself. */
+function isQuotedTwice(a: MeasuredQuantity, b: MeasuredQuantity, sigma: number | undefined): boolean {
+  if (sigma === undefined) return Math.abs(a.value - b.value) <= 1e-9 * Math.abs(a.value);
+  const alike = (x = 0, y = 0) => Math.abs(x - y) <= 0.05 * x;
+  return Math.abs(sigma) < 0.01 && alike(a.minus, b.minus) && alike(a.plus, b.plus);
+}
 
 function verdictChange(pair: MatchedPair, classify: ClassifyRow): VerdictChange[] {
   const verdict = classify(pair.row);
   const verdictOther = classify(pair.other);
-  if (verdict === undefined || verdictOther === undefined) return [];
-  return [{ pair, verdict, verdictOther, moved: verdict !== verdictOther }];
+  const known = [verdict, verdictOther].filter((one) => one !== undefined);
+  return known.length === 0 ? [] : [{ pair, verdict, verdictOther, moved: new Set(known).size === 2 }];
 }

@@ -32,13 +32,16 @@ const displayUnits: Readonly<Record<QuantityName, readonly [name: string, unit: 
   declination: ["declination_deg", DEGREE],
 };
 
-/** Public name of what a finding is about: `mass_earth`, or `name` and `status` as they are. */
+const isText = (subject: Subject): subject is Exclude<Subject, QuantityName> =>
+  subject === "name" || subject === "status" || subject === "cell";
+
+/** Public name of what a finding is about: `mass_earth`; `name`, `status` and `cell` as they are. */
 export function displayName(subject: Subject): string {
-  return subject === "name" || subject === "status" ? subject : displayUnits[subject][0];
+  return isText(subject) ? subject : displayUnits[subject][0];
 }
 
 /** An SI value in the unit that `displayName` states; `earthRadius` [m] where the user chose another unit radius. */
 export function inDisplayUnit(subject: Subject, value: number, earthRadius = EARTH_RADIUS): number {
-  if (subject === "name" || subject === "status") return value;
+  if (isText(subject)) return value;
   return value / (subject === "radius" ? earthRadius : displayUnits[subject][1]);
 }

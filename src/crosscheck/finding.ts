@@ -2,8 +2,8 @@ import type { PlanetRow, QuantityName } from "../planets/quantity.ts";
 
 export type Severity = "info" | "warning" | "error";
 
-/** What a rule is about: a quantity of the list, or one of its texts. */
-export type Subject = QuantityName | "name" | "status";
+/** What a rule is about: a quantity of the list, one of its texts, or a cell that could not be read as either. */
+export type Subject = QuantityName | "name" | "status" | "cell";
 
 /** What one rule holds against one row; numbers in SI. */
 export interface Discrepancy {

@@ -9,7 +9,7 @@ export interface MatchedPair {
   readonly method: MatchMethod;
 }
 
-/** A row that several rows of the other list could be, none better than the rest. */
+/** A row that several rows of the other list could be, or whose one candidate could be another row as well. */
 export interface AmbiguousMatch {
   readonly row: PlanetRow;
   readonly candidates: readonly PlanetRow[];

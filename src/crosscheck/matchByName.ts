@@ -48,16 +48,16 @@ function step(method: MatchMethod, keysOf: KeysOf, otherKeysOf: KeysOf, possible
   };
 }
 
-/** A name without a planet's letter is that of the star, and good enough if only one planet of the star is left. */
+/** A name without a planet's letter is that of the star, and good enough for its only planet left, or the only one of like period. */
 const byHost: Step = (rows, others) => {
   const bare: KeysOf = (row) => (hostKey(ownKey(row)) === undefined ? [foldCase(ownKey(row))] : []);
   const hosts: KeysOf = (row) => [foldCase(hostKey(ownKey(row)) ?? "")];
-  const forward = step("host", bare, hosts)(rows, others);
-  const backward = step("host", hosts, bare)(rows, others);
+  const forward = step("host", bare, hosts, periodsAgree)(rows, others);
+  const backward = step("host", hosts, bare, periodsAgree)(rows, others);
   return { pairs: [...forward.pairs, ...backward.pairs], ambiguous: [...forward.ambiguous, ...backward.ambiguous] };
 };
 
-/** `Foo 1 B` and `Foo 1 b` may be a companion star and a planet: where periods are known they must not contradict. */
+/** What rests on less than the whole name must not contradict the periods: `Foo 1 B` may be the star beside `Foo 1 b`. */
 const periodsAgree: Possible = (row, other) => {
   const [a, b] = [row.quantities.period?.value, other.quantities.period?.value];
   return !a || !b || Math.abs(Math.log(a / b)) < 0.1;

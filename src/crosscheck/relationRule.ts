@@ -1,5 +1,6 @@
 import type { PlanetRow } from "../planets/quantity.ts";
 import type { Discrepancy, Severity } from "./finding.ts";
+import { times } from "./ratioInWords.ts";
 import { type Comparison, compare, isViolated, type Relation } from "./relation.ts";
 import type { RowRule } from "./rule.ts";
 import { slipsThatRepair } from "./slipDiagnosis.ts";
@@ -50,9 +51,4 @@ function judge(comparison: Comparison): Severity | undefined {
 function explain(relation: Relation, row: PlanetRow, comparison: Comparison, otherwise: string): string {
   const slips = slipsThatRepair(relation, row, comparison);
   return slips.length > 0 ? `would fit if ${slips.map((slip) => slip.words).join(", or if ")}` : otherwise;
-}
-
-/** A ratio for people, from its logarithm: `3.12 times`. */
-export function times(logRatio: number): string {
-  return `${Number(Math.exp(logRatio).toPrecision(3))} times`;
 }

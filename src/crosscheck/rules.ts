@@ -24,11 +24,13 @@ import { theoreticalValue } from "./rules/theoreticalValue.ts";
 import { twinColumns } from "./rules/twinColumns.ts";
 import { uncertaintyBelowStar } from "./rules/uncertaintyBelowStar.ts";
 import { unitSlip } from "./rules/unitSlip.ts";
+import { unreadableCell } from "./rules/unreadableCell.ts";
 import { zeroPlusError } from "./rules/zeroPlusError.ts";
 import { zeroUncertainty } from "./rules/zeroUncertainty.ts";
 
 /** Every rule, in the order in which a row's findings are listed. */
 export const rules: readonly Rule[] = [
+  unreadableCell,
   unitSlip,
   ...relationRules,
   twinColumns,

@@ -9,6 +9,6 @@ export interface QuantityTension {
   readonly other: MeasuredQuantity;
   /** Signed; undefined unless both are measurements with errors on the sides that face each other. */
   readonly tensionSigma?: number;
-  /** Equal numbers are one measurement quoted twice, and no test of its error. */
+  /** One measurement quoted twice is no test of its error. */
   readonly identical: boolean;
 }

@@ -7,6 +7,8 @@ export interface Cell extends LatticePoint {
   readonly dj: number;
   /** ln R, row by row: at [5 a + b] for the point (i + a di, j + b dj). */
   readonly values: Float64Array;
+  /** By how much it misses ln R of its test planets, at most. */
+  readonly testError: number;
 }
 
 /** How often a first cell can be halved each way. */
@@ -34,7 +36,7 @@ const TESTS_BETWEEN = [
 ] as const;
 const TESTS = [...TESTS_ALONG_MASS, ...TESTS_ALONG_FRACTION, ...TESTS_BETWEEN];
 
-type OpenCell = Omit<Cell, "values">;
+type OpenCell = Omit<Cell, "values" | "testError">;
 
 /** The cells, or the largest i up to which every member of the family has planets; below 0 if there is none. */
 export type Refinement = { readonly cells: Cell[] } | { readonly cells?: undefined; readonly solvableUntil: number };
@@ -64,9 +66,10 @@ export function refinedCells(
     const perCell = 25 + TESTS.length;
     open = open.flatMap((cell, c) => {
       const own = values.subarray(c * perCell, (c + 1) * perCell);
-      const finished = { ...cell, values: own.slice(0, 25) };
-      const halves = halvesOf(cell, testErrors(finished, own.subarray(25)), tolerance);
-      if (halves.length === 0) done.push(finished);
+      const nodes = own.slice(0, 25);
+      const errors = testErrors(nodes, own.subarray(25));
+      const halves = errors.any <= tolerance ? [] : halvesOf(cell, errors);
+      if (halves.length === 0) done.push({ ...cell, values: nodes, testError: errors.any });
       return halves;
     });
   }
@@ -74,16 +77,18 @@ export function refinedCells(
 }
 
 /** Biquartic at u node distances along mass and v along fraction. */
-export function cellValue({ values }: Cell, u: number, v: number): number {
+export function cellValue(values: Float64Array, u: number, v: number): number {
   const alongMass = new Float64Array(5);
   for (let a = 0; a < 5; a++) alongMass[a] = quarticThrough(values, 5 * a, v);
   return quarticThrough(alongMass, 0, u);
 }
 
 function lastBeforeHole(points: readonly LatticePoint[], solved: readonly (number | undefined)[]): number {
-  const holes = points.filter((_, n) => solved[n] === undefined).map(({ i }) => i);
-  const first = Math.min(...holes);
-  return Math.max(-1, ...points.map(({ i }) => i).filter((i) => i < first));
+  const firstHole = points.reduce(
+    (first, { i }, n) => (solved[n] === undefined ? Math.min(first, i) : first),
+    Infinity,
+  );
+  return points.reduce((last, { i }) => (i < firstHole ? Math.max(last, i) : last), -1);
 }
 
 function nodesOf({ i, j, di, dj }: OpenCell): LatticePoint[] {
@@ -100,8 +105,8 @@ interface TestErrors {
   readonly any: number;
 }
 
-function testErrors(cell: Cell, solved: Float64Array): TestErrors {
-  const errors = TESTS.map(([u, v], t) => Math.abs(cellValue(cell, u, v) - solved[t]));
+function testErrors(values: Float64Array, solved: Float64Array): TestErrors {
+  const errors = TESTS.map(([u, v], t) => Math.abs(cellValue(values, u, v) - solved[t]));
   return {
     alongMass: Math.max(errors[0], errors[1]),
     alongFraction: Math.max(errors[2], errors[3]),
@@ -109,19 +114,19 @@ function testErrors(cell: Cell, solved: Float64Array): TestErrors {
   };
 }
 
-function halvesOf(cell: OpenCell, errors: TestErrors, tolerance: number): OpenCell[] {
+/** None if the cell cannot be halved any more. */
+function halvesOf(cell: OpenCell, errors: TestErrors): OpenCell[] {
   const { i, j, di, dj } = cell;
-  if (errors.any <= tolerance) return [];
-  const byMass = di > 2 && (errors.alongMass >= errors.alongFraction || dj <= 2);
-  if (byMass)
+  const massFirst = errors.alongMass >= errors.alongFraction;
+  if (di > 2 && (massFirst || dj <= 2)) {
     return [
       { ...cell, di: di / 2 },
       { ...cell, i: i + 2 * di, di: di / 2 },
     ];
-  if (dj > 2)
-    return [
-      { ...cell, dj: dj / 2 },
-      { ...cell, j: j + 2 * dj, dj: dj / 2 },
-    ];
-  return [];
+  }
+  if (dj <= 2) return [];
+  return [
+    { ...cell, dj: dj / 2 },
+    { ...cell, j: j + 2 * dj, dj: dj / 2 },
+  ];
 }

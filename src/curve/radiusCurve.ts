@@ -20,7 +20,7 @@ export interface RadiusCurve extends MassRange {
 
 /** A curve through solved planets, with its measured error. */
 export interface MeasuredCurve extends RadiusCurve {
-  /** Largest relative error of the radius at planets solved between the nodes, none of which shaped the curve. */
+  /** Largest relative error of the radius at planets solved between the nodes, other than those that decided on them. */
   readonly relativeError: number;
   readonly nodeCount: number;
 }
@@ -35,7 +35,12 @@ const MEASURED_AT = 0.382;
 /** Of the range in ln M when a mass is sought: 14 / 2^48 is round-off. */
 const HALVINGS = 48;
 
+/** Masses at the ends of the range go through a logarithm and back. */
+const ROUND_OFF = 1e-12;
+
 interface Interpolant {
+  /** Rising. */
+  readonly nodes: ArrayLike<number>;
   value(x: number): number;
 }
 
@@ -54,7 +59,7 @@ export function radiusCurve(solve: RadiusSolver, range: MassRange, { tolerance =
     const tested = betweenNodes(x, 0.5).filter((_, i) => x[i + 1] - x[i] > CLOSEST_SPACING);
     const solved = logRadii(tested);
     const missed = tested.filter((m, i) => !(Math.abs(curve.value(m) - (solved[i] ?? Number.NaN)) <= tolerance / 2));
-    if (missed.length === 0) return finishedCurve(x, curve, logRadii, tolerance);
+    if (missed.length === 0) return finishedCurve(x, logRadii, tolerance);
     x = [...x, ...missed].sort((a, b) => a - b);
     const hole = logRadii(x).indexOf(undefined);
     if (hole >= 0) x = firstNodes(logRadii, x[0], x[hole - 1]);
@@ -83,7 +88,10 @@ function firstNodes(logRadii: LogRadii, from: number, to: number): number[] {
   const missing = logRadii(x).indexOf(undefined);
   if (missing < 0) return x;
   if (missing > 0) return firstNodes(logRadii, from, lastSolvable(logRadii, x[missing - 1], x[missing]));
-  throw new ConvergenceError("curve-empty", `The lightest planet asked for, ${Math.exp(from)} kg, cannot be solved`);
+  throw new ConvergenceError(
+    "curve-empty",
+    `The lightest planet asked for, ${Math.exp(from)} kg, cannot be solved. Ask for heavier planets.`,
+  );
 }
 
 function lastSolvable(logRadii: LogRadii, solvable: number, unsolvable: number): number {
@@ -98,52 +106,42 @@ function betweenNodes(x: readonly number[], at: number): number[] {
   return x.slice(1).map((next, i) => x[i] + at * (next - x[i]));
 }
 
-function finishedCurve(
-  x: readonly number[],
-  logRadius: LocalCubic,
-  logRadii: LogRadii,
-  tolerance: number,
-): MeasuredCurve {
+function finishedCurve(x: readonly number[], logRadii: LogRadii, tolerance: number): MeasuredCurve {
+  const logRadius = new LocalCubic(x, logRadii(x) as number[]);
   const tested = betweenNodes(x, MEASURED_AT);
   const solved = logRadii(tested);
   const errors = tested.map((m, i) => Math.abs(Math.expm1(logRadius.value(m) - (solved[i] ?? Number.NaN))));
-  // Up to its maximum mass a radius plunges ever more steeply: the last stretch that cannot be interpolated is left out.
-  let last = x.length - 1;
-  while (last > 1 && !(errors[last - 1] <= tolerance)) last--;
-  const curve = new InterpolatedCurve(logRadius, x.slice(0, last + 1));
-  return Object.assign(curve, { relativeError: Math.max(...errors.slice(0, last)), nodeCount: last + 1 });
+  // Up to its maximum mass a radius plunges ever more steeply: a last stretch that cannot be interpolated is left out.
+  if (x.length > 4 && !(errors[errors.length - 1] <= tolerance))
+    return finishedCurve(x.slice(0, -1), logRadii, tolerance);
+  return Object.assign(new InterpolatedCurve(logRadius), { relativeError: Math.max(...errors), nodeCount: x.length });
 }
 
-/** A curve from an interpolant of ln R over ln M and its nodes; radius rises with mass up to the first node where it falls. */
+/** A curve from an interpolant of ln R over ln M. */
 export class InterpolatedCurve implements RadiusCurve {
   readonly lightest: number;
   readonly heaviest: number;
   private readonly logRadius: Interpolant;
-  private readonly from: number;
-  /** ln M of the node up to which ln R rises. */
-  private readonly top: number;
+  /** ln M of the node up to which ln R rises; found when first needed. */
+  private top?: number;
 
-  constructor(logRadius: Interpolant, x: ArrayLike<number>) {
-    this.from = x[0];
-    this.lightest = Math.exp(x[0]);
-    this.heaviest = Math.exp(x[x.length - 1]);
+  constructor(logRadius: Interpolant) {
+    const { nodes } = logRadius;
+    this.lightest = Math.exp(nodes[0]);
+    this.heaviest = Math.exp(nodes[nodes.length - 1]);
     this.logRadius = logRadius;
-    this.top = x[0];
-    let largest = logRadius.value(x[0]);
-    for (let i = 1; i < x.length && logRadius.value(x[i]) > largest; i++) {
-      this.top = x[i];
-      largest = logRadius.value(x[i]);
-    }
   }
 
   radius(mass: number): number {
-    if (!(mass >= this.lightest && mass <= this.heaviest)) throw massOutOfRange(mass, this);
+    if (!(mass >= this.lightest * (1 - ROUND_OFF) && mass <= this.heaviest * (1 + ROUND_OFF)))
+      throw massOutOfRange(mass, this);
     return Math.exp(this.logRadius.value(Math.log(mass)));
   }
 
   massWithRadius(radius: number): number | undefined {
     const wanted = Math.log(radius);
-    let low = this.from;
+    this.top ??= endOfRise(this.logRadius);
+    let low = this.logRadius.nodes[0];
     let high = this.top;
     if (!(wanted >= this.logRadius.value(low) && wanted <= this.logRadius.value(high))) return undefined;
     for (let step = 0; step < HALVINGS; step++) {
@@ -153,6 +151,13 @@ export class InterpolatedCurve implements RadiusCurve {
     }
     return Math.exp((low + high) / 2);
   }
+}
+
+function endOfRise(logRadius: Interpolant): number {
+  const { nodes } = logRadius;
+  let i = 0;
+  while (i + 1 < nodes.length && logRadius.value(nodes[i + 1]) > logRadius.value(nodes[i])) i++;
+  return nodes[i];
 }
 
 function massOutOfRange(mass: number, { lightest, heaviest }: MassRange): ModelRangeError {

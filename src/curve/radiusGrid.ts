@@ -6,14 +6,17 @@ import { angleOf, type FamilySolver, RadiusLattice } from "./radiusLattice.ts";
 
 /** R(M, f) of a one-parameter family of compositions, f from 0 to 1. */
 export interface RadiusGrid extends MassRange {
-  /** Largest relative error of the radius at planets solved off the nodes, none of which shaped the grid. */
+  /** Largest relative error of the radius at planets solved between the nodes. */
   readonly relativeError: number;
-  /** Of the same errors, over the plane of ln M and the lattice's measure of the fraction. */
+  /** Of the errors at one more planet in every cell, over the plane of ln M and the lattice's measure of the fraction. */
   readonly rootMeanSquareError: number;
   readonly cellCount: number;
   readonly solvedPlanets: number;
-  /** The curve of one member, cheap enough to be made anew for every fraction an inference asks for. */
-  member(fraction: number): RadiusCurve;
+  /**
+   * The curve of one member, at least over the masses of `within` (default: all). Cheap enough to be made anew for every
+   * fraction an inference asks for. Throws ModelRangeError `grid-fraction-range`.
+   */
+  member(fraction: number, within?: MassRange): RadiusCurve;
 }
 
 /** Size of the first cells: in ln M, and their number along the fraction. */
@@ -25,8 +28,8 @@ const FRACTION_STEPS = FRACTION_CELLS * CELL_STEPS;
  * Solves a family until R is known to `tolerance` at every mass of the range and every fraction, by biquartic cells in
  * ln M and the angle φ of f = sin²(πφ/2), which gives room to thin outer layers and small cores. What costs is the folds
  * of R along lines where a phase appears or vanishes: with the default the largest error is reached there only, and the
- * root mean square is ten times smaller. Halving `tolerance` doubles the work.
- The range ends early, for all members alike, where some member has no heavier planet.
+ * root mean square is about ten times smaller. Halving `tolerance` doubles the work.
+ * The range ends early, for all members alike, where some member has no heavier planet.
  * Throws ConvergenceError `grid-empty` if a member has no planet at the light end.
  * Checked test/curve/radiusGrid.test.ts
  */
@@ -41,7 +44,10 @@ export function radiusGrid(solveMember: FamilySolver, range: MassRange, { tolera
   if (refinement.solvableUntil > 0) {
     return radiusGrid(solveMember, { ...range, heaviest: lattice.mass(refinement.solvableUntil) }, { tolerance });
   }
-  throw new ConvergenceError("grid-empty", `Some member of the family has no planet of ${range.lightest} kg`);
+  throw new ConvergenceError(
+    "grid-empty",
+    `A member of the family has no planet of ${range.lightest} kg, the lightest mass asked for. Ask for heavier planets.`,
+  );
 }
 
 /** Cells in flat arrays, in order of mass. */
@@ -78,13 +84,13 @@ class CellGrid implements RadiusGrid {
     this.solvedPlanets = lattice.solvedPlanets;
   }
 
-  member(fraction: number): RadiusCurve {
+  member(fraction: number, within: MassRange = this): RadiusCurve {
     if (!(fraction >= 0 && fraction <= 1)) {
       const range = { quantity: "mass fraction", value: fraction, minimum: 0, maximum: 1 };
       throw new ModelRangeError("grid-fraction-range", `A mass fraction of ${fraction} is not between 0 and 1.`, range);
     }
     const angle = angleOf(fraction);
-    const crossed = this.cellsAt(angle);
+    const crossed = this.cellsAt(angle, Math.log(within.lightest), Math.log(within.heaviest));
     const from = crossed.map((c) => this.massFrom[c]);
     const spacing = crossed.map((c) => this.massSpacing[c]);
     const values = new Float64Array(5 * crossed.length);
@@ -92,14 +98,14 @@ class CellGrid implements RadiusGrid {
       const v = (angle - this.angleFrom[c]) / this.angleSpacing[c];
       for (let a = 0; a < 5; a++) values[5 * n + a] = quarticThrough(this.values, 25 * c + 5 * a, v);
     });
-    const logRadius = new PiecewiseQuartic(from, spacing, values);
-    return new InterpolatedCurve(logRadius, logRadius.nodes);
+    return new InterpolatedCurve(new PiecewiseQuartic(from, spacing, values));
   }
 
-  /** In order of mass; a fraction on the line between two cells belongs to the upper one. */
-  private cellsAt(angle: number): number[] {
+  /** In order of mass; an angle on the line between two cells belongs to the upper one. */
+  private cellsAt(angle: number, from: number, to: number): number[] {
     const cells: number[] = [];
-    for (let c = 0; c < this.cellCount; c++) {
+    for (let c = 0; c < this.cellCount && this.massFrom[c] <= to; c++) {
+      if (this.massFrom[c] + 4 * this.massSpacing[c] < from) continue;
       const v = (angle - this.angleFrom[c]) / this.angleSpacing[c];
       if (v >= 0 && (v < 4 || (v === 4 && angle === 1))) cells.push(c);
     }
@@ -116,8 +122,8 @@ function measureErrors(cells: readonly Cell[], lattice: RadiusLattice): { larges
     const u = (4 * c * 0.7548776662466927) % 4;
     const v = (4 * c * 0.5698402909980532) % 4;
     const [radius] = lattice.solveMember(lattice.fraction(cell.j + v * cell.dj))([lattice.mass(cell.i + u * cell.di)]);
-    const error = Math.abs(Math.exp(cellValue(cell, u, v)) / (radius ?? Number.NaN) - 1);
-    largest = Math.max(largest, error);
+    const error = Math.abs(Math.exp(cellValue(cell.values, u, v)) / (radius ?? Number.NaN) - 1);
+    largest = Math.max(largest, error, cell.testError);
     squares += cell.di * cell.dj * error * error;
     area += cell.di * cell.dj;
   });

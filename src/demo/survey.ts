@@ -2,7 +2,7 @@
  * An invented survey for the first run: planets, hosts, numbers and the survey itself are made up. It holds every verdict
  * and every reason for refusing one, in the columns of our own lists.
  */
-export const surveyName = "saltmarsh-survey.csv";
+export const surveyTitle = "The Saltmarsh Survey";
 
 export const survey = `\
 # The Saltmarsh Survey: invented planets that show what Bulkwright says about real ones.

@@ -22,7 +22,7 @@ export type BirchMurnaghanParameters = Omit<FiniteStrainParameters, "bulkModulus
  *         1257, doi:10.1029/JB083iB03p01257
  * Valid   P >= 0, up to the pressure where a negative a or b makes it turn over (`maxPressure`)
  * Throws  InputError `eos-parameter` unless ρ0 > 0, K0 > 0 and K0' > 1
- * Checked test/eos/finiteStrain.test.ts
+ * Checked test/eos/finiteStrain.test.ts, formPoints.test.ts (50 digits), everyForm.test.ts
  */
 export function birchMurnaghan(parameters: BirchMurnaghanParameters): EosCurve {
   return new BirchMurnaghanCurve(parameters);
@@ -30,6 +30,7 @@ export function birchMurnaghan(parameters: BirchMurnaghanParameters): EosCurve {
 
 class BirchMurnaghanCurve extends FiniteStrainCurve {
   private readonly threeK: number;
+  private readonly threeKOverDensity: number;
   private readonly a: number;
   private readonly b: number;
 
@@ -37,6 +38,7 @@ class BirchMurnaghanCurve extends FiniteStrainCurve {
     super("birch-murnaghan", { bulkModulusPrime: 4, ...parameters });
     const prime = this.bulkModulusPrime;
     this.threeK = 3 * this.bulkModulus;
+    this.threeKOverDensity = this.threeK / this.densityZero;
     this.a = 1.5 * (prime - 4);
     this.b =
       parameters.order === 4
@@ -60,10 +62,10 @@ class BirchMurnaghanCurve extends FiniteStrainCurve {
     // dP/dy = 3 K0 y⁴ q(f), from df/dy = y and y² = 1 + 2f.
     const q = 1 + f * (7 + 2 * a + f * (9 * a + 3 * b + 11 * f * b));
     const qSlope = 7 + 2 * a + f * (18 * a + 6 * b + 33 * f * b);
-    const threeKq = this.threeK * q;
-    out[0] = threeKq * y2 * y2;
-    out[1] = (threeKq * y) / this.densityZero;
-    out[2] = 3 / y;
-    out[3] = 4 / y + (y * qSlope) / q;
+    const inverse = 1 / y;
+    out[0] = this.threeK * q * y2 * y2;
+    out[1] = this.threeKOverDensity * q * y;
+    out[2] = 3 * inverse;
+    out[3] = 4 * inverse + (y * qSlope) / q;
   }
 }

@@ -46,8 +46,8 @@ export class CubicHermite {
 }
 
 /**
- * Slopes at the knots that keep a piecewise cubic as monotone as its data: the weighted harmonic mean of the secants,
- * and at the ends a three-point estimate limited to the same sign and three secants.
+ * Slopes at the knots that keep a piecewise cubic through values that never fall from falling: the weighted harmonic
+ * mean of the secants, and at the ends a three-point estimate, never negative (nor above twice the secant).
  * Source  Fritsch & Butland 1984, SIAM J. Sci. Stat. Comput. 5, 300, doi:10.1137/0905021; ends after Moler 2004,
  *         Numerical Computing with MATLAB, section 3.4 (from memory)
  * Checked test/eos/tabulated.test.ts
@@ -63,9 +63,8 @@ export function monotoneSlopes(x: ArrayLike<number>, values: ArrayLike<number>):
     const after = secant(i);
     const weightBefore = 2 * width(i) + width(i - 1);
     const weightAfter = width(i) + 2 * width(i - 1);
-    if (before * after > 0) {
-      slopes[i] = (weightBefore + weightAfter) / (weightBefore / before + weightAfter / after);
-    }
+    // Next to a flat piece this is 0: the harmonic mean with an infinite term.
+    slopes[i] = (weightBefore + weightAfter) / (weightBefore / before + weightAfter / after);
   }
   slopes[0] = endSlope(width(0), width(1), secant(0), secant(1));
   slopes[last] = endSlope(width(last - 1), width(last - 2), secant(last - 1), secant(last - 2));
@@ -74,6 +73,5 @@ export function monotoneSlopes(x: ArrayLike<number>, values: ArrayLike<number>):
 
 function endSlope(width: number, nextWidth: number, secant: number, nextSecant: number): number {
   const slope = ((2 * width + nextWidth) * secant - width * nextSecant) / (width + nextWidth);
-  if (slope * secant <= 0) return 0;
-  return secant * nextSecant <= 0 && Math.abs(slope) > 3 * Math.abs(secant) ? 3 * secant : slope;
+  return Math.max(slope, 0);
 }

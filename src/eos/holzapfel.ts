@@ -14,7 +14,7 @@ export interface HolzapfelParameters extends FiniteStrainParameters {
  *         (both from memory)
  * Valid   P >= 0, up to `maxPressure` where a strongly negative c2 makes it turn over
  * Throws  InputError `eos-parameter` unless ρ0, K0, P_FG0 > 0 and K0' > 1
- * Checked test/eos/finiteStrain.test.ts
+ * Checked test/eos/finiteStrain.test.ts, formPoints.test.ts (50 digits), everyForm.test.ts
  */
 export function holzapfel(parameters: HolzapfelParameters): EosCurve {
   return new HolzapfelCurve(parameters);

@@ -13,7 +13,7 @@ export interface KeaneParameters extends FiniteStrainParameters {
  * Source  Keane 1954, Australian J. Physics 7, 322, doi:10.1071/PH540322
  * Valid   P >= 0 without upper limit
  * Throws  InputError `eos-parameter` unless ρ0, K0, K∞' > 0 and K0' > 1
- * Checked test/eos/finiteStrain.test.ts
+ * Checked test/eos/finiteStrain.test.ts, formPoints.test.ts (50 digits), everyForm.test.ts
  */
 export function keane(parameters: KeaneParameters): EosCurve {
   return new KeaneCurve(parameters);

@@ -19,7 +19,7 @@ export interface ModifiedPolytropeParameters {
  * Source  Seager et al. 2007, ApJ 669, 1279, eq. 11, doi:10.1086/521346
  * Valid   P >= 0; the published fits are meant for P < 1e16 Pa and are good to 2–12 % in density
  * Throws  InputError `eos-parameter` unless ρ0 >= 0, c > 0 and 0 < n < 1
- * Checked test/eos/modifiedPolytrope.test.ts
+ * Checked test/eos/modifiedPolytrope.test.ts, everyForm.test.ts
  */
 export function modifiedPolytrope(parameters: ModifiedPolytropeParameters): EosCurve {
   const { densityZero, coefficient, exponent } = parameters;

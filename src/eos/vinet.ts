@@ -7,7 +7,7 @@ import { FiniteStrainCurve, type FiniteStrainParameters } from "./finiteStrain.t
  * Source  Vinet, Rose, Ferrante & Smith 1989, J. Phys.: Condens. Matter 1, 1941, doi:10.1088/0953-8984/1/11/002
  * Valid   P >= 0; pressure always grows, but only as ρ^(2/3), so planets of one such phase have a maximum mass
  * Throws  InputError `eos-parameter` unless ρ0 > 0, K0 > 0 and K0' > 1
- * Checked test/eos/finiteStrain.test.ts
+ * Checked test/eos/finiteStrain.test.ts, formPoints.test.ts (50 digits), everyForm.test.ts
  */
 export function vinet(parameters: FiniteStrainParameters): EosCurve {
   return new VinetCurve(parameters);

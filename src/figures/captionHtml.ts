@@ -1,5 +1,6 @@
 import { escapeHtml } from "./escape.ts";
 import type { FigureCaption, FigureSource } from "./figureSpec.ts";
+import { howMadeHtml } from "./howMade.ts";
 
 /** Warnings first, then what a reader needs to trust the figure and to make it again. */
 export function captionHtml(caption: FigureCaption): string {
@@ -11,8 +12,7 @@ ${warnings(caption.warnings)}${caption.notes.map((note) => `<p>${escapeHtml(note
 <ul>${caption.sources.map(sourceHtml).join("")}</ul></section>
 </div>
 <h3>How this page was made</h3>
-<p>Bulkwright ${escapeHtml(caption.version)}. ${escapeHtml(caption.earthRadius)}. The same command and files give the same page:</p>
-<pre><code>${escapeHtml(caption.command)}</code></pre>
+${howMadeHtml(caption)}
 </figcaption>`;
 }
 

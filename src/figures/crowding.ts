@@ -11,7 +11,7 @@ const cellsPerAxis = 60;
 /** A planet with a place on the diagram. */
 export interface PlacedPlanet {
   readonly planet: number;
-  readonly verdict: number | null;
+  readonly verdict: number;
   readonly mass: Estimate;
   readonly radius: Estimate;
 }

@@ -15,7 +15,7 @@ export interface FigureSpec {
   readonly columns: readonly FigureColumn[];
   /** Verdicts in the order that fixes their symbol and colour. */
   readonly verdicts: readonly string[];
-  /** The planets drawn one by one. */
+  /** The planets drawn one by one: those with a verdict. */
   readonly marks: readonly PlanetMark[];
   /** The rest of a list too long to be drawn one by one. */
   readonly density: DensityMap | null;
@@ -66,7 +66,7 @@ export interface FigurePlanet {
   readonly verdict: string | null;
   /** The verdict on this planet in one plain sentence; null where `verdict` says it all. */
   readonly statement: string | null;
-  /** Why there is no verdict, or why the planet is not drawn. */
+  /** Why there is no verdict, and so no place in the diagram; mass and radius may be limits or guesses then. */
   readonly reason: string | null;
   readonly note: string | null;
   readonly values: readonly FigureValue[];
@@ -75,8 +75,8 @@ export interface FigurePlanet {
 export interface PlanetMark {
   /** Index into `planets`. */
   readonly planet: number;
-  /** Index into `verdicts`; null without a verdict. */
-  readonly verdict: number | null;
+  /** Index into `verdicts`. */
+  readonly verdict: number;
   /** 0 is drawn in full; 1 and 2 are less precise planets of a crowded diagram, drawn fainter. */
   readonly fade: 0 | 1 | 2;
 }

@@ -3,6 +3,7 @@ export const figureStyle = `figure { margin: 0; }
 .diagram { min-height: 27.5rem; margin-left: -0.4rem; }
 @media (min-width: 48rem) { .diagram { min-height: 41.25rem; } }
 @media (max-width: 47.99rem), print { .diagram .modebar { display: none; } }
+@media print { .diagram { min-height: 0; margin-left: 0; } }
 
 .legend { display: grid; gap: 0.35rem; margin: 0.5rem 0 1.25rem; font-size: 0.88rem; }
 .legend-part { display: flex; gap: 0.75rem; align-items: flex-start; }

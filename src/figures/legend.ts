@@ -29,12 +29,11 @@ function entry(group: string, swatch: string, label: string): string {
 }
 
 function verdictEntries({ marks, verdicts }: FigureSpec): string[] {
-  const counts = new Map<number | null, number>();
+  const counts = new Map<number, number>();
   for (const { verdict } of marks) counts.set(verdict, (counts.get(verdict) ?? 0) + 1);
-  return [...verdicts.keys(), null].flatMap((verdict) => {
+  return verdicts.flatMap((label, verdict) => {
     const count = counts.get(verdict);
     if (count === undefined) return [];
-    const label = verdict === null ? "no verdict" : (verdicts[verdict] ?? "");
     return [entry(verdictGroup(verdict), markSwatch(verdictStyle(verdict)), `${label} (${formatCount(count)})`)];
   });
 }
@@ -54,7 +53,6 @@ const outlines: Readonly<Record<MarkSymbol, string>> = {
   diamond: "M12 2l6 6l-6 6l-6-6z",
   "triangle-up": "M12 2.5l5.8 10h-11.6z",
   "triangle-down": "M12 13.5l5.8-10h-11.6z",
-  x: "M8 4l4 2.6l4-2.6l-2.6 4l2.6 4l-4-2.6l-4 2.6l2.6-4z",
 };
 
 function markSwatch({ colour, symbol, open }: MarkStyle): string {

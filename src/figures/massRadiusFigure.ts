@@ -38,10 +38,11 @@ function allVerdicts({ verdicts, planets }: MassRadiusInput): string[] {
   return [...new Set([...verdicts, ...found])];
 }
 
+/** Only a planet with a verdict is a pair of measurements; the others may hold a limit or a value from a relation. */
 function placePlanet(planet: FigurePlanet, index: number, verdicts: readonly string[]): PlacedPlanet[] {
   const { mass, radius, verdict } = planet;
-  if (mass === null || radius === null || !(mass.value > 0) || !(radius.value > 0)) return [];
-  return [{ planet: index, verdict: verdict === null ? null : verdicts.indexOf(verdict), mass, radius }];
+  if (verdict === null || mass === null || radius === null) return [];
+  return [{ planet: index, verdict: verdicts.indexOf(verdict), mass, radius }];
 }
 
 function axesAround(curves: readonly FigureCurve[], placed: readonly PlacedPlanet[]): FigureSpec["axes"] {
@@ -61,9 +62,9 @@ function axesAround(curves: readonly FigureCurve[], placed: readonly PlacedPlane
 function summary(curves: number, planets: number, drawn: number): string {
   const first = `${count(curves, "mass–radius curve")} computed from equations of state`;
   if (planets === 0) return `${first}.`;
-  const rest = planets - drawn;
-  const left = rest === 0 ? "" : ` and ${formatCount(rest)} only in the table, with the reason`;
-  return `${first}, and ${count(planets, "planet")}: ${formatCount(drawn)} in the diagram${left}.`;
+  if (drawn === planets) return `${first}, and ${count(planets, "planet")}.`;
+  const rest = formatCount(planets - drawn);
+  return `${first}. Of ${count(planets, "planet")}, ${formatCount(drawn)} drawn and ${rest} in the table alone, with the reason.`;
 }
 
 const count = (n: number, noun: string): string => `${formatCount(n)} ${noun}${n === 1 ? "" : "s"}`;

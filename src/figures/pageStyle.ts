@@ -22,7 +22,7 @@ ul { padding-left: 1.1rem; }
 a { color: var(--accent); }
 code, pre { font-family: "Source Code Pro", "Noto Sans Mono", "Liberation Mono", Consolas, monospace; font-size: 0.88em; }
 pre { margin: 0.4rem 0; padding: 0.6rem 0.8rem; background: var(--panel); white-space: pre-wrap; border-radius: 3px; }
-.lead { color: var(--ink-soft); max-width: 62rem; margin-bottom: 0.75rem; }
+.lead { color: var(--ink-soft); max-width: 62rem; margin-bottom: 0.75rem; text-wrap: pretty; }
 :focus-visible { outline: 2px solid var(--accent); outline-offset: 2px; }
 
 .table-region {
@@ -30,18 +30,23 @@ pre { margin: 0.4rem 0; padding: 0.6rem 0.8rem; background: var(--panel); white-
 }
 .table-region.long { content-visibility: auto; contain-intrinsic-size: auto 38rem; }
 table { border-collapse: separate; border-spacing: 0; width: 100%; font-size: 0.88rem; line-height: 1.35; }
-caption { text-align: left; padding: 0.6rem 0.75rem; color: var(--ink-soft); }
+caption { text-align: left; padding: 0.6rem 0; color: var(--ink-soft); }
+caption span { position: sticky; left: 0; display: inline-block; max-width: min(46rem, 88vw); padding: 0 0.75rem; }
 th, td { padding: 0.38rem 0.75rem; text-align: left; vertical-align: top; overflow-wrap: normal; }
-tbody th { font-weight: 600; overflow-wrap: anywhere; min-width: 8rem; }
+tbody th {
+  position: sticky; left: 0; min-width: 6rem; max-width: 14rem; background: var(--paper);
+  font-weight: 600; overflow-wrap: anywhere;
+}
 td { overflow-wrap: anywhere; }
 .sentence { min-width: 13rem; }
 thead th {
   position: sticky; top: 0; background: var(--panel); font-weight: 600; vertical-align: bottom;
   border-bottom: 1px solid var(--rule);
 }
+thead th:first-child { left: 0; z-index: 1; }
 tbody tr + tr > * { border-top: 1px solid var(--grid); }
 .number { text-align: right; font-variant-numeric: tabular-nums; white-space: nowrap; }
-th.number { white-space: normal; min-width: 5rem; }
+thead .number { white-space: normal; min-width: 5rem; }
 .unit { font-weight: 400; color: var(--ink-soft); }
 
 @media print {
@@ -50,10 +55,9 @@ th.number { white-space: normal; min-width: 5rem; }
   .table-region { max-height: none; overflow: visible; border: 0; }
   .table-region.long { content-visibility: visible; }
   table { font-size: 7.5pt; }
-  th, td { padding: 0.15rem 0.35rem; min-width: 0 !important; }
-  thead th { position: static; }
+  table th, table td { padding: 0.15rem 0.35rem; min-width: 0; overflow-wrap: break-word; }
+  thead th, tbody th { position: static; }
   tr, figure { break-inside: avoid; }
   h2, h3 { break-after: avoid; }
-  .screen-only { display: none; }
 }
 `;

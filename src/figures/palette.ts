@@ -16,7 +16,7 @@ export type ColourRole =
   | "density-low"
   | "density-high"
   | `curve-${1 | 2 | 3 | 4 | 5 | 6 | 7 | 8}`
-  | `verdict-${1 | 2 | 3 | 4 | 5 | 6}`;
+  | `verdict-${1 | 2 | 3 | 4 | 5}`;
 
 export type Palette = Readonly<Record<ColourRole, string>>;
 
@@ -44,7 +44,6 @@ export const lightPalette: Palette = {
   "verdict-3": "#4c9f9e",
   "verdict-4": "#1c2da0",
   "verdict-5": "#af8a1f",
-  "verdict-6": "#5e6567",
 };
 
 export const darkPalette: Palette = {
@@ -71,7 +70,6 @@ export const darkPalette: Palette = {
   "verdict-3": "#9bfbeb",
   "verdict-4": "#4e77ee",
   "verdict-5": "#f8ee2b",
-  "verdict-6": "#7e7677",
 };
 
 /** How a palette enters a style sheet. */

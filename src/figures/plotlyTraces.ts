@@ -69,14 +69,13 @@ const opacities = [1, 0.5, 0.2] as const;
 
 function planetTraces(spec: FigureSpec, fade: 0 | 1 | 2): PlotlyTrace[] {
   const marks = spec.marks.filter((mark) => mark.fade === fade);
-  const verdicts = [null, ...spec.verdicts.keys()];
-  return verdicts.flatMap((verdict) => {
+  return spec.verdicts.flatMap((_, verdict) => {
     const own = marks.filter((mark) => mark.verdict === verdict);
     return own.length > 0 ? [planetTrace(spec, own, verdict, opacities[fade])] : [];
   });
 }
 
-function planetTrace(spec: FigureSpec, marks: PlanetMark[], verdict: number | null, opacity: number): PlotlyTrace {
+function planetTrace(spec: FigureSpec, marks: PlanetMark[], verdict: number, opacity: number): PlotlyTrace {
   const { colour, symbol, open } = verdictStyle(verdict);
   const color = `var(--${colour})`;
   const planets = marks.map((mark) => spec.planets[mark.planet] as FigurePlanet);
@@ -122,10 +121,7 @@ function errorBars(estimates: readonly Estimate[], color: string): PlotlyTrace {
   };
 }
 
-function planetHover(
-  { name, mass, radius, verdict, statement, reason, note, values }: FigurePlanet,
-  spec: FigureSpec,
-): string {
+function planetHover({ name, mass, radius, verdict, statement, note, values }: FigurePlanet, spec: FigureSpec): string {
   const lines = values.flatMap((value, i) => {
     const column = spec.columns[i];
     if (value === null || value === "" || !column) return [];
@@ -135,7 +131,7 @@ function planetHover(
     name,
     `${formatValue(mass)} ${spec.axes.mass.unit}`,
     `${formatValue(radius)} ${spec.axes.radius.unit}`,
-    statement ?? verdict ?? `no verdict: ${reason ?? "not classified"}`,
+    statement ?? verdict ?? "",
     ...lines,
     ...(note ? [note] : []),
   ]);

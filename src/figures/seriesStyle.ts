@@ -7,7 +7,7 @@ export interface MarkStyle {
   readonly open: boolean;
 }
 
-export type MarkSymbol = "square" | "circle" | "diamond" | "triangle-up" | "triangle-down" | "x";
+export type MarkSymbol = "square" | "circle" | "diamond" | "triangle-up" | "triangle-down";
 
 /** Makes symbols of one nominal size look alike. */
 export const symbolScale: Readonly<Record<MarkSymbol, number>> = {
@@ -16,14 +16,12 @@ export const symbolScale: Readonly<Record<MarkSymbol, number>> = {
   diamond: 1.05,
   "triangle-up": 1.3,
   "triangle-down": 1.3,
-  x: 0.9,
 };
 
 const symbols: readonly MarkSymbol[] = ["square", "circle", "diamond", "triangle-up", "triangle-down"];
 
-/** Filled symbols first, then the same ones open; null is a planet without a verdict. */
-export function verdictStyle(verdict: number | null): MarkStyle {
-  if (verdict === null) return { colour: "verdict-6", symbol: "x", open: false };
+/** Filled symbols first, then the same ones open. */
+export function verdictStyle(verdict: number): MarkStyle {
   const kind = verdict % symbols.length;
   return {
     colour: `verdict-${(kind + 1) as 1 | 2 | 3 | 4 | 5}`,
@@ -40,5 +38,5 @@ export function curveColour(curve: number): ColourRole {
 
 /** Names that tie what is drawn to its entry in the legend. */
 export const curveGroup = (curve: number): string => `curve-${curve}`;
-export const verdictGroup = (verdict: number | null): string => `verdict-${verdict ?? "none"}`;
+export const verdictGroup = (verdict: number): string => `verdict-${verdict}`;
 export const densityGroup = "density";

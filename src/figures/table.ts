@@ -33,12 +33,12 @@ export function tableHtml({ id, caption, columns, rows }: PageTable): string {
   const shown = rows.slice(0, tableRowLimit);
   const cut =
     shown.length < rows.length ? `; the first ${formatCount(shown.length)} of ${formatCount(rows.length)} rows` : "";
-  const head = columns.map((column) => `<th scope="col"${cellClass(column)}>${columnTitle(column)}</th>`).join("");
+  const head = columns.map((column) => `<th scope="col"${classAttribute(column)}>${columnTitle(column)}</th>`).join("");
   const body = shown.map((row) => rowHtml(row, columns)).join("\n");
   const long = shown.length > 300 ? " long" : "";
   return `<div class="table-region${long}" role="region" aria-labelledby="${id}-caption" tabindex="0">
 <table id="${id}">
-<caption id="${id}-caption">${escapeHtml(caption + cut)}</caption>
+<caption id="${id}-caption"><span>${escapeHtml(caption + cut)}</span></caption>
 <thead><tr>${head}</tr></thead>
 <tbody>
 ${body}
@@ -47,20 +47,25 @@ ${body}
 </div>`;
 }
 
-function columnTitle({ title, unit }: TableColumn): string {
+export function columnTitle({ title, unit }: TableColumn): string {
   return unit ? `${escapeHtml(title)} <span class="unit">(${escapeHtml(unit)})</span>` : escapeHtml(title);
 }
 
 function rowHtml(row: readonly FigureValue[], columns: readonly TableColumn[]): string {
   const cells = row.map((value, i) => {
     const text = `<bdi>${escapeHtml(formatValue(value, columns[i]?.digits))}</bdi>`;
-    if (i === 0) return `<th scope="row"${cellClass(columns[0])}>${text}</th>`;
-    return value === null ? "<td></td>" : `<td${cellClass(columns[i])}>${text}</td>`;
+    if (i === 0) return `<th scope="row"${classAttribute(columns[0])}>${text}</th>`;
+    return value === null ? "<td></td>" : `<td${classAttribute(columns[i])}>${text}</td>`;
   });
   return `<tr>${cells.join("")}</tr>`;
 }
 
-function cellClass(column?: TableColumn): string {
-  if (column?.numeric) return ' class="number"';
-  return column?.wide ? ' class="sentence"' : "";
+function classAttribute(column?: TableColumn): string {
+  const name = cellClass(column);
+  return name === "" ? "" : ` class="${name}"`;
+}
+
+export function cellClass(column?: TableColumn): string {
+  if (column?.numeric) return "number";
+  return column?.wide ? "sentence" : "";
 }

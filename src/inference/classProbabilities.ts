@@ -4,7 +4,7 @@ import { type Measurement, massWindow } from "./measurement.ts";
 import { atDeviation, deviation, shareBetween } from "./splitNormal.ts";
 
 /** Where, in errors of the radius, panels over mass end, so that none holds a whole step of the radius probability. */
-const STEP_EDGES = [-8, -5, -3, -2, -1, 0, 1, 2, 3, 5, 8];
+const STEP_EDGES = [-7, -4.5, -2.2, 0, 2.2, 4.5, 7];
 
 /**
  * Probabilities that a planet lies below, between and above boundary curves R_1(M) <= R_2(M) <= …, smallest radius
@@ -20,10 +20,13 @@ export function classProbabilities(
   boundaries: readonly RadiusCurve[],
   range: MassRange,
 ): number[] {
-  const { from, to } = massWindow(mass, range);
+  const { lightest, heaviest } = massWindow(mass, range);
   const steps = boundaries.flatMap((curve) => STEP_EDGES.map((k) => curve.massWithRadius(atDeviation(radius, k))));
-  const inner = [mass.mode, ...steps].filter((m) => m !== undefined && m > from && m < to) as number[];
-  const masses = densityQuadrature((m) => -0.5 * deviation(mass, m) ** 2, [from, ...inner.sort((a, b) => a - b), to]);
+  const inner = [mass.mode, ...steps].filter((m) => m !== undefined && m > lightest && m < heaviest) as number[];
+  const masses = densityQuadrature(
+    (m) => -0.5 * deviation(mass, m) ** 2,
+    [lightest, ...inner.sort((a, b) => a - b), heaviest],
+  );
 
   const sums = new Array<number>(boundaries.length + 1).fill(0);
   masses.nodes.forEach((m, i) => {

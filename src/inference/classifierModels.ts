@@ -1,6 +1,6 @@
-import { type MassRange, type MeasuredCurve, type RadiusSolver, radiusCurve } from "../curve/radiusCurve.ts";
+import { type MassRange, type MeasuredCurve, radiusCurve } from "../curve/radiusCurve.ts";
 import { type RadiusGrid, radiusGrid } from "../curve/radiusGrid.ts";
-import { sweepMasses } from "../curve/sweep.ts";
+import { radiusSolver } from "../curve/radiusSolver.ts";
 import { MASS_RANGE } from "../interior/massErrors.ts";
 import type { Composition } from "../library/composition.ts";
 import type { ClassifierModels } from "./classifier.ts";
@@ -40,11 +40,11 @@ export function buildClassifierModels(compositions: ClassifierCompositions, rang
   const { iron, silicate, water, ironSilicateFamily, waterOnEarthLikeFamily } = compositions;
   return {
     labels: compositions.labels ?? ["iron", "silicate", "water"],
-    iron: radiusCurve(solverOf(iron), range),
-    silicate: radiusCurve(solverOf(silicate), range),
-    water: radiusCurve(solverOf(water), range),
-    ironSilicate: radiusGrid((fraction) => solverOf(ironSilicateFamily(fraction)), range),
-    waterOnEarthLike: radiusGrid((fraction) => solverOf(waterOnEarthLikeFamily(fraction)), range),
+    iron: radiusCurve(radiusSolver(iron), range),
+    silicate: radiusCurve(radiusSolver(silicate), range),
+    water: radiusCurve(radiusSolver(water), range),
+    ironSilicate: radiusGrid((fraction) => radiusSolver(ironSilicateFamily(fraction)), range),
+    waterOnEarthLike: radiusGrid((fraction) => radiusSolver(waterOnEarthLikeFamily(fraction)), range),
   };
 }
 
@@ -59,8 +59,4 @@ export function standardFamilies(parts: {
     ironSilicateFamily: innerFractionFamily(parts.iron, parts.silicate),
     waterOnEarthLikeFamily: outerFractionFamily(parts.earthLike, parts.water),
   };
-}
-
-function solverOf(composition: Composition): RadiusSolver {
-  return (masses) => Array.from(sweepMasses(composition, masses), ({ planet }) => planet?.radius);
 }

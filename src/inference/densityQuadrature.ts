@@ -38,18 +38,29 @@ export function densityQuadrature(
   return new Density(panels, logDensity, peak, rule);
 }
 
+/** The `logIntegral` of `densityQuadrature` alone, for inner loops. */
+export function logIntegral(logDensity: (x: number) => number, edges: readonly number[], rule = DEFAULT_RULE): number {
+  const { panels, peak } = resolvedPanels(logDensity, edges);
+  let total = 0;
+  for (const { from, to } of panels) {
+    const half = (to - from) / 2;
+    let sum = 0;
+    for (let i = 0; i < rule.nodes.length; i++) {
+      sum += rule.weights[i] * Math.exp(logDensity(from + half * (1 + rule.nodes[i])) - peak);
+    }
+    total += half * sum;
+  }
+  return peak + Math.log(total);
+}
+
 function resolvedPanels(
   logDensity: (x: number) => number,
   edges: readonly number[],
 ): { panels: Panel[]; peak: number } {
   let peak = Number.NEGATIVE_INFINITY;
-  let peakAt = Number.NaN;
   const sample = (x: number): number => {
     const value = logDensity(x);
-    if (value > peak) {
-      peak = value;
-      peakAt = x;
-    }
+    peak = Math.max(peak, value);
     return value;
   };
   const panel = (from: number, to: number, atFrom: number, atTo: number): SampledPanel => ({
@@ -59,9 +70,8 @@ function resolvedPanels(
     atMiddle: sample((from + to) / 2),
     atTo,
   });
-  // Between samples the density can be higher than at any of them only next to the highest.
-  const negligible = (p: SampledPanel): boolean =>
-    highest(p) < peak - NEGLIGIBLE && !(p.from <= peakAt && peakAt <= p.to);
+  // Between samples the density can be higher than at any of them only next to the highest, which no such panel touches.
+  const negligible = (p: SampledPanel): boolean => highest(p) < peak - NEGLIGIBLE;
 
   const atEdges = edges.map(sample);
   let open = edges.slice(1).map((to, i) => panel(edges[i], to, atEdges[i], atEdges[i + 1]));

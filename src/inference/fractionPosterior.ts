@@ -1,13 +1,13 @@
 import type { MassRange, RadiusCurve } from "../curve/radiusCurve.ts";
 import type { Density } from "./density.ts";
-import { densityQuadrature } from "./densityQuadrature.ts";
+import { densityQuadrature, logIntegral } from "./densityQuadrature.ts";
 import { type Measurement, massWindow } from "./measurement.ts";
 import { deviation } from "./splitNormal.ts";
 
 /** Planets of every mass and every value, 0 to 1, of one mass fraction. */
 export interface PlanetFamily extends MassRange {
-  /** The curve of one fraction. */
-  member(fraction: number): RadiusCurve;
+  /** The curve of one fraction, at least over the masses of `within`. */
+  member(fraction: number, within: MassRange): RadiusCurve;
 }
 
 /** A median and the central 68 % around it (16th to 84th percentile), as distances from the median. */
@@ -31,8 +31,9 @@ const KINK_STEPS = 16;
  * Checked test/inference/fractionPosterior.test.ts
  */
 export function fractionPosterior(measurement: Measurement, family: PlanetFamily, range: MassRange): Density {
-  const edges = [...FIRST_EDGES, ...kinkOf(measurement, family, range)].sort((a, b) => a - b);
-  return densityQuadrature((f) => logLikelihood(measurement, family.member(f), range), edges);
+  const masses = massWindow(measurement.mass, range);
+  const edges = [...FIRST_EDGES, ...fractionKinks(measurement, family, masses)].sort((a, b) => a - b);
+  return densityQuadrature((f) => logLikelihood(measurement, family.member(f, masses), masses), edges);
 }
 
 export function fractionEstimate(posterior: Density): FractionEstimate {
@@ -40,10 +41,23 @@ export function fractionEstimate(posterior: Density): FractionEstimate {
   return { median, minus: median - posterior.quantile(0.16), plus: posterior.quantile(0.84) - median };
 }
 
-/** The fraction that gives the measured mass the measured radius: unequal radius errors leave a kink there. */
-function kinkOf({ mass, radius }: Measurement, family: PlanetFamily, range: MassRange): number[] {
-  if (radius.minus === radius.plus || !(mass.mode >= range.lightest && mass.mode <= range.heaviest)) return [];
-  const excess = (f: number) => family.member(f).radius(mass.mode) - radius.mode;
+/** ln ∫ p(M_obs | M) p(R_obs | R(M)) dM over `masses` for one composition, but for a constant that all share. */
+export function logLikelihood({ mass, radius }: Measurement, curve: RadiusCurve, masses: MassRange): number {
+  const kinks = [mass.mode, radius.minus === radius.plus ? undefined : curve.massWithRadius(radius.mode)];
+  const inner = kinks.filter((m) => m !== undefined && m > masses.lightest && m < masses.heaviest) as number[];
+  return logIntegral(
+    (m) => -0.5 * (deviation(mass, m) ** 2 + deviation(radius, curve.radius(m)) ** 2),
+    [masses.lightest, ...inner.sort((a, b) => a - b), masses.heaviest],
+  );
+}
+
+/**
+ * The fraction that gives a planet of the measured mass the measured radius, if there is one: where the errors of the
+ * radius are unequal, and the mass well known, the posterior has a kink there.
+ */
+function fractionKinks({ mass, radius }: Measurement, family: PlanetFamily, masses: MassRange): number[] {
+  if (radius.minus === radius.plus || !(mass.mode >= masses.lightest && mass.mode <= masses.heaviest)) return [];
+  const excess = (f: number) => family.member(f, masses).radius(mass.mode) - radius.mode;
   const rising = excess(0) < 0;
   if (rising !== excess(1) > 0) return [];
   let low = 0;
@@ -54,14 +68,4 @@ function kinkOf({ mass, radius }: Measurement, family: PlanetFamily, range: Mass
     else high = middle;
   }
   return [(low + high) / 2];
-}
-
-/** ln ∫ p(M_obs | M) p(R_obs | R(M)) dM for one composition, but for a constant that all compositions share. */
-export function logLikelihood({ mass, radius }: Measurement, curve: RadiusCurve, range: MassRange): number {
-  const { from, to } = massWindow(mass, range);
-  // Both likelihoods have a kink at their mode if their errors are unequal.
-  const kinks = [mass.mode, curve.massWithRadius(radius.mode)].filter((m) => m !== undefined && m > from && m < to);
-  const edges = [from, ...(kinks as number[]).sort((a, b) => a - b), to];
-  return densityQuadrature((m) => -0.5 * (deviation(mass, m) ** 2 + deviation(radius, curve.radius(m)) ** 2), edges)
-    .logIntegral;
 }

@@ -11,10 +11,10 @@ export interface Measurement {
 const FARTHEST = 9;
 
 /** The masses worth integrating over: within the models' range and near the measurement. */
-export function massWindow(mass: SplitNormal, range: MassRange): { from: number; to: number } {
+export function massWindow(mass: SplitNormal, range: MassRange): MassRange {
   return {
-    from: Math.max(range.lightest, atDeviation(mass, -FARTHEST)),
-    to: Math.min(range.heaviest, atDeviation(mass, FARTHEST)),
+    lightest: Math.max(range.lightest, atDeviation(mass, -FARTHEST)),
+    heaviest: Math.min(range.heaviest, atDeviation(mass, FARTHEST)),
   };
 }
 

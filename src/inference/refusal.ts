@@ -7,7 +7,7 @@ import type { MeasuredQuantity, PlanetRow } from "../planets/quantity.ts";
 export function refusalReasons(row: PlanetRow): string[] {
   const { mass, minimumMass, radius } = row.quantities;
   const reasons = [...quantityReasons("mass", mass ?? minimumMass), ...quantityReasons("radius", radius)];
-  // A cell that could not be read leaves its quantity missing; the cell's issue says why.
+  // A cell that could not be read leaves its quantity or error missing; the issue of that cell says why.
   if (reasons.some((reason) => reason.endsWith("-missing"))) reasons.push(...row.issues.map(({ code }) => code));
   return [...new Set(reasons)];
 }

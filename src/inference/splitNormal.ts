@@ -26,9 +26,9 @@ export function atDeviation(of: SplitNormal, deviations: number): number {
 
 /** Share of the area between `from` and `to` (infinite allowed), accurate where both lie in the same tail. */
 export function shareBetween(of: SplitNormal, from: number, to: number): number {
-  if (to <= of.mode) return shareBelow(of, to) - shareBelow(of, from);
-  if (from >= of.mode) return shareAbove(of, from) - shareAbove(of, to);
-  return 1 - shareBelow(of, from) - shareAbove(of, to);
+  const lower = from < of.mode ? shareBelow(of, Math.min(to, of.mode)) - shareBelow(of, from) : 0;
+  const upper = to > of.mode ? shareAbove(of, Math.max(from, of.mode)) - shareAbove(of, to) : 0;
+  return lower + upper;
 }
 
 /** For x at or below the mode. */

@@ -37,7 +37,8 @@ export function verdictFor(probabilities: readonly number[], labels: BoundaryLab
   return { code: "undecided", statement: `cannot be told apart: ${named.map(stated).join(" or ")}` };
 }
 
-function classPhrases([dense, middle, light]: BoundaryLabels): string[] {
+/** What a planet of each class is said to be, densest first. */
+export function classPhrases([dense, middle, light]: BoundaryLabels): string[] {
   return [
     `denser than ${dense}`,
     `between ${dense} and ${middle}`,

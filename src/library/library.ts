@@ -2,8 +2,8 @@ import type { Material } from "../eos/material.ts";
 import { InputError } from "../errors.ts";
 import { buildMaterial } from "./buildMaterial.ts";
 import type { Composition } from "./composition.ts";
+import { inFile, unknownName } from "./libraryErrors.ts";
 import { type Entry, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
-import { suggestion } from "./nearest.ts";
 import { readDensityTable } from "./readDensityTable.ts";
 import { type NameLookup, resolveLayers } from "./resolveLayers.ts";
 import { resolveTemperature } from "./resolveTemperature.ts";
@@ -150,29 +150,4 @@ function compositionOf(file: CompositionFile, layers: Composition["layers"]): Co
   const { composition: name, title, source, surface = DEFAULT_SURFACE } = file;
   const temperature = resolveTemperature(file.temperature, layers, surface.temperatureK);
   return { name, title, ...(source && { source }), surface, layers, ...(temperature && { temperature }) };
-}
-
-/** Runs `action`; an error that does not yet say in which file it arose is given this one, and the key there. */
-function inFile<Result>(file: string, action: () => Result, key?: string): Result {
-  try {
-    return action();
-  } catch (error) {
-    if (!(error instanceof InputError) || error.place.file !== undefined) throw error;
-    const { place, found, remedy } = error;
-    const message = `${file}: ${key === undefined ? "" : `${key}: `}${error.message}`;
-    throw new InputError(
-      error.code,
-      message,
-      { ...place, file, column: key ?? place.column, found, remedy },
-      { cause: error },
-    );
-  }
-}
-
-function unknownName(kind: "material" | "composition", name: string, known: readonly string[]): InputError {
-  return new InputError(
-    `unknown-${kind}`,
-    `no ${kind} is named "${name}".${suggestion(name, known)} Known: ${[...known].sort().join(", ")}.`,
-    { found: name },
-  );
 }

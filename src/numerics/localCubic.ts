@@ -5,17 +5,17 @@
  * Checked test/numerics/localCubic.test.ts
  */
 export class LocalCubic {
-  private readonly x: Float64Array;
+  readonly nodes: Float64Array;
   /** Divided differences of order 0 to 3 at each node: [y_j], [y_j, y_(j+1)], … */
   private readonly differences: Float64Array;
 
   constructor(x: ArrayLike<number>, y: ArrayLike<number>) {
-    this.x = Float64Array.from(x);
-    this.differences = dividedDifferences(this.x, y);
+    this.nodes = Float64Array.from(x);
+    this.differences = dividedDifferences(this.nodes, y);
   }
 
   value(x: number): number {
-    const nodes = this.x;
+    const { nodes } = this;
     let low = 0;
     let high = nodes.length - 1;
     while (high - low > 1) {

@@ -16,6 +16,8 @@ export interface QuantitySource {
   readonly limit?: number;
   readonly unit: Unit;
   readonly unitSource: UnitSource;
+  /** SI per unit, with the Earth radius the user has chosen. */
+  readonly factor: number;
 }
 
 /** How to read every row of a list. */
@@ -31,8 +33,10 @@ export interface ColumnPlan {
 export interface ListConventions {
   /** `nan` stands for a missing value, so that as an error it cannot also mean "this is a limit". */
   readonly nanIsMissing: boolean;
-  /** Lower errors carry a minus sign, so that -1 is an error of 1 and not a missing one. */
-  readonly lowerErrorsAreSigned: boolean;
+  /** -1 stands for a missing value or upper error, so that as a lower error it is no signed 1. */
+  readonly minusOneIsMissing: boolean;
+  /** `5,2` is a number. */
+  readonly decimalComma: boolean;
 }
 
 /** A place where the reader could only guess. */

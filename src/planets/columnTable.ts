@@ -197,7 +197,7 @@ export const quantityColumns: Readonly<Record<QuantityName, QuantityColumns>> = 
     dimension: "temperature",
     usualUnit: "k",
     body: "star",
-    words: "temperature temp t",
+    words: "temperature temp t teff",
     names: "teff t_eff effective_temperature effective_temp koi_steff",
   },
   starDensity: {
@@ -237,6 +237,7 @@ export const quantityColumns: Readonly<Record<QuantityName, QuantityColumns>> = 
     dimension: "time",
     usualUnit: "gyr",
     body: "star",
+    words: "age",
     names: "age koi_sage",
   },
   rightAscension: {

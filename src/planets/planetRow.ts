@@ -1,62 +1,43 @@
-import type { ColumnPlan, ListConventions, QuantitySource } from "./columnPlan.ts";
+import type { QuantitySource } from "./columnPlan.ts";
 import { deriveQuantities } from "./deriveQuantities.ts";
-import type { RawColumn, RawRecord } from "./formats/rawTable.ts";
-import { type MeasureContext, measure } from "./measure.ts";
+import type { RawRecord } from "./formats/rawTable.ts";
+import { measure } from "./measure.ts";
 import { kindOfProvenance } from "./provenance.ts";
-import type { MeasuredQuantity, Origin, PlanetRow, QuantityName, RowIssue, TextName } from "./quantity.ts";
-import { siFactor } from "./unitTable.ts";
-
-export interface RowReader {
-  readonly file: string;
-  readonly columns: readonly RawColumn[];
-  readonly plan: ColumnPlan;
-  readonly conventions: ListConventions;
-  readonly decimalComma: boolean;
-  /** [m] */
-  readonly earthRadius: number;
-}
+import type { MeasuredQuantity, PlanetRow, QuantityName, TextName } from "./quantity.ts";
+import { type ListContext, RowContext } from "./rowContext.ts";
 
 type Mutable<T> = { -readonly [K in keyof T]: T[K] };
-
-/** One record of a list as a planet row: every cell interpreted, nothing lost, problems noted as issues. */
-export function readRow(record: RawRecord, row: number, reader: RowReader): PlanetRow {
-  const { line, cells } = record;
-  const issues: RowIssue[] = [];
-  const place = (index: number): Origin => ({ file: reader.file, line, column: reader.columns[index]?.name ?? "" });
-  const report = (code: string, index: number, message: string): void => {
-    issues.push({ code, origin: place(index), found: cells[index] ?? "", message });
-  };
-  const texts = readTexts(cells, reader.plan.texts);
-  const isShifted = checkWidth(cells, reader.columns.length, report);
-  const found: FoundQuantities = { quantities: {}, twins: {} };
-  if (!isShifted) {
-    for (const [name, sources] of reader.plan.quantities) {
-      const context = { ...reader.conventions, cells, place, issue: report, decimalComma: reader.decimalComma };
-      readQuantity(name, sources, context, reader.earthRadius, found);
-    }
-    applyProvenance(found, texts);
-    deriveQuantities(found.quantities, (name) => reader.plan.quantities.has(name));
-  }
-  return { row, line, name: nameOf(texts), quantities: found.quantities, twins: found.twins, texts, cells, issues };
-}
 
 interface FoundQuantities {
   readonly quantities: Partial<Record<QuantityName, MeasuredQuantity>>;
   readonly twins: Partial<Record<QuantityName, MeasuredQuantity[]>>;
 }
 
+/** One record of a list as a planet row: every cell interpreted, nothing lost, problems noted as issues. */
+export function readRow(record: RawRecord, row: number, list: ListContext): PlanetRow {
+  const context = new RowContext(record, list);
+  const { line, cells, issues } = context;
+  const texts = readTexts(cells, list.plan.texts);
+  const found: FoundQuantities = { quantities: {}, twins: {} };
+  if (!isShifted(context)) {
+    for (const [name, sources] of list.plan.quantities) readQuantity(name, sources, context, found);
+    applyProvenance(found, texts);
+    deriveQuantities(found.quantities, (name) => list.plan.quantities.has(name));
+  }
+  return { row, line, name: nameOf(texts), quantities: found.quantities, twins: found.twins, texts, cells, issues };
+}
+
 function readQuantity(
   name: QuantityName,
   sources: readonly QuantitySource[],
-  context: Omit<MeasureContext, "factor">,
-  earthRadius: number,
-  found: FoundQuantities,
+  row: RowContext,
+  { quantities, twins }: FoundQuantities,
 ): void {
   for (const source of sources) {
-    const quantity = measure(source, { ...context, factor: siFactor(source.unit, earthRadius) });
+    const quantity = measure(source, row);
     if (quantity === undefined) continue;
-    if (found.quantities[name] === undefined) found.quantities[name] = quantity;
-    else found.twins[name] = [...(found.twins[name] ?? []), quantity];
+    if (quantities[name] === undefined) quantities[name] = quantity;
+    else twins[name] = [...(twins[name] ?? []), quantity];
   }
 }
 
@@ -77,23 +58,16 @@ const nameOf = ({ name, host, letter }: PlanetRow["texts"]): string =>
   name ?? (host !== undefined && letter !== undefined ? `${host} ${letter}` : (host ?? ""));
 
 /** Whether the numbers may stand in the wrong columns: more cells than columns, the extra ones not empty. */
-function checkWidth(
-  cells: readonly string[],
-  width: number,
-  report: (code: string, index: number, message: string) => void,
-): boolean {
+function isShifted(row: RowContext): boolean {
+  const { cells } = row;
+  const width = row.list.columns.length;
   if (cells.length === width) return false;
-  const isShifted = cells.slice(width).some((cell) => cell.trim() !== "");
-  if (cells.length > width && !isShifted) return false;
-  const consequence = isShifted
-    ? "its numbers may stand in the wrong columns and are not used"
-    : "the rest counts as missing";
-  report(
-    "ragged-row",
-    Math.min(cells.length, width) - 1,
-    `the row has ${cells.length} cells, the header ${width}; ${consequence}`,
-  );
-  return isShifted;
+  const hasExtra = cells.slice(width).some((cell) => cell.trim() !== "");
+  if (cells.length > width && !hasExtra) return false;
+  const consequence = hasExtra ? "its numbers may be in the wrong columns and are not used" : "the rest are missing";
+  const message = `the row has ${cells.length} cells, the header ${width}; ${consequence}`;
+  row.report("ragged-row", Math.min(cells.length, width) - 1, message);
+  return hasExtra;
 }
 
 /** What the provenance columns, and a minimum mass repeated as the mass, say about what the numbers are. */

@@ -6,11 +6,12 @@ import { decodeText } from "./decodeText.ts";
 import { type ColumnExplanation, explainColumns, misspellings } from "./explainColumns.ts";
 import type { ListFormat, RawColumn, RawRecord, RawTable } from "./formats/rawTable.ts";
 import { readTable } from "./formats/readTable.ts";
-import { findConventions, usesDecimalComma } from "./listConventions.ts";
+import { findConventions } from "./listConventions.ts";
 import { refuseLostDecimals } from "./lostDecimals.ts";
-import { type RowReader, readRow } from "./planetRow.ts";
+import { readRow } from "./planetRow.ts";
 import type { PlanetRow, QuantityName } from "./quantity.ts";
 import { recogniseColumns } from "./recogniseColumns.ts";
+import type { ListContext } from "./rowContext.ts";
 
 export interface ListOptions extends ColumnChoices {
   /** Named in messages and origins. */
@@ -41,19 +42,13 @@ export interface PlanetList {
 export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options: ListOptions): Promise<PlanetList> {
   const { file, table, sample, batches } = await openTable(chunks, options);
   const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
-  if (ambiguities.length > 0) throw ambiguous(file, ambiguities);
+  if (ambiguities.length > 0) throw ambiguousColumns(file, ambiguities);
   refuseLostDecimals(plan, table.columns, sample, file);
   requireColumns(file, table.columns, plan, options.needs ?? ["mass", "minimumMass", "radius"]);
-  const reader: RowReader = {
-    file,
-    columns: table.columns,
-    plan,
-    conventions: findConventions(plan, sample),
-    decimalComma: usesDecimalComma(table.format),
-    earthRadius: options.earthRadius,
-  };
+  const conventions = findConventions(plan, sample, table.format);
+  const context: ListContext = { file, columns: table.columns, plan, conventions };
   const notes = [...plan.notes, ...misspellings(explainColumns(table.columns, plan, [], sample))];
-  return { file, format: table.format, columns: table.columns, plan, notes, rows: readRows(batches, reader) };
+  return { file, format: table.format, columns: table.columns, plan, notes, rows: readRows(batches, context) };
 }
 
 /**
@@ -101,9 +96,9 @@ async function openTable(chunks: AsyncIterable<Uint8Array>, { file }: ListOption
   return { file, table, sample: head.slice(0, SAMPLE_RECORDS), batches: batches() };
 }
 
-async function* readRows(batches: AsyncIterable<readonly RawRecord[]>, reader: RowReader): AsyncGenerator<PlanetRow> {
+async function* readRows(batches: AsyncIterable<readonly RawRecord[]>, list: ListContext): AsyncGenerator<PlanetRow> {
   let row = 0;
-  for await (const batch of batches) for (const record of batch) yield readRow(record, ++row, reader);
+  for await (const batch of batches) for (const record of batch) yield readRow(record, ++row, list);
 }
 
 function requireColumns(
@@ -127,7 +122,8 @@ const canBeDerived = ({ quantities }: ColumnPlan): boolean =>
   (quantities.has("radiusRatio") && quantities.has("starRadius")) ||
   (quantities.has("velocityAmplitude") && quantities.has("period") && quantities.has("starMass"));
 
-function ambiguous(file: string, ambiguities: readonly Ambiguity[]): InputError {
+/** The error of a list with columns that could only be guessed at: every reading, with the option that settles for it. */
+export function ambiguousColumns(file: string, ambiguities: readonly Ambiguity[]): InputError {
   const lines = ambiguities.flatMap(({ columns, readings }) => [
     `  ${columns.map((name) => `"${name}"`).join(", ")} could be`,
     ...readings.map(({ meaning, option }) => `    ${meaning}: ${option}`),

@@ -9,6 +9,13 @@ import { type KnownList, knownLists } from "./knownLists.ts";
 import { ownColumn } from "./ownColumn.ts";
 import type { QuantityName, TextName } from "./quantity.ts";
 import { type Resolved, resolveBounds, resolveUnit } from "./resolveUnit.ts";
+import { siFactor } from "./unitTable.ts";
+
+export interface RecogniserOptions extends ColumnChoices {
+  readonly file: string;
+  /** [m] */
+  readonly earthRadius: number;
+}
 
 export interface Recognised {
   readonly plan: ColumnPlan;
@@ -22,7 +29,7 @@ export interface Recognised {
 export function recogniseColumns(
   columns: readonly RawColumn[],
   sample: readonly RawRecord[],
-  choices: ColumnChoices & { readonly file: string },
+  choices: RecogniserOptions,
 ): Recognised {
   const names = columns.map((column) => column.name);
   const chosen = chosenColumns(names, choices);
@@ -100,7 +107,7 @@ const twoQuantities = (name: string, readings: readonly QuantityMeaning[]): Ambi
 interface SourceRequest {
   readonly columns: readonly RawColumn[];
   readonly sample: readonly RawRecord[];
-  readonly choices: ColumnChoices & { readonly file: string };
+  readonly choices: RecogniserOptions;
   readonly known: KnownList | undefined;
   readonly index: number;
   readonly quantity: QuantityName;
@@ -118,7 +125,8 @@ function resolveSource(request: SourceRequest): Resolved<QuantitySource> {
     : { value: errors?.areBounds ?? false };
   if (bounds.value === undefined) return { note: bounds.note, ambiguity: bounds.ambiguity };
   const { minus, plus, limit } = errors ?? {};
-  const source = { quantity, value: index, minus, plus, limit, errorsAreBounds: bounds.value, ...unit.value };
+  const factor = siFactor(unit.value.unit, choices.earthRadius);
+  const source = { quantity, value: index, minus, plus, limit, errorsAreBounds: bounds.value, ...unit.value, factor };
   return { value: source, note: unit.note };
 }
 
@@ -134,7 +142,7 @@ function preferred(
     return at === -1 ? groups.length : at;
   };
   const best = Math.min(...sources.map(rank));
-  const ranked = sources.filter((source) => best === groups.length || rank(source) === best);
+  const ranked = sources.filter((source) => rank(source) === groups.length || rank(source) === best);
   const order = ["earth", "jupiter"];
   const place = (source: QuantitySource): number =>
     (order.indexOf(source.unit.id) + order.length + 1) % (order.length + 1);

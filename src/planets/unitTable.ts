@@ -93,7 +93,7 @@ const table: readonly (readonly [unit: Unit, spellings: string])[] = [
   [{ id: "deg", dimension: "angle", factor: Math.PI / 180 }, "deg degree degrees °"],
   [{ id: "rad", dimension: "angle", factor: 1 }, "rad radian radians"],
   [{ id: "dex", dimension: "metallicity", factor: 1 }, "dex sun feh mh fe_h"],
-  [{ id: "1", dimension: "ratio", factor: 1 }, "1 ratio none dimensionless"],
+  [{ id: "1", dimension: "ratio", factor: 1 }, "ratio dimensionless"],
   [{ id: "percent", dimension: "ratio", factor: 0.01 }, "percent %"],
 ];
 

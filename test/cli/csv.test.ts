@@ -13,7 +13,8 @@ const provenance = {
   note: [],
 };
 
-test("computed numbers have 12 significant digits", () => {
+test("computed numbers have 12 significant digits, whole ones those they need", () => {
+  expect(csvRecord([12n])).toBe("12\n");
   expect(csvRecord([1, Math.PI * 1e6, 1.5e-10, undefined])).toBe("1.00000000000,3141592.65359,1.50000000000e-10,\n");
 });
 

@@ -23,6 +23,13 @@ test("exit codes reach the shell", () => {
   expect(spawnSync(process.execPath, [main, "no-such-command"]).status).toBe(2);
 });
 
+test("the built command writes files", () => {
+  const out = join(folder, "curve.csv");
+  expect(spawnSync(process.execPath, [main, "curve", "iron", "--masses", "1", "--out", out]).status).toBe(0);
+  expect(readFileSync(out, "utf8")).toContain("iron,1.00000000000,");
+  rmSync(out);
+});
+
 test("Ctrl-C during a run ends with 130 and leaves no output", async () => {
   const out = join(folder, "out.csv");
   const child = spawn(process.execPath, [main, "classify", "-", "--out", out], { stdio: ["pipe", "ignore", "ignore"] });

@@ -30,8 +30,10 @@ const commandLine = await build({
   platform: "node",
   splitting: true,
   minify: true,
-  // Some dependencies are CommonJS and ask for Node's own modules by `require`.
-  banner: { js: 'import{createRequire}from"node:module";const require=createRequire(import.meta.url);' },
+  // Some dependencies are CommonJS and expect what Node gives only to that.
+  banner: {
+    js: 'import{createRequire}from"node:module";const require=createRequire(import.meta.url),__filename=import.meta.filename;',
+  },
 });
 chmodSync("dist/cli/main.js", 0o755);
 

@@ -7,6 +7,8 @@ export default defineConfig({
   test: {
     include: ["test/**/*.test.ts"],
     allowOnly: false,
-    testTimeout: 30_000,
+    // Only to end what hangs: the machine may be busy.
+    testTimeout: 180_000,
+    hookTimeout: 180_000,
   },
 });

@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { compareLists } from "../../src/crosscheck/compareLists.ts";
 import { matchLists } from "../../src/crosscheck/matchLists.ts";
-import { pairColumns, pairRecords } from "../../src/crosscheck/records.ts";
+import { pairColumns, pairRecords } from "../../src/crosscheck/pairRecords.ts";
 import { expectClose } from "../support/expectClose.ts";
 import { randomNumbers } from "./inventedList.ts";
 import { planetRow, type Written } from "./planetRow.ts";
@@ -49,7 +49,8 @@ describe("pulls", () => {
 
   test("of honest errors are normal deviates", () => {
     const [pull] = compare(normalPairs(1000, 1)).comparison.pulls;
-    expect(pull?.count).toBe(1000);
+    // Eight in a thousand agree within 0.01 sigma by chance and pass for quotations.
+    expect(pull?.count).toBeGreaterThan(980);
     expect(Math.abs(pull?.chiSquareSigma ?? 9)).toBeLessThan(3);
     expect(pull?.fractionBeyond3Sigma).toBeLessThan(0.01);
   });
@@ -79,7 +80,7 @@ describe("pulls", () => {
     const [pull] = compare([
       [
         [2, 0.1],
-        [2, 0.1],
+        [2.0004, 0.1002],
       ],
       [
         [2, 0.1],
@@ -110,7 +111,7 @@ test("records hold every pair and every row left over", () => {
   const others = [planetRow({ radius: [3, 0.1] }, {}, 1), planetRow({}, { name: "only there b" }, 2)];
   const match = matchLists(rows, others);
   const records = pairRecords(match, compareLists(match.pairs));
-  expect(records.map((record) => Object.keys(record))).toEqual(records.map(() => [...pairColumns]));
+  expect(records.flatMap((record) => Object.keys(record)).filter((key) => !pairColumns.some((column) => column === key))).toEqual([]);
   expect(records.map(({ name, name_other, match: method, quantity }) => [name, name_other, method, quantity])).toEqual([
     ["Ostara 1 b", "Ostara 1 b", "name", "radius_earth"],
     ["only here b", undefined, "only-first", undefined],

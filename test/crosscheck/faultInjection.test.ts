@@ -1,4 +1,5 @@
 import { describe, expect, test } from "vitest";
+import { rules } from "../../src/crosscheck/rules.ts";
 import { runRules } from "../../src/crosscheck/runRules.ts";
 import { faults } from "./faults.ts";
 import { cleanRow, randomNumbers, withTwins } from "./inventedList.ts";
@@ -15,7 +16,11 @@ describe("known faults put into clean invented lists", () => {
   test.each(faults.map((fault, i) => ({ ...fault, seed: i + 11 })))("$name: at least 99 % found", (fault) => {
     const random = randomNumbers(fault.seed);
     const rows = cleanList(fault.seed, ROWS).map((row) => fault.inject(row, random));
-    const found = runRules(rows).filter(({ rule }) => fault.foundBy.includes(rule));
+    const found = runRules(
+      rows,
+      {},
+      rules.filter(({ id }) => fault.foundBy.includes(id)),
+    );
     const missed = rows.filter((row) => !found.some((finding) => finding.row === row));
     expect(missed.length / ROWS).toBeLessThanOrEqual(0.01);
   });

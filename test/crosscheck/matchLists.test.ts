@@ -66,10 +66,22 @@ describe("matching by name", () => {
     ]);
   });
 
+  test("tells a star's planets apart by period", () => {
+    const planets = [placed("Ostara 7 b", [10, 10, 3]), placed("Ostara 7 c", [10, 10, 9])];
+    expect(outcome([placed("Ostara-07", [80, 80, 9.01])], planets).pairs).toEqual(["Ostara-07 = Ostara 7 c by host"]);
+  });
+
   test("reports a name that stands twice", () => {
     expect(outcome(named("Ostara 7 b"), named("Ostara 7 b", "Ostara-7b"))).toEqual({
       ...none,
       ambiguous: ["Ostara 7 b ~ Ostara 7 b | Ostara-7b"],
+    });
+  });
+
+  test("reports two rows that claim one other", () => {
+    expect(outcome(named("Ostara 7 b", "Ostara-7b"), named("Ostara 7 b"))).toEqual({
+      ...none,
+      ambiguous: ["Ostara 7 b ~ Ostara 7 b", "Ostara-7b ~ Ostara 7 b"],
     });
   });
 
@@ -79,10 +91,10 @@ describe("matching by name", () => {
 });
 
 describe("matching by position and period", () => {
-  const row = placed("QX 1 b", [359.999, 60, 3.456]);
+  const row = placed("QX 1 b", [359.985, 60, 3.456]);
 
   test("pairs what names do not", () => {
-    const other = placed("Tavi 5 b", [0.001, 60.001, 3.4561]);
+    const other = placed("Tavi 5 b", [0.015, 60.001, 3.4561]);
     expect(outcome([row], [other]).pairs).toEqual(["QX 1 b = Tavi 5 b by position-and-period"]);
   });
 
@@ -92,14 +104,14 @@ describe("matching by position and period", () => {
   });
 
   test.each<[string, Place]>([
-    ["another period", [359.999, 60, 6.9]],
-    ["two arc minutes away", [359.999, 60.0334, 3.456]],
+    ["another period", [359.985, 60, 6.9]],
+    ["two arc minutes away", [359.985, 60.0334, 3.456]],
   ])("leaves %s alone", (_, place) => {
     expect(outcome([row], [placed("Tavi 5 b", place)]).pairs).toEqual([]);
   });
 
   test("reports two candidates", () => {
-    const others = [placed("Tavi 5 b", [359.999, 60, 3.456]), placed("Tavi 6 b", [359.999, 60, 3.457])];
+    const others = [placed("Tavi 5 b", [359.985, 60, 3.456]), placed("Tavi 6 b", [359.985, 60, 3.457])];
     expect(outcome([row], others).ambiguous).toEqual(["QX 1 b ~ Tavi 5 b | Tavi 6 b"]);
   });
 });

@@ -1,5 +1,5 @@
 import { expect, test } from "vitest";
-import { findingColumns, findingRecord } from "../../src/crosscheck/records.ts";
+import { findingColumns, findingRecord } from "../../src/crosscheck/findingRecord.ts";
 import type { Rule } from "../../src/crosscheck/rule.ts";
 import { countFindings, runRules } from "../../src/crosscheck/runRules.ts";
 import { expectClose } from "../support/expectClose.ts";

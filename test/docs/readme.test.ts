@@ -1,7 +1,7 @@
 import { spawnSync } from "node:child_process";
-import { mkdtempSync, readFileSync, rmSync, symlinkSync, writeFileSync } from "node:fs";
+import { mkdirSync, mkdtempSync, readFileSync, rmSync, symlinkSync, writeFileSync } from "node:fs";
 import { tmpdir } from "node:os";
-import { delimiter, join, resolve } from "node:path";
+import { delimiter, dirname, join, resolve } from "node:path";
 import { afterAll, describe, expect, test } from "vitest";
 import { commands } from "../../src/cli/commands.ts";
 
@@ -24,7 +24,9 @@ const folder = mkdtempSync(join(tmpdir(), "bulkwright-readme-"));
 symlinkSync(resolve("dist/cli/main.js"), join(folder, "bulkwright"));
 for (const { info, text } of blocks) {
   const file = /^\w+ file=(\S+)$/.exec(info)?.[1];
-  if (file) writeFileSync(join(folder, file), text);
+  if (!file) continue;
+  mkdirSync(dirname(join(folder, file)), { recursive: true });
+  writeFileSync(join(folder, file), text);
 }
 afterAll(() => rmSync(folder, { recursive: true }));
 

@@ -75,6 +75,8 @@ describe("where published forms meet Thomas–Fermi–Dirac [GPa]", () => {
     expect(first).toBeLessThan(45 * GPA);
     const beyond = findCrossing(wavy, straight, 65 * GPA);
     expect(beyond).toBeGreaterThan(90 * GPA);
+    const specs = [phase("wavy", wavy, "crossing", 65 * GPA), phase("straight", straight, LAST)];
+    expect(stackPhases("s", "S", specs).phases[0].untilPressure).toBe(beyond);
   });
 });
 

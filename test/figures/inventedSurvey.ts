@@ -150,3 +150,22 @@ export const hostileNames = [
   "a<br>b",
   "\\u003cb\\u003e",
 ];
+
+/** The survey with every text that a user's files can hold replaced by hostile ones. */
+export const hostileSurvey: MassRadiusInput = {
+  ...inventedSurvey,
+  title: `Survey ${hostileNames[1]}`,
+  planets: inventedSurvey.planets.map((planet, i) => {
+    const name = hostileNames[i % hostileNames.length] as string;
+    return { ...planet, name, note: name, reason: planet.reason && name };
+  }),
+  curves: inventedSurvey.curves.map((curve, i) => ({
+    ...curve,
+    composition: hostileNames[i] as string,
+    title: `${hostileNames[i]}`,
+    layers: curve.layers.map((layer) => ({ ...layer, name: hostileNames[i] as string })),
+  })),
+  sources: hostileNames.map((name) => ({ subject: name, citation: name, doi: name, note: name })),
+  warnings: [...hostileNames],
+  command: hostileNames.join(" "),
+};

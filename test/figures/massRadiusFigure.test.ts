@@ -59,7 +59,7 @@ describe("massRadiusFigure", () => {
       kind: "mass-radius",
       title: "Two planets",
       summary:
-        "1 mass–radius curve computed from equations of state, and 2 planets: 1 in the diagram and 1 only in the table, with the reason.",
+        "1 mass–radius curve computed from equations of state. Of 2 planets, 1 drawn and 1 in the table alone, with the reason.",
       axes: {
         mass: { title: "Planet mass", unit: "Earth masses", range: [0.912, 11] },
         radius: { title: "Planet radius", unit: "Earth radii", range: [0.681, 2.59] },
@@ -113,9 +113,11 @@ describe("massRadiusFigure", () => {
     expect(labels).toEqual(["earth-like", "earth-like-other-iron"]);
   });
 
-  it("draws a planet that was measured but got no verdict", () => {
-    const planets = small.planets.map((planet) => ({ ...planet, verdict: null, reason: "beyond the models" }));
-    expect(massRadiusFigure({ ...small, planets }).marks).toEqual([{ planet: 0, verdict: null, fade: 0 }]);
+  it("draws no planet without a verdict, whatever mass and radius its list claims", () => {
+    const planets = small.planets.map((planet) => ({ ...planet, verdict: null, reason: "mass from a relation" }));
+    const { marks, axes } = massRadiusFigure({ ...small, planets });
+    expect(marks).toEqual([]);
+    expect(axes).toEqual(massRadiusFigure({ ...small, planets: [] }).axes);
   });
 
   it("stands without curves and without planets", () => {

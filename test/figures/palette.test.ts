@@ -2,18 +2,26 @@ import { describe, expect, it } from "vitest";
 import { type ColourRole, darkPalette, lightPalette } from "../../src/figures/palette.ts";
 import { contrast, seenDistance, sights } from "./colourVision.ts";
 
+type Sight = (typeof sights)[string];
+
 const numbered = (kind: "curve" | "verdict", count: number) =>
   Array.from({ length: count }, (_, i) => `${kind}-${i + 1}` as ColourRole);
 const curves = numbered("curve", 8);
-const verdicts = numbered("verdict", 6);
+const verdicts = numbered("verdict", 5);
+
+it("knows a pair that red-green blindness brings together", () => {
+  const [red, green] = ["#b03030", "#6b6b1e"];
+  expect(seenDistance(red, green, sights.normal as Sight)).toBeGreaterThan(0.15);
+  expect(seenDistance(red, green, sights.deuteranopia as Sight)).toBeLessThan(0.1);
+});
 
 describe.each([
   ["light", lightPalette],
   ["dark", darkPalette],
 ] as const)("the %s palette", (_, palette) => {
   it.each(Object.keys(sights))("keeps verdicts, and curves that are neighbours, apart for %s sight", (name) => {
-    const sight = sights[name] as (typeof sights)[string];
-    // Five just visible steps; a palette of six saturated primaries falls below it for red-green blindness.
+    const sight = sights[name] as Sight;
+    // Five just visible steps.
     const apart = 0.1;
     const check = (roles: ColourRole[], reach: number) =>
       roles.forEach((a, i) => {

@@ -1,11 +1,8 @@
 import { type Command, Option } from "commander";
-import { sweepMasses } from "../../curve/sweep.ts";
 import { InputError } from "../../errors.ts";
 import type { Composition } from "../../library/composition.ts";
-import { EARTH_MASS } from "../../units/constants.ts";
 import type { CommandContext } from "../commandContext.ts";
 import { curveTable } from "../curveTable.ts";
-import { interruptible } from "../interruptible.ts";
 import { openLibrary } from "../libraryFolder.ts";
 import { type Curve, massRadiusPage } from "../massRadiusPage.ts";
 import { parseMasses, pressurePa } from "../numberOptions.ts";
@@ -19,6 +16,7 @@ import {
   type ResultOptions,
   tell,
 } from "../resultOptions.ts";
+import { sweepCurves } from "../sweepCurves.ts";
 
 interface CurveOptions extends GlobalOptions, ResultOptions {
   readonly masses: readonly number[];
@@ -50,8 +48,7 @@ async function curve(names: readonly string[], options: CurveOptions, { io, args
   await checkDestinations(destinations(options), inputs);
   tell(library.notes, options, io);
   const compositions = names.map((name) => withSurfacePressure(library.composition(name), options.surfacePressurePa));
-  const curves: Curve[] = [];
-  for (const composition of compositions) curves.push(await sweep(composition, options.masses));
+  const curves = await sweepCurves(compositions, options.masses);
 
   const run = { args, earthRadius: options.earthRadiusKm };
   const provenance = provenanceOf({ ...run, compositions, notes: library.notes });
@@ -59,13 +56,6 @@ async function curve(names: readonly string[], options: CurveOptions, { io, args
   if (options.html !== undefined)
     await writeOutputFile(options.html, await massRadiusPage(curves, withoutPlanets, run));
   if (!curves.some(({ points }) => points.some(({ planet }) => planet))) throw nothingSolved(curves);
-}
-
-async function sweep(composition: Composition, massesEarth: readonly number[]): Promise<Curve> {
-  const points = [];
-  const masses = massesEarth.map((mass) => mass * EARTH_MASS);
-  for await (const point of interruptible(sweepMasses(composition, masses))) points.push(point);
-  return { composition, points };
 }
 
 function nothingSolved(curves: readonly Curve[]): InputError {

@@ -43,6 +43,7 @@ async function show(name: string, options: LibraryOptions, io: Io): Promise<void
 async function check(folder: string, io: Io): Promise<void> {
   const files = await readLibraryFolder(folder, io);
   const problems = checkLibrary(files, shippedFiles);
-  if (problems.length === 0) io.out(escapeControls(`${folder}: ${files.length} files, no problem found\n`));
+  if (problems.length === 0)
+    io.out(escapeControls(`No problem found in ${files.map(({ path }) => path).join(", ")}\n`));
   else throw new InputError("library-problems", problems.map(({ message }) => message).join("\n"), { file: folder });
 }

@@ -2,7 +2,7 @@ import type { MeasuredQuantity, PlanetRow, QuantityName } from "../../planets/qu
 import type { Discrepancy } from "../finding.ts";
 import { groupBy } from "../groupBy.ts";
 import { nameKey } from "../planetName.ts";
-import { times } from "../relationRule.ts";
+import { times } from "../ratioInWords.ts";
 import type { ListRule } from "../rule.ts";
 import { hasBothErrors, SIGNIFICANT, tensionSigma } from "../significance.ts";
 import { weightedMean } from "../weightedMean.ts";

@@ -2,7 +2,8 @@ import type { MeasuredQuantity, PlanetRow, QuantityName } from "../../planets/qu
 import type { Discrepancy } from "../finding.ts";
 import type { RowRule } from "../rule.ts";
 
-const TRANSIT = /transit/i;
+/** Planets found by the timing of another one's transits need not transit themselves. */
+const TRANSIT = /transit(?!.*timing)/i;
 /** Methods whose discovery already measures a mass, or a mass ratio. */
 const WEIGHING = /radial|velocit|spectr|astrom|microlens|timing|ttv/i;
 

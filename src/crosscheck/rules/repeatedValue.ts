@@ -1,5 +1,6 @@
 import type { PlanetRow, QuantityName } from "../../planets/quantity.ts";
 import type { Discrepancy } from "../finding.ts";
+import { quantitiesOf } from "../quantitiesOf.ts";
 import type { RowRule } from "../rule.ts";
 import { significantDigits } from "../written.ts";
 
@@ -9,18 +10,14 @@ const ENOUGH_DIGITS = 4;
 /** Two columns of one thing may agree: mass and minimum mass have a rule of their own. */
 const alike = (a: QuantityName, b: QuantityName) => [a, b].every((name) => name === "mass" || name === "minimumMass");
 
-const asNumber = (written: string) => Number(written);
-
 function test(row: PlanetRow): readonly Discrepancy[] {
   const seen = new Map<number, QuantityName>();
   const found: Discrepancy[] = [];
-  for (const [key, quantity] of Object.entries(row.quantities)) {
-    const name = key as QuantityName;
-    const { written } = quantity;
+  for (const [name, { written }] of quantitiesOf(row)) {
     if (written === undefined || significantDigits(written).length < ENOUGH_DIGITS) continue;
-    const earlier = seen.get(asNumber(written));
+    const earlier = seen.get(Number(written));
     if (earlier && !alike(earlier, name)) found.push(repeated(row, name, earlier));
-    seen.set(asNumber(written), name);
+    seen.set(Number(written), name);
   }
   return found;
 }

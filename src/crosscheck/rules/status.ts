@@ -1,5 +1,6 @@
 import type { PlanetRow } from "../../planets/quantity.ts";
 import type { Discrepancy, Severity } from "../finding.ts";
+import { isSet } from "../flag.ts";
 import type { RowRule } from "../rule.ts";
 
 /** Gravest first; the first that matches counts. */
@@ -9,18 +10,17 @@ const states: readonly (readonly [pattern: RegExp, severity: Severity, words: st
   [/candidate|unconfirm|unverif|tentative/i, "info", "not confirmed"],
 ];
 
-const isSet = (flag: string | undefined) => /^\s*(1|true|yes|y)\s*$/i.test(flag ?? "");
-
 function test(row: PlanetRow): readonly Discrepancy[] {
-  const text = isSet(row.texts.controversial) ? "controversial" : (row.texts.status ?? "");
-  const state = states.find(([pattern]) => pattern.test(row.texts.status ?? "")) ?? states.find(([p]) => p.test(text));
+  const flag = isSet(row.texts.controversial) ? "controversial" : "";
+  const text = [row.texts.status?.trim(), flag].filter(Boolean).join(", ");
+  const state = states.find(([pattern]) => pattern.test(text));
   if (!state) return [];
   const [, severity, words] = state;
   return [
     {
       row,
       quantity: "status",
-      value: row.texts.status ?? text,
+      value: text,
       explanation: words,
       remedy: severity === "info" ? "keep it apart from confirmed planets" : "leave it out",
       severity,

@@ -1,6 +1,6 @@
 import type { MeasuredQuantity, PlanetRow, QuantityName } from "../../planets/quantity.ts";
 import type { Discrepancy } from "../finding.ts";
-import { times } from "../relationRule.ts";
+import { times } from "../ratioInWords.ts";
 import type { RowRule } from "../rule.ts";
 import { ASSUMED_RELATIVE_ERROR } from "../significance.ts";
 import { unitSlips } from "../unitSlips.ts";

@@ -26,7 +26,7 @@ export function detectDialect(lines: readonly string[]): Dialect {
   let best = { agreement: 0, dialect: dialectOf("comma-separated", ",", lines) };
   for (const { format, delimiter } of candidates) {
     const dialect = dialectOf(format, delimiter, lines);
-    const counts = lines.map((line) => countCells(line, dialect));
+    const counts = joinQuoted(lines, dialect).map((line) => countCells(line, dialect));
     const first = counts[0] ?? 1;
     const agreement = first < 2 ? 0 : counts.filter((count) => count === first).length / counts.length;
     if (agreement > best.agreement) best = { agreement, dialect };
@@ -36,32 +36,55 @@ export function detectDialect(lines: readonly string[]): Dialect {
 
 export function dialectOf(format: ListFormat, delimiter: string, lines: readonly string[] = []): Dialect {
   const isBlank = delimiter === " ";
-  const escaped = delimiter === "|" ? "\\|" : delimiter;
-  const padding = new RegExp(`${escaped} | ${escaped}`);
-  const isPadded = !isBlank && lines.some((line) => padding.test(line));
-  const opening = new RegExp(isPadded || isBlank ? `(?:^|${escaped})[ \\t]*$` : `(?:^|${escaped})$`);
+  const isPadded =
+    !isBlank &&
+    lines.map(withoutQuoted).some((line) => line.includes(`${delimiter} `) || line.includes(` ${delimiter}`));
+  const padding = delimiter === "\t" ? " " : " \t";
+  const opensCell = (text: string, quote: number): boolean => {
+    let before = quote - 1;
+    if (isPadded || isBlank) while (before >= 0 && padding.includes(text.charAt(before))) before--;
+    return before < 0 || text.charAt(before) === delimiter || (isBlank && before < quote - 1);
+  };
   return {
     format,
     delimiter,
     isPadded,
     prepare: isBlank ? collapseBlanks : (text) => text,
-    endsInsideQuotes: (text, startsInside) => endsInsideQuotes(text, startsInside, opening),
+    endsInsideQuotes: (text, startsInside) => endsInsideQuotes(text, startsInside, opensCell),
   };
 }
 
+/** Lines whose quoted cells are complete. */
+function joinQuoted(lines: readonly string[], dialect: Dialect): string[] {
+  const joined: string[] = [];
+  let open = "";
+  for (const line of lines) {
+    const text = open + line;
+    open = dialect.endsInsideQuotes(line, open !== "") ? `${text}\n` : "";
+    if (open === "") joined.push(text);
+  }
+  return joined;
+}
+
+/** Quoted text replaced, also what is quoted to the end because the cell goes on in the next line. */
+const withoutQuoted = (line: string): string => line.replace(/"(?:[^"]|"")*(?:"|$)/g, "q");
+
 const countCells = (line: string, dialect: Dialect): number =>
-  dialect.prepare(line.replace(/"(?:[^"]|"")*"/g, "q")).split(dialect.delimiter).length;
+  dialect.prepare(withoutQuoted(line)).split(dialect.delimiter).length;
 
 const collapseBlanks = (text: string): string =>
   text.trim().replace(/("(?:[^"]|"")*")|[ \t]+/g, (_blanks, quoted: string | undefined) => quoted ?? " ");
 
 /** A quote opens a cell only at its start, and is doubled inside one. */
-function endsInsideQuotes(text: string, startsInside: boolean, opening: RegExp): boolean {
+function endsInsideQuotes(
+  text: string,
+  startsInside: boolean,
+  opensCell: (text: string, quote: number) => boolean,
+): boolean {
   let inside = startsInside;
   for (let at = text.indexOf('"'); at !== -1; at = text.indexOf('"', at + 1)) {
-    // A look back over 200 characters keeps the cost of a line with many quotes in bounds.
-    if (!inside) inside = opening.test(text.slice(Math.max(0, at - 200), at));
-    else if (text[at + 1] === '"') at++;
+    if (!inside) inside = opensCell(text, at);
+    else if (text.charAt(at + 1) === '"') at++;
     else inside = false;
   }
   return inside;

@@ -26,7 +26,8 @@ export async function readVotable(text: AsyncIterable<string>, file: string): Pr
     reader.write(next.value);
   }
   if (!reader.hasFields) reader.end();
-  if (reader.fields.length === 0) throw noTable(file);
+  if (reader.fields.length === 0)
+    throw reader.failure === undefined ? noTable(file) : failedQuery(file, reader.failure);
   async function* batches(): AsyncGenerator<RawRecord[]> {
     yield reader.takeRecords();
     for (let next = await chunks.next(); !next.done; next = await chunks.next()) {
@@ -44,6 +45,8 @@ class VotableReader {
   readonly fields: VotableField[] = [];
   /** The table's fields are all known: its data have begun, or it has ended. */
   hasFields = false;
+  /** What the archive says went wrong, if it says so. */
+  failure: string | undefined;
   private readonly file: string;
   private readonly xml = new SaxesParser();
   private mode: "markup" | "rows" | "stream" = "markup";
@@ -206,24 +209,15 @@ class VotableReader {
     this.isDone = true;
   }
 
-  /** Archives answer a failed query with a well-formed VOTable that says so. */
-  private openInfo(attributes: Readonly<Record<string, string>>): void {
-    const { name = "", value } = attributes;
-    if ((name === "QUERY_STATUS" && value === "ERROR") || name.toUpperCase() === "ERROR") this.infoText = value ?? "";
+  /** Archives answer a failed query with a well-formed VOTable that says so in an INFO. */
+  private openInfo({ name = "", value = "" }: Readonly<Record<string, string>>): void {
+    if ((name === "QUERY_STATUS" && value === "ERROR") || name.toUpperCase() === "ERROR") this.infoText = `${value} `;
   }
 
   private closeInfo(): void {
     if (this.infoText === undefined) return;
-    const found = this.infoText.trim();
-    throw new InputError(
-      "votable-query-failed",
-      `${this.file}: the archive answered with an error instead of a table: ${found}`,
-      {
-        file: this.file,
-        line: this.xml.line,
-        found,
-      },
-    );
+    this.failure = this.infoText.replace(/^ERROR/, "").trim();
+    this.infoText = undefined;
   }
 }
 
@@ -239,6 +233,12 @@ const malformed = (file: string, line: number, cause: Error): InputError =>
 
 const noTable = (file: string): InputError =>
   new InputError("votable-no-table", `${file}: this XML file holds no VOTable table with fields`, { file });
+
+const failedQuery = (file: string, found: string): InputError =>
+  new InputError("votable-query-failed", `${file}: the archive answered with an error instead of a table: ${found}`, {
+    file,
+    found,
+  });
 
 const external = (file: string, line: number, what: string): InputError =>
   new InputError(

@@ -20,9 +20,10 @@ export interface VotableField extends RawColumn {
   /** Elements per cell where fixed; those of one slice where `isVariable`. */
   readonly elements: number;
   readonly isVariable: boolean;
+  /** Text longer than this is cut, as the standard has it; absent where the length is free. */
+  readonly longestText?: number;
   /** No `arraysize`, so not even an array of one. */
   readonly isScalar: boolean;
-  readonly id?: string;
   /** The value that stands for a missing one. */
   readonly missing?: string;
 }
@@ -48,11 +49,14 @@ export function parseField(attributes: Readonly<Record<string, string>>, number:
   if (datatype === undefined) throw new RangeError(`field "${name}" has the unknown datatype "${attributes.datatype}"`);
   return {
     name,
-    id: attributes.ID,
     unit: attributes.unit,
     datatype,
     elements: fixed.reduce((product, size) => product * (Number.isSafeInteger(size) && size > 0 ? size : 1), 1),
     isVariable,
+    // Text without an arraysize should be one character long; whoever forgot it did not mean to lose the rest.
+    longestText: /^\d+\*?$/.test(attributes.arraysize ?? "")
+      ? Number.parseInt(attributes.arraysize ?? "", 10)
+      : undefined,
     isScalar: attributes.arraysize === undefined,
   };
 }
@@ -66,9 +70,8 @@ const integerRanges: Readonly<Partial<Record<Datatype, readonly [bigint, bigint]
 
 /** A TABLEDATA cell: text verbatim; of numbers the missing ones empty and the others as their type holds them. */
 export function readCellText(text: string, field: VotableField): string {
-  const { datatype, isScalar, isVariable, elements, missing } = field;
-  // Text without an arraysize should be one character long; whoever forgot it did not mean to lose the rest.
-  if (datatype === "char" || datatype === "unicodeChar") return isVariable || isScalar ? text : text.slice(0, elements);
+  const { datatype, isScalar, longestText, missing } = field;
+  if (datatype === "char" || datatype === "unicodeChar") return text.slice(0, longestText);
   const cell = text.trim();
   if (cell === missing) return "";
   if (!isScalar) return cell;

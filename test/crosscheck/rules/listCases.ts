@@ -157,6 +157,7 @@ export const listCases: readonly RuleCase[] = [
     silent: [
       { why: "agreement", rows: publications([2.1, 0.1], [2, 0.1], [2.05, 0.1]) },
       { why: "two only", rows: publications([3, 0.1], [2, 0.1]) },
+      { why: "two with errors", rows: publications([3, 0.1], [2, 0.1], 2) },
       { why: "no error", rows: publications(3, [2, 0.1], [2.05, 0.1], [1.98, 0.1]) },
     ],
   },

@@ -11,6 +11,7 @@ export const physicsCases: readonly RuleCase[] = [
     fires: [
       { why: "half an Earth radius", rows: one({ mass: [1, 0.02], radius: [0.5, 0.01] }), severity: "error" },
       { why: "within the errors", rows: one({ mass: [1, 0.02], radius: [0.75, 0.02] }), severity: "info" },
+      { why: "within that of the mass", rows: one({ mass: [5, 2], radius: [1.12, 0.005] }), severity: "info" },
     ],
     silent: [
       { why: "the Earth", rows: one({ mass: 1, radius: 1 }) },
@@ -98,6 +99,11 @@ export const physicsCases: readonly RuleCase[] = [
       {
         why: "radius by velocities",
         rows: one({ radius: 2.1 }, { discoveryMethod: "Radial Velocity" }),
+        severity: "warning",
+      },
+      {
+        why: "radius by timing",
+        rows: one({ radius: 2.1 }, { discoveryMethod: "Transit Timing Variations" }),
         severity: "warning",
       },
       { why: "mass by transit", rows: one({ mass: 2.1 }, { discoveryMethod: "Primary Transit" }), severity: "warning" },
