@@ -16,7 +16,12 @@ const polytropes = names.filter((name) => name.endsWith("-polytrope"));
 
 test("all promised materials and compositions are there", () => {
   const others = ["iron-vinet-2007", "iron-vinet-2018", "iron-birch-2016", "earth-mantle-birch", "earth-core-birch"];
-  expect([...names].sort()).toEqual([...defaults, ...others, ...polytropes].sort());
+  const warm = [
+    ...["core-earth", "core-earth-cosmochemical", "core-mars", "core-mercury", "core-moon", "core-chondritic"],
+    ...["mantle-pyrolite", "mantle-mars", "mantle-mercury", "mantle-moon", "silicate-chondritic", "water-phases"],
+  ];
+  const cold = ["crust-mars", "crust-moon", "serpentine-chondritic", "troilite"];
+  expect([...names].sort()).toEqual([...defaults, ...others, ...polytropes, ...warm, ...cold].sort());
   expect(polytropes).toHaveLength(6);
   expect([...compositions].sort()).toEqual(
     [
@@ -32,6 +37,8 @@ test("all promised materials and compositions are there", () => {
       "earth-like-iron-vinet-2007",
       "earth-like-iron-vinet-2018",
       "earth-like-iron-birch-2016",
+      ...["earth", "earth-cosmochemical-core", "venus", "mars", "mercury", "moon", "io", "europa", "ganymede"],
+      ...["callisto", "callisto-hydrated", "titan", "titan-hydrated"],
     ].sort(),
   );
 });
