@@ -13,17 +13,28 @@ const SETTLED = 100;
 const EXPANSION = 0.03;
 /** Steps across the kinks of a table of temperatures are better judged than they are: by a factor of 1.7 measured. */
 const KINKED = 3;
-/** While boundary pressures still move by more than this, a coarse structure is enough. */
+/** Once boundary pressures move by less than this, the next round is worth the full accuracy. */
 const NEARLY_SETTLED = 1e-4;
-const COARSE_TOLERANCE = 1e-6;
+/** Until then a structure as good as this share of their last move is enough, and never worse than the coarsest. */
+const WORTH = 1e-3;
+const COARSEST = 1e-4;
+/** A steeper answer than this is no answer to extrapolate by. */
+const STEEPEST = 0.5;
 /** Density of the uniform sphere that gives the first guess of the boundary pressures [kg m^-3]. */
 const GUESS_DENSITY = 6000;
+
+/** Pressures assumed and found at the tops of the inner layers, centre to surface. */
+interface Round {
+  readonly tops: readonly number[];
+  readonly found: readonly number[];
+  readonly centralPressure: number;
+}
 
 /**
  * Planets of a composition with temperature. Temperature comes from the surface down, structure from the centre up;
  * they meet in the pressures at which the inner layers begin. Each round builds the layers for assumed pressures,
- * solves the structure with them and takes over the pressures found; thermal expansion being small, a round gains a
- * factor of 20 or more, and the ratio of the last two rounds tells most of the rest.
+ * solves the structure with them and finds others; thermal expansion being small, these answer weakly to those assumed,
+ * by a sixth where a core freezes inside, and the secant through two rounds tells where both agree.
  * Checked test/interior/warmSolver.test.ts
  */
 export class WarmSolver {
@@ -44,38 +55,37 @@ export class WarmSolver {
   /** As StructureSolver.solve; the planet's composition holds the curves that its temperatures led to. */
   solve(mass: number, guess?: number): Planet {
     let tops = this.firstTops(mass);
-    let step: readonly number[] = [];
+    let last: Round | undefined;
     let centralPressure = guess;
-    let coarse = tops.length > 0;
+    let tolerance = tops.length > 0 ? COARSEST : this.tolerance;
     const counters = { integrations: 0, rightHandSides: 0 };
     for (let round = 0; round < MAX_ROUNDS; round++) {
-      const tolerance = coarse ? COARSE_TOLERANCE : this.tolerance;
       const planet = new StructureSolver(this.layers.resolve(tops), { tolerance }).solve(mass, centralPressure);
       counters.integrations += planet.counters.integrations;
       counters.rightHandSides += planet.counters.rightHandSides;
-      const found = innerTops(planet);
-      const change = Math.max(0, ...found.map((pressure, i) => Math.abs(pressure / tops[i] - 1)));
-      if (change <= SETTLED * this.tolerance && !coarse) {
-        this.shares = found.map((pressure) => pressure / pressureScale(mass));
-        const integrationError = planet.radiusRelativeError * (this.hasKinks ? KINKED : 1);
-        return {
-          ...planet,
-          counters,
-          radiusRelativeError: integrationError + EXPANSION * change,
-          notes: warmNotes(planet),
-        };
+      const here: Round = { tops, found: innerTops(planet), centralPressure: planet.centralPressure };
+      const change = Math.max(0, ...here.found.map((pressure, i) => Math.abs(pressure / tops[i] - 1)));
+      if (change <= SETTLED * this.tolerance && tolerance === this.tolerance) {
+        this.shares = here.found.map((pressure) => pressure / pressureScale(mass));
+        return this.settled(planet, counters, change);
       }
-      coarse &&= change > NEARLY_SETTLED;
-      const lastStep = step;
-      step = found.map((pressure, i) => pressure - tops[i]);
-      tops = found.map((pressure, i) => pressure + extrapolated(step[i], lastStep[i]));
-      centralPressure = planet.centralPressure;
+      const enough = change > NEARLY_SETTLED ? Math.min(WORTH * change, COARSEST) : this.tolerance;
+      tolerance = Math.max(enough, this.tolerance);
+      tops = nextTops(here, last);
+      centralPressure = nextCentralPressure(tops, here, last);
+      last = here;
     }
     throw new ConvergenceError(
       "warm-structure-not-converged",
       `The layer temperatures of ${this.composition.name} at ${mass} kg did not settle in ${MAX_ROUNDS} rounds.`,
       { centralPressure },
     );
+  }
+
+  private settled(planet: Planet, counters: Planet["counters"], change: number): Planet {
+    const integrationError = planet.radiusRelativeError * (this.hasKinks ? KINKED : 1);
+    const radiusRelativeError = integrationError + EXPANSION * change;
+    return { ...planet, counters, radiusRelativeError, notes: warmNotes(planet) };
   }
 
   /** From the last planet, or from a uniform sphere, where P = P_c (1 - q^(2/3)) at enclosed mass fraction q. */
@@ -96,10 +106,21 @@ function pressureScale(mass: number): number {
   return (3 * G * mass * mass) / (8 * Math.PI * radius ** 4);
 }
 
-/** What is left to go if steps go on shrinking by the ratio of the last two (Aitken); nothing while they do not. */
-function extrapolated(step: number, lastStep: number | undefined): number {
-  const ratio = lastStep === undefined || lastStep === 0 ? 0 : step / lastStep;
-  return Math.abs(ratio) < 0.3 ? (step * ratio) / (1 - ratio) : 0;
+/** Where the fixed point lies if each pressure found answers to its own assumption alone, as in the last two rounds. */
+function nextTops({ tops, found }: Round, last: Round | undefined): number[] {
+  return found.map((pressure, i) => {
+    const slope = last === undefined ? 0 : (pressure - last.found[i]) / (tops[i] - last.tops[i]);
+    return Math.abs(slope) < STEEPEST ? tops[i] + (pressure - tops[i]) / (1 - slope) : pressure;
+  });
+}
+
+/** Follows the top of the core, on a straight line through the last two rounds. */
+function nextCentralPressure([top]: readonly number[], here: Round, last: Round | undefined): number {
+  if (last === undefined) return here.centralPressure;
+  const share = (top - here.tops[0]) / (here.tops[0] - last.tops[0]);
+  return Math.abs(share) < 1
+    ? here.centralPressure * (here.centralPressure / last.centralPressure) ** share
+    : here.centralPressure;
 }
 
 /** Pressures at the tops of all layers but the outermost, centre to surface. */

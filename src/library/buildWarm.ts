@@ -13,6 +13,8 @@ import type { PhaseEntry } from "./schemas.ts";
 /** Where a warm material is taken when nothing says how warm it is. */
 const ROOM_TEMPERATURE = 300;
 
+type Warmed = NonNullable<Material["warmed"]>;
+
 /** A material whose phases depend on temperature; cold, it is at room temperature throughout. */
 export function warmMaterial(
   name: string,
@@ -20,18 +22,29 @@ export function warmMaterial(
   warmPhases: readonly WarmPhase[],
   melting?: RockMelting,
 ): Material {
-  const warmed = (mode: TemperatureMode, topPressure: number, topTemperature: number): readonly Phase[] =>
-    warmStack(warmPhases, pathOf(mode), topPressure, topTemperature);
+  const warmed: Warmed = (mode, pressure, temperature) => warmStack(warmPhases, pathOf(mode), pressure, temperature);
+  return warmedMaterial({ name, title, melting }, warmed, ROOM_TEMPERATURE);
+}
+
+/** Phases are made when first asked for; those of a top that stays where it is, as the outermost layer's, are kept. */
+function warmedMaterial(
+  what: Pick<Material, "name" | "title" | "melting">,
+  make: Warmed,
+  coldTemperature: number,
+): Material {
+  let last: { top: Parameters<Warmed>; phases: readonly Phase[] } | undefined;
+  const warmed: Warmed = (...top) => {
+    if (last === undefined || top.some((part, i) => part !== last?.top[i])) last = { top, phases: make(...top) };
+    return last.phases;
+  };
   let cold: readonly Phase[] | undefined;
   return {
-    name,
-    title,
+    ...what,
     get phases() {
-      cold ??= warmed({ kind: "isothermal" }, 0, ROOM_TEMPERATURE);
+      cold ??= make({ kind: "isothermal" }, 0, coldTemperature);
       return cold;
     },
     warmed,
-    ...(melting && { melting }),
   };
 }
 
@@ -87,19 +100,17 @@ function noTable(): never {
   throw new InputError("thermal-table", "a table has no temperature: it cannot stand in a phase with `thermal`.");
 }
 
-/** The highest pressure water is traced to [Pa]; the equations of state of its ices are stretched long before. */
-const DEEPEST_WATER = 2e13;
 /** Cold water without anything above it is ice: a surface at this temperature holds in vacuum [K]. */
 const COLD_ICE = 250;
 
 /** Water with its phases by pressure and temperature. */
 export function waterMaterial(name: string, title: string): Material {
-  const warmed = (mode: TemperatureMode, topPressure: number, topTemperature: number): readonly Phase[] => {
+  const warmed: Warmed = (mode, topPressure, topTemperature) => {
     switch (mode.kind) {
       case "isothermal":
-        return waterIsotherm(topTemperature, topPressure, DEEPEST_WATER);
+        return waterIsotherm(topTemperature, topPressure);
       case "adiabatic":
-        return waterAdiabat(topPressure, topTemperature, DEEPEST_WATER);
+        return waterAdiabat(topPressure, topTemperature);
       case "table":
         throw new InputError(
           "temperature-table",
@@ -108,14 +119,5 @@ export function waterMaterial(name: string, title: string): Material {
         );
     }
   };
-  let cold: readonly Phase[] | undefined;
-  return {
-    name,
-    title,
-    get phases() {
-      cold ??= warmed({ kind: "isothermal" }, 0, COLD_ICE);
-      return cold;
-    },
-    warmed,
-  };
+  return warmedMaterial({ name, title }, warmed, COLD_ICE);
 }
