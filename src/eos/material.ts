@@ -38,6 +38,10 @@ export interface Material {
   readonly name: string;
   readonly title: string;
   readonly phases: readonly Phase[];
+  /** Where what it is made of comes from, if its phases do not say. */
+  readonly source?: Source;
+  /** What it can be at one temperature or another, where that is more than `phases`. */
+  readonly everyPhase?: readonly Pick<Phase, "name" | "form" | "source" | "components">[];
   readonly melting?: RockMelting;
   /**
    * For a substance whose equation of state knows temperature: its phases in a layer whose top is at this pressure

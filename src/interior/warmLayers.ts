@@ -49,8 +49,9 @@ function warm({ temperature }: Composition, layer: Layer, top: LayerTop): Layer 
   const { material } = layer;
   if (temperature === undefined || material.warmed === undefined) return layer;
   const phases: readonly Phase[] = material.warmed(temperature.mode, top.pressure, top.temperature);
-  const { name, title, melting } = material;
-  return { ...layer, material: { name, title, phases, melting } };
+  // One by one: `phases`, those of a cold planet, would be made for nothing.
+  const { name, title, source, everyPhase, melting } = material;
+  return { ...layer, material: { name, title, source, everyPhase, melting, phases } };
 }
 
 function topTemperature({ heating }: Layer, above: number): number {

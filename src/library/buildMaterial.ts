@@ -8,16 +8,17 @@ import type { MaterialFile, PhaseEntry } from "./schemas.ts";
 
 /** The material a file describes. Throws InputError where parameters, ends or densities of its phases do not fit. */
 export function buildMaterial(file: MaterialFile, readTable: TableReader): Material {
-  const { material, title, phases = [], mantle, water } = file;
-  if (water) return waterMaterial(material, title);
-  if (mantle) return warmMaterial(material, title, mantlePhases(mantle), rockMelting);
-  if (phases[0].thermal)
+  const { material, title, phases = [], mantle, water, source } = file;
+  const what = { name: material, title, ...(source && { source }) };
+  if (water) return waterMaterial(what);
+  if (mantle) return warmMaterial({ ...what, melting: rockMelting }, mantlePhases(mantle));
+  if (phases[0].thermal) {
     return warmMaterial(
-      material,
-      title,
+      what,
       phases.map((phase, i) => warmPhase(phase, phases[i - 1])),
     );
-  return coldMaterial(material, title, phases, readTable);
+  }
+  return { ...coldMaterial(material, title, phases, readTable), ...what };
 }
 
 function coldMaterial(name: string, title: string, phases: readonly PhaseEntry[], readTable: TableReader): Material {

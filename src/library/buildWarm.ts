@@ -1,14 +1,16 @@
-import type { Material, Phase, RockMelting, TemperatureMode } from "../eos/material.ts";
+import type { Material, Phase, RockMelting, Source, TemperatureMode } from "../eos/material.ts";
 import { meltingCurves } from "../eos/melting/meltingCurves.ts";
 import { meltingTemperature } from "../eos/melting/meltingTemperature.ts";
 import { alongTemperature, isentrope, isotherm } from "../eos/thermal/temperaturePaths.ts";
 import { type TemperaturePath, type WarmPhase, warmStack } from "../eos/thermal/warmStack.ts";
 import { waterAdiabat, waterIsotherm } from "../eos/water/barotrope.ts";
 import { InputError } from "../errors.ts";
+import { ironCompounds } from "../mineralogy/ironCompounds.ts";
 import { GPA } from "../units/constants.ts";
 import { alloyed, buildThermalEos, freezingPressure } from "./buildThermal.ts";
 import { buildCurve } from "./forms.ts";
 import type { PhaseEntry } from "./schemas.ts";
+import type { AlloyKeys } from "./thermalSchemas.ts";
 
 /** Where a warm material is taken when nothing says how warm it is. */
 const ROOM_TEMPERATURE = 300;
@@ -17,21 +19,15 @@ type Warmed = NonNullable<Material["warmed"]>;
 
 /** A material whose phases depend on temperature; cold, it is at room temperature throughout. */
 export function warmMaterial(
-  name: string,
-  title: string,
+  what: Pick<Material, "name" | "title" | "source" | "melting">,
   warmPhases: readonly WarmPhase[],
-  melting?: RockMelting,
 ): Material {
   const warmed: Warmed = (mode, pressure, temperature) => warmStack(warmPhases, pathOf(mode), pressure, temperature);
-  return warmedMaterial({ name, title, melting }, warmed, ROOM_TEMPERATURE);
+  return warmedMaterial({ ...what, everyPhase: warmPhases }, warmed, ROOM_TEMPERATURE);
 }
 
 /** Phases are made when first asked for; those of a top that stays where it is, as the outermost layer's, are kept. */
-function warmedMaterial(
-  what: Pick<Material, "name" | "title" | "melting">,
-  make: Warmed,
-  coldTemperature: number,
-): Material {
+function warmedMaterial(what: Omit<Material, "phases" | "warmed">, make: Warmed, coldTemperature: number): Material {
   let last: { top: Parameters<Warmed>; phases: readonly Phase[] } | undefined;
   const warmed: Warmed = (...top) => {
     if (last === undefined || top.some((part, i) => part !== last?.top[i])) last = { top, phases: make(...top) };
@@ -83,8 +79,18 @@ export function warmPhase(phase: PhaseEntry, before: PhaseEntry | undefined): Wa
     eos: alloy === undefined ? eos : alloyed(eos, alloy),
     stableFrom: endOf(before),
     calibratedTo: calibratedToGPa * GPA,
-    source,
+    source: alloy === undefined ? source : withCarriers(source, alloy),
   };
+}
+
+/** A source that also names those of the compounds that hold the light elements. */
+function withCarriers(source: Source, alloy: AlloyKeys): Source {
+  const carriers = Object.entries(ironCompounds).filter(([element]) => element in alloy);
+  const notes = carriers.map(
+    ([element, { formula, source }]) => `${element} as ${formula}: ${source.citation}, ${source.note}`,
+  );
+  const note = [source.note, ...notes].filter(Boolean).join("; ");
+  return note === "" ? source : { ...source, note };
 }
 
 /** The pressure [Pa] at which a phase gives way to the next, by temperature [K]. */
@@ -104,7 +110,7 @@ function noTable(): never {
 const COLD_ICE = 250;
 
 /** Water with its phases by pressure and temperature. */
-export function waterMaterial(name: string, title: string): Material {
+export function waterMaterial(what: Pick<Material, "name" | "title" | "source">): Material {
   const warmed: Warmed = (mode, topPressure, topTemperature) => {
     switch (mode.kind) {
       case "isothermal":
@@ -114,10 +120,10 @@ export function waterMaterial(name: string, title: string): Material {
       case "table":
         throw new InputError(
           "temperature-table",
-          `${name}: water follows an isotherm or an adiabat, not a table of temperatures.`,
+          `${what.name}: water follows an isotherm or an adiabat, not a table of temperatures.`,
           { column: "temperature" },
         );
     }
   };
-  return warmedMaterial({ name, title }, warmed, COLD_ICE);
+  return warmedMaterial(what, warmed, COLD_ICE);
 }

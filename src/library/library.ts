@@ -26,8 +26,8 @@ export interface Library {
   composition(name: string): Composition;
   /** Throws InputError `unknown-material`, or any error of its file. */
   material(name: string): Material;
-  /** The form of every phase with its keys, as in the material's file. Throws like `material`. */
-  formKeys(name: string): readonly Readonly<Record<string, number | string>>[];
+  /** The file of a material, checked. Throws like `material`. */
+  materialFile(name: string): MaterialFile;
 }
 
 /**
@@ -73,11 +73,7 @@ class FileLibrary implements Library {
     return material;
   }
 
-  formKeys(name: string): readonly Readonly<Record<string, number | string>>[] {
-    return this.materialFile(name).phases?.map(({ eos }) => eos) ?? [];
-  }
-
-  private materialFile(name: string): MaterialFile {
+  materialFile(name: string): MaterialFile {
     const entry = this.materialEntry(name);
     const { value, problems } = validate(materialSchema, entry.path, entry.content);
     if (problems) throw problems[0];

@@ -1,4 +1,4 @@
-import type { Phase, Source } from "../eos/material.ts";
+import type { Material, Source } from "../eos/material.ts";
 import type { Composition } from "./composition.ts";
 
 /** A source and what was taken from it. */
@@ -11,12 +11,17 @@ export interface UsedSource extends Source {
 export function sourcesOf(compositions: readonly Composition[]): UsedSource[] {
   const used = compositions.flatMap(({ name, source, layers }) => [
     ...(source ? [{ subject: name, ...source }] : []),
-    ...layers.flatMap(({ material }) => material.phases.flatMap((phase) => phaseSources(material.name, phase))),
+    ...layers.flatMap(({ material }) => materialSources(material)),
   ]);
   return [...new Map(used.map((source) => [JSON.stringify(source), source])).values()];
 }
 
-function phaseSources(material: string, phase: Phase): UsedSource[] {
+function materialSources({ name, source, phases, everyPhase = phases }: Material): UsedSource[] {
+  const own = source ? [{ subject: name, ...source }] : [];
+  return [...own, ...everyPhase.flatMap((phase) => phaseSources(name, phase))];
+}
+
+function phaseSources(material: string, phase: NonNullable<Material["everyPhase"]>[number]): UsedSource[] {
   if (phase.components) return phase.components.flatMap((part) => phaseSources(part.material, part.phase));
   return [{ subject: `${material}, ${phase.name} (${phase.form})`, ...phase.source }];
 }

@@ -1,15 +1,18 @@
 import { describe, expect, test } from "vitest";
+import { descriptionText } from "../../src/cli/libraryText.ts";
 import { densityAt, type Material, phaseAt } from "../../src/eos/material.ts";
 import { meltingCurves } from "../../src/eos/melting/meltingCurves.ts";
 import { meltingTemperature } from "../../src/eos/melting/meltingTemperature.ts";
 import { checkLibrary } from "../../src/library/checkLibrary.ts";
-import { type Library, loadLibrary } from "../../src/library/library.ts";
+import { describeMaterial } from "../../src/library/describe.ts";
+import { loadLibrary } from "../../src/library/library.ts";
 import type { LibraryFile } from "../../src/library/libraryFiles.ts";
 import { sourcesOf } from "../../src/library/sources.ts";
 import { GPA } from "../../src/units/constants.ts";
 import { expectClose } from "../support/expectClose.ts";
 import {
   bridgmanite,
+  cold,
   compositionOf,
   hcpIron,
   liquidIron,
@@ -349,13 +352,110 @@ describe("water", () => {
   });
 });
 
-test("the sources of a warm planet name every phase it can have", () => {
-  const library: Library = loadLibrary([
-    mantleOf("mantle", 1.25, 0.1),
-    compositionOf("c", [{ material: "mantle", massFraction: 1 }]),
+describe("the sources of a warm planet", () => {
+  const of = (...files: LibraryFile[]) => sourcesOf([loadLibrary(files).composition("m")]);
+
+  test("name every mineral", () => {
+    const notes = of(mantleOf("m", 1.25, 0.1)).map(({ note }) => note ?? "");
+    expect(notes.some((note) => note.includes("Fe-wadsleyite (by analogy)"))).toBe(true);
+  });
+
+  test("name phases that are not stable at room temperature, and what the file as a whole rests on", () => {
+    const core = materialOf("m", { ...liquidIron, untilFreezing: freezing }, hcpIron);
+    expect(of(core).map(({ subject }) => subject)).toEqual(["m, liquid (birch-murnaghan)", "m, hcp (birch-murnaghan)"]);
+    const mantle = {
+      material: "m",
+      title: "t",
+      mantle: { magnesiumToSilicon: 1, ironNumber: 0 },
+      source: { citation: "S" },
+    };
+    expect(of(json("mine/materials/m.json", mantle))[0]).toEqual({ subject: "m", citation: "S" });
+  });
+
+  test("name those of the compounds in an alloy", () => {
+    const [source] = of(materialOf("m", { ...hcpIron, alloy: { silicon: 0.05 } }));
+    expect(source.note).toBe(
+      "silicon as FeSi: Fischer et al. 2014, J. Geophys. Res. Solid Earth 119, 2810 (B2), from memory, low confidence",
+    );
+  });
+});
+
+describe("the description of a warm material", () => {
+  const library = loadLibrary([
+    materialOf(
+      "core",
+      { ...liquidIron, alloy: { nickel: 0.05 }, untilFreezing: { ...freezing, ironMoleFraction: 0.9 } },
+      hcpIron,
+    ),
+    materialOf(
+      "rock",
+      { ...bridgmanite, phase: "low", untilGPa: 50, clapeyron: { atTemperatureK: 2000, slopeMPaPerK: 5 } },
+      bridgmanite,
+    ),
+    mantleOf("mantle", 1.25, 0.107),
+    waterOf("sea"),
+    materialOf("cold", cold(hcpIron)),
   ]);
-  const notes = sourcesOf([library.composition("c")]).map(({ note }) => note ?? "");
-  expect(notes.some((note) => note.includes("Fe-wadsleyite (by analogy)"))).toBe(true);
+  const shown = (name: string) => describeMaterial(library, name);
+
+  test("lists every phase with what makes it warm, and ranges at room temperature", () => {
+    const { temperatureK, phases } = shown("core");
+    expect(temperatureK).toBe(300);
+    expect(phases).toMatchObject([
+      {
+        name: "liquid",
+        parameters: { densityZeroKgM3: 7019 },
+        warmKeys: {
+          thermal: { reference: "isentrope", gammaZero: 1.735 },
+          alloy: { nickel: 0.05 },
+          untilFreezing: { curve: "iron-anzellini-2013", ironMoleFraction: 0.9 },
+        },
+      },
+      {
+        name: "hcp",
+        warmKeys: {
+          thermal: { reference: "isotherm", formula: "Fe", debyeTemperatureK: 422 },
+          gruneisen: { law: "power", q: 0.78 },
+          electronic: { coefficientJKgK2: 0.07 },
+        },
+        fromGPa: 0,
+      },
+    ]);
+    expect(phases[0]).not.toHaveProperty("fromGPa");
+    expect(shown("rock").phases[0]).toMatchObject({ untilGPa: 41.5, warmKeys: { clapeyron: { slopeMPaPerK: 5 } } });
+  });
+
+  test("lists the minerals of a mantle, whose fractions sum to 1, with their sources", () => {
+    const { parameters, phases } = shown("mantle");
+    expect(parameters).toEqual({ magnesiumToSilicon: 1.25, ironNumber: 0.107 });
+    expect(phases).toHaveLength(5);
+    for (const { minerals = [] } of phases) {
+      const sum = minerals.reduce((total, { massFraction }) => total + massFraction, 0);
+      expectClose(sum, 1, { rel: 1e-14, because: "mass balance" });
+      expect(minerals.every(({ source }) => source.citation.includes("2011"))).toBe(true);
+    }
+    // Olivine to wadsleyite, 13.9 GPa at 1775 K with 3.25 MPa/K, carried down to 300 K.
+    expectClose(phases[0].untilGPa ?? 0, 13.9 - 3.25e-3 * 1475, { rel: 1e-9, because: "a straight line" });
+  });
+
+  test("is that of ice for water, and has no temperature for a cold material", () => {
+    const { temperatureK, phases } = shown("sea");
+    expectClose(temperatureK ?? 0, 250, { rel: 1e-9, because: "polynomials" });
+    expect(phases[0]).toMatchObject({ name: "ice-Ih", fromGPa: 0 });
+    expect(shown("cold")).not.toHaveProperty("temperatureK");
+    expect(shown("cold").phases[0]).not.toHaveProperty("warmKeys");
+  });
+
+  test("reads well", () => {
+    const text = descriptionText(shown("core"));
+    expect(text).toContain("pressures and densities at 300 K; a planet has its own temperatures");
+    expect(text).toContain(
+      "    untilFreezing: curve iron-anzellini-2013, ironMoleFraction 0.9\n    not stable at this temperature\n",
+    );
+    expect(descriptionText(shown("mantle"))).toMatch(
+      /phase bridgmanite: finite-strain-debye\n {4}74 % Mg-bridgmanite \(Stixrude/,
+    );
+  });
 });
 
 test("phases of a stack are found by pressure", () => {
