@@ -1,4 +1,9 @@
-import type { CompositionDescription, MaterialDescription, PhaseDescription } from "../library/describe.ts";
+import type {
+  CompositionDescription,
+  LayerDescription,
+  MaterialDescription,
+  PhaseDescription,
+} from "../library/describe.ts";
 import type { JoinDescription } from "../library/describeJoins.ts";
 import type { Parameters } from "../library/describeWarm.ts";
 import type { Library } from "../library/library.ts";
@@ -20,16 +25,22 @@ export function listingText({ compositions, materials, notes }: Library): string
 /** A composition with its materials, or a material, for a person to read. */
 export function descriptionText(description: CompositionDescription | MaterialDescription): string {
   if (description.kind === "material") return joinSections([materialLines(description)]);
-  const { name, title, source, surface, layers, materials } = description;
+  const { name, title, source, surface, temperature, layers, materials } = description;
   const recipe = [
     `${name}: ${title}`,
     `  surface: ${surface.pressurePa} Pa, ${surface.temperatureK} K`,
-    ...layers.map(
-      (layer, i) => `  layer ${i + 1} from the centre: ${layer.name}, mass fraction ${digits(layer.massFraction)}`,
-    ),
+    ...(temperature ? [`  temperature: ${temperature.mode}, ${temperature.topK} K at the surface`] : []),
+    ...layers.map(layerLine),
     ...(source ? [`  source: ${sourceText(source)}`] : []),
   ];
   return joinSections([recipe, ...materials.map(materialLines)]);
+}
+
+function layerLine({ name, massFraction, heating }: LayerDescription, i: number): string {
+  const fraction = `  layer ${i + 1} from the centre: ${name}, mass fraction ${digits(massFraction)}`;
+  if (heating === undefined) return fraction;
+  const top = "top" in heating ? `${heating.top} K at its top` : `${heating.jump} K warmer than the layer above`;
+  return `${fraction}, ${top}`;
 }
 
 function materialLines(material: MaterialDescription): string[] {

@@ -1,4 +1,4 @@
-import { densityAt, type Material, type Phase, phaseAt, type Source } from "../eos/material.ts";
+import { densityAt, type Material, type Phase, phaseAt, type Source, type TemperatureMode } from "../eos/material.ts";
 import { ModelRangeError } from "../errors.ts";
 import { GPA } from "../units/constants.ts";
 import type { Composition, Layer } from "./composition.ts";
@@ -56,10 +56,20 @@ export interface CompositionDescription {
   readonly title: string;
   readonly source?: Source;
   readonly surface: Composition["surface"];
+  /** How temperature goes on from the top of the outermost layer [K]; absent for a cold planet. */
+  readonly temperature?: { readonly mode: TemperatureMode["kind"]; readonly topK: number };
   /** Centre to surface, nested compositions expanded. */
-  readonly layers: readonly { readonly name: string; readonly title: string; readonly massFraction: number }[];
+  readonly layers: readonly LayerDescription[];
   /** Every material of the layers, once. */
   readonly materials: readonly MaterialDescription[];
+}
+
+export interface LayerDescription {
+  readonly name: string;
+  readonly title: string;
+  readonly massFraction: number;
+  /** How warm it begins [K], or how much warmer than the layer above ends. */
+  readonly heating?: Layer["heating"];
 }
 
 /** All there is to say about a composition or, where no composition has the name, a material. Throws like `Library`. */
@@ -70,7 +80,7 @@ export function describe(library: Library, name: string): CompositionDescription
 }
 
 export function describeComposition(library: Library, name: string): CompositionDescription {
-  const { title, source, surface, layers } = library.composition(name);
+  const { title, source, surface, temperature, layers } = library.composition(name);
   const materials = new Set(layers.flatMap(materialNames));
   return {
     kind: "composition",
@@ -78,10 +88,10 @@ export function describeComposition(library: Library, name: string): Composition
     title,
     ...(source && { source }),
     surface,
-    layers: layers.map((layer) => ({
-      name: layer.name,
-      title: layer.material.title,
-      massFraction: layer.massFraction,
+    ...(temperature && { temperature: { mode: temperature.mode.kind, topK: temperature.top } }),
+    layers: layers.map(({ name, material, massFraction, heating }) => ({
+      ...{ name, title: material.title, massFraction },
+      ...(heating && { heating }),
     })),
     materials: [...materials].map((material) => describeMaterial(library, material)),
   };

@@ -4,7 +4,7 @@ import { densityAt, type Material, phaseAt } from "../../src/eos/material.ts";
 import { meltingCurves } from "../../src/eos/melting/meltingCurves.ts";
 import { meltingTemperature } from "../../src/eos/melting/meltingTemperature.ts";
 import { checkLibrary } from "../../src/library/checkLibrary.ts";
-import { describeMaterial } from "../../src/library/describe.ts";
+import { describeComposition, describeMaterial } from "../../src/library/describe.ts";
 import { loadLibrary } from "../../src/library/library.ts";
 import type { LibraryFile } from "../../src/library/libraryFiles.ts";
 import { sourcesOf } from "../../src/library/sources.ts";
@@ -444,6 +444,21 @@ describe("the description of a warm material", () => {
     expect(phases[0]).toMatchObject({ name: "ice-Ih", fromGPa: 0 });
     expect(shown("cold")).not.toHaveProperty("temperatureK");
     expect(shown("cold").phases[0]).not.toHaveProperty("warmKeys");
+  });
+
+  test("of a composition holds its temperatures", () => {
+    const layers = [
+      { material: "core", massFraction: 0.3, topTemperatureK: 4500 },
+      { material: "rock", massFraction: 0.3, temperatureJumpK: 200 },
+      { material: "mantle", massFraction: 0.4 },
+    ];
+    const file = compositionOf("c", layers, { temperature: { mode: "adiabatic", potentialTemperatureK: 1600 } });
+    const materials = [materialOf("core", hcpIron), materialOf("rock", bridgmanite), mantleOf("mantle", 1.25, 0.1)];
+    const text = descriptionText(describeComposition(loadLibrary([...materials, file]), "c"));
+    expect(text).toContain("  temperature: adiabatic, 1600 K at the surface\n");
+    expect(text).toContain("core, mass fraction 0.3, 4500 K at its top\n");
+    expect(text).toContain("rock, mass fraction 0.3, 200 K warmer than the layer above\n");
+    expect(text).toContain("mantle, mass fraction 0.4\n");
   });
 
   test("reads well", () => {

@@ -22,9 +22,9 @@ export function validationCsv({ checks }: ValidationRun): string {
 }
 
 const missed = `
-.missed th, .missed td { color: #b3261e; }
-@media (prefers-color-scheme: dark) { .missed th, .missed td { color: #ff9a92; } }
-@media print { .missed th, .missed td { color: #b3261e; } }
+.missed tbody { color: #b3261e; }
+@media (prefers-color-scheme: dark) { .missed tbody { color: #ff9a92; } }
+@media print { .missed tbody { color: #b3261e; } }
 `;
 
 export function validationHtml(run: ValidationRun): Promise<string> {
@@ -34,8 +34,8 @@ export function validationHtml(run: ValidationRun): Promise<string> {
   const body = [
     "<h1>Bulkwright against the Solar System and published relations</h1>",
     `<p class="lead">Computed by Bulkwright ${escapeHtml(version)} from the shipped compositions named after the bodies, whose ` +
-      "files say what each input rests on. No input was fitted to a number below; a check is marked as not independent " +
-      "where an input derives from the quantity compared.</p>",
+      "files say what each input rests on. No input was adjusted to bring a number below to its bar. Some derive from the " +
+      "quantity compared, as the density of the Earth's core does from PREM: such a check is marked as not independent.</p>",
     "<h2>Missed</h2>",
     `<div class="missed">${tableHtml(checkTable("missed", `${misses.length} bars missed, with the likely reason`, misses, true))}</div>`,
     "<h2>Met</h2>",
@@ -55,7 +55,6 @@ const checkColumns: readonly TableColumn[] = [
   { title: "Quantity", wide: true },
   { title: "Computed", numeric: true, digits: 5 },
   { title: "Reference", numeric: true, digits: 5 },
-  { title: "Unit" },
   { title: "Difference", unit: "%", numeric: true, digits: 2 },
   { title: "Allowed" },
   { title: "Independent" },
@@ -70,7 +69,7 @@ function checkTable(id: string, caption: string, checks: readonly Check[], reaso
     rows: checks.map((check) => {
       const difference = relativeDifference(check);
       return [
-        ...[check.body, check.quantity, check.computed, check.reference, check.unit],
+        ...[check.body, withUnit(check), check.computed, check.reference],
         ...[
           difference === undefined ? null : 100 * difference,
           allowedText(check),
@@ -82,6 +81,8 @@ function checkTable(id: string, caption: string, checks: readonly Check[], reaso
     }),
   };
 }
+
+const withUnit = ({ quantity, unit }: Check): string => (unit === "" ? quantity : `${quantity} [${unit}]`);
 
 function boundaryTable(planets: readonly Validated[]) {
   return {
