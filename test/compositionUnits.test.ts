@@ -1,7 +1,7 @@
 import { readdirSync, readFileSync } from "node:fs";
 import { expect, test } from "vitest";
 
-const unitSuffix = /(KgM3|PerGPa|GPa|MPaPerK|Pa|K|SI|KgJ|JKgK2?)$/;
+const unitSuffix = /(KgM3|PerGPa|GPa|MPaPerK|Pa|K|Earth|Gyr|SI|KgJ|JKgK2?)$/;
 const dimensionless = [
   ...["massFraction", "order", "exponent", "bulkModulusPrime", "bulkModulusPrimeInfinite"],
   ...["gammaZero", "gammaInfinity", "beta", "q", "qZero", "gammaExponent"],

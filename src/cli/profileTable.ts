@@ -7,10 +7,10 @@ const columns = [
   "enclosed_mass_earth",
   "pressure_gpa",
   "density_kg_m3",
-  "temperature_k",
   "gravity_m_s2",
   "layer",
   "phase",
+  "temperature_k",
 ];
 
 /** The inside of a planet, one row a point from centre to surface; cold layers have no temperature. */
@@ -22,10 +22,10 @@ export function profileTable(points: readonly ProfilePoint[]): Table {
       enclosedMass / EARTH_MASS,
       pressure / GPA,
       density,
-      temperature,
       gravity,
       layer,
       phase,
+      temperature,
     ]),
   };
 }

@@ -1,5 +1,5 @@
 import { ModelRangeError } from "../errors.ts";
-import { constants, EARTH_MASS, EARTH_RADIUS } from "../units/constants.ts";
+import { EARTH_FLUX, EARTH_MASS, EARTH_RADIUS, GIGAYEAR } from "../units/constants.ts";
 
 /** What sets the size of a hydrogen–helium envelope besides its mass fraction. SI. */
 export interface EnvelopeConditions {
@@ -12,9 +12,6 @@ export interface EnvelopeConditions {
   /** Opacity of the atmosphere, which sets how fast it cools: that of a solar mixture, or enhanced by metals. */
   readonly opacity: "solar" | "enhanced";
 }
-
-const EARTH_FLUX = constants.solarIrradiance.value;
-const GIGAYEAR = 1e9 * constants.julianYear.value;
 
 const FRACTION_EXPONENT = 0.59;
 /** The second from memory. */

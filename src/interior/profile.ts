@@ -34,8 +34,8 @@ const LANDED = 1e-14;
 
 /**
  * The interior of a planet of `mass` [kg]: `count` points evenly spaced in radius from the centre to the surface, and
- * both sides of every layer and phase boundary. Points between the integrator's own steps are integrated, not
- * interpolated, so they are as good as the rest.
+ * both sides of every layer and phase boundary; with a gas envelope they end where the gas begins. Points between the
+ * integrator's own steps are integrated, not interpolated, so they are as good as the rest.
  * Throws as StructureSolver.solve
  * Checked hydrostatic balance by differences, both sides of boundaries, mass and radius: test/interior/profile.test.ts
  */
@@ -45,7 +45,13 @@ export function solveProfile(
   count: number,
 ): { planet: Planet; points: ProfilePoint[] } {
   const planet = planetSolver(composition).solve(mass);
-  const waypoints = record(planet.composition, mass, planet.centralPressure);
+  return { planet, points: profileOf(planet, count) };
+}
+
+/** As `solveProfile`, of a planet already solved. */
+export function profileOf(whole: Planet, count: number): ProfilePoint[] {
+  const planet = whole.envelope?.core ?? whole;
+  const waypoints = record(planet.composition, planet.mass, planet.centralPressure);
   const radii = Array.from({ length: count }, (_, i) => (planet.radius * i) / (count - 1));
   const sampler = new Sampler(planet.composition, planet.centralPressure);
   const points: ProfilePoint[] = [sampler.centre(waypoints[0].stretch)];
@@ -63,7 +69,7 @@ export function solveProfile(
     for (; next < count - 1 && radii[next] <= radiusOf(to); next++) points.push(sampler.between(from, to, radii[next]));
   }
   points.push(sampler.at(waypoints[waypoints.length - 1]));
-  return { planet, points };
+  return points;
 }
 
 /** All points the integration with this central pressure passes through. */

@@ -1,7 +1,7 @@
 import { ConvergenceError } from "../errors.ts";
 import type { Composition } from "../library/composition.ts";
 import { G } from "../units/constants.ts";
-import type { Planet } from "./planet.ts";
+import type { Planet, SolidPlanet } from "./planet.ts";
 import { DEFAULT_TOLERANCE, StructureSolver } from "./structureSolver.ts";
 import { WarmLayers } from "./warmLayers.ts";
 import { warmNotes } from "./warmNotes.ts";
@@ -53,7 +53,7 @@ export class WarmSolver {
   }
 
   /** As StructureSolver.solve; the planet's composition holds the curves that its temperatures led to. */
-  solve(mass: number, guess?: number): Planet {
+  solve(mass: number, guess?: number): SolidPlanet {
     let tops = this.firstTops(mass);
     let last: Round | undefined;
     let centralPressure = guess;
@@ -82,7 +82,7 @@ export class WarmSolver {
     );
   }
 
-  private settled(planet: Planet, counters: Planet["counters"], change: number): Planet {
+  private settled(planet: SolidPlanet, counters: Planet["counters"], change: number): SolidPlanet {
     const integrationError = planet.radiusRelativeError * (this.hasKinks ? KINKED : 1);
     const radiusRelativeError = integrationError + EXPANSION * change;
     return { ...planet, counters, radiusRelativeError, notes: warmNotes(planet) };

@@ -32,6 +32,7 @@ export function checkLibrary(files: readonly LibraryFile[], base: readonly Libra
 function build(library: Library, { kind, name }: Entry): InputError[] {
   try {
     library[kind](name);
+    if (kind === "material") for (const alternative of library.alternatives(name)) library.material(alternative);
     return [];
   } catch (error) {
     return [asProblem(error)];

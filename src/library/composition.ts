@@ -1,6 +1,17 @@
 import type { Material, Source, TemperatureMode } from "../eos/material.ts";
 
-/** A layer with its material resolved; fractions of the whole planet's mass. */
+/** A hydrogen–helium envelope around the layers. SI. */
+export interface GasEnvelope {
+  /** Of the whole planet's mass; the layers share the rest. */
+  readonly massFraction: number;
+  /** Received from the star [W m^-2]; it and the age may come with the planet instead. */
+  readonly flux?: number;
+  /** [s] */
+  readonly age?: number;
+  readonly opacity: "solar" | "enhanced";
+}
+
+/** A layer with its material resolved; fractions of the mass of all layers. */
 export interface Layer {
   /** Shown in outputs: the material's name, or the parts of a mixture joined by `+`. */
   readonly name: string;
@@ -21,6 +32,7 @@ export interface Composition {
   readonly source?: Source;
   readonly surface: { readonly pressurePa: number; readonly temperatureK: number };
   readonly layers: readonly Layer[];
+  readonly envelope?: GasEnvelope;
   /** Absent for a cold planet, whose materials are taken as their files give them. */
   readonly temperature?: {
     readonly mode: TemperatureMode;

@@ -1,17 +1,29 @@
 import type { Material } from "../eos/material.ts";
 import { InputError } from "../errors.ts";
+import { EARTH_FLUX, GIGAYEAR } from "../units/constants.ts";
 import { buildMaterial } from "./buildMaterial.ts";
-import type { Composition } from "./composition.ts";
+import type { Composition, GasEnvelope } from "./composition.ts";
 import { inFile, unknownName } from "./libraryErrors.ts";
 import { type Entry, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
 import { readDensityTable } from "./readDensityTable.ts";
 import { type NameLookup, resolveLayers } from "./resolveLayers.ts";
 import { resolveTemperature } from "./resolveTemperature.ts";
-import { type CompositionFile, compositionSchema, type MaterialFile, materialSchema } from "./schemas.ts";
+import {
+  type CompositionFile,
+  compositionSchema,
+  type EnvelopeEntry,
+  type MaterialFile,
+  materialSchema,
+} from "./schemas.ts";
 import { validate } from "./validate.ts";
 
 /** A surface at vacuum and room temperature, where a composition file does not give its own. */
 const DEFAULT_SURFACE = { pressurePa: 0, temperatureK: 300 };
+
+/** Names of materials by the names of those they replace. */
+export type Substitutes = ReadonlyMap<string, string>;
+
+const NO_SUBSTITUTES: Substitutes = new Map();
 
 /** Compositions and materials by name. Each is read, checked and built when first asked for. */
 export interface Library {
@@ -20,12 +32,15 @@ export interface Library {
   /** What a user should know, e.g. that a file of theirs took the place of a shipped one. */
   readonly notes: readonly string[];
   /**
-   * The composition of that name, or a planet of the material of that name alone.
+   * The composition of that name, or a planet of the material of that name alone; `substitutes` stand in for the
+   * materials they are filed under.
    * Throws InputError `unknown-composition`, `composition-cycle`, or any error of the files it is made from.
    */
-  composition(name: string): Composition;
+  composition(name: string, substitutes?: Substitutes): Composition;
   /** Throws InputError `unknown-material`, or any error of its file. */
   material(name: string): Material;
+  /** Materials that hold other published sets for the same substance, as its file lists them. Throws like `material`. */
+  alternatives(material: string): readonly string[];
   /** The file of a material, checked. Throws like `material`. */
   materialFile(name: string): MaterialFile;
 }
@@ -59,8 +74,8 @@ class FileLibrary implements Library {
     return [...this.materialEntries.values()];
   }
 
-  composition(name: string): Composition {
-    return this.resolve(name, []);
+  composition(name: string, substitutes = NO_SUBSTITUTES): Composition {
+    return this.resolve(name, [], substitutes);
   }
 
   material(name: string): Material {
@@ -71,6 +86,10 @@ class FileLibrary implements Library {
     const material = inFile(path, () => buildMaterial(file, (table) => this.table(path, table)));
     this.builtMaterials.set(name, material);
     return material;
+  }
+
+  alternatives(name: string): readonly string[] {
+    return this.materialFile(name).alternatives ?? [];
   }
 
   materialFile(name: string): MaterialFile {
@@ -96,24 +115,30 @@ class FileLibrary implements Library {
   }
 
   /** `above` are the compositions being resolved that led here, outermost first. */
-  private resolve(name: string, above: readonly string[]): Composition {
-    const known = this.builtCompositions.get(name);
+  private resolve(name: string, above: readonly string[], substitutes: Substitutes): Composition {
+    const known = substitutes.size === 0 ? this.builtCompositions.get(name) : undefined;
     if (known !== undefined) return known;
     const entry = this.compositionEntries.get(name);
-    const composition = entry === undefined ? this.pure(name) : this.resolveEntry(entry, above);
-    this.builtCompositions.set(name, composition);
+    const composition =
+      entry === undefined ? this.pure(name, substitutes) : this.resolveEntry(entry, above, substitutes);
+    if (substitutes.size === 0) this.builtCompositions.set(name, composition);
     return composition;
   }
 
-  private pure(name: string): Composition {
+  private pure(name: string, substitutes: Substitutes): Composition {
     if (!this.materialEntries.has(name)) {
       throw unknownName("composition", name, [...this.compositionEntries.keys(), ...this.materialEntries.keys()]);
     }
-    const material = this.material(name);
-    return { name, title: material.title, surface: DEFAULT_SURFACE, layers: [{ name, material, massFraction: 1 }] };
+    const material = this.material(substitutes.get(name) ?? name);
+    const layers = [{ name: material.name, material, massFraction: 1 }];
+    return { name, title: material.title, surface: DEFAULT_SURFACE, layers };
   }
 
-  private resolveEntry({ name, path, content }: Entry, above: readonly string[]): Composition {
+  private resolveEntry(
+    { name, path, content }: Entry,
+    above: readonly string[],
+    substitutes: Substitutes,
+  ): Composition {
     const chain = [...above, name];
     if (above.includes(name)) {
       throw new InputError(
@@ -125,8 +150,8 @@ class FileLibrary implements Library {
     const { value: file, problems } = validate(compositionSchema, path, content);
     if (problems) throw problems[0];
     const lookup: NameLookup = {
-      material: (wanted, key) => inFile(path, () => this.material(wanted), key),
-      composition: (wanted, key) => inFile(path, () => this.resolve(wanted, chain), key),
+      material: (wanted, key) => inFile(path, () => this.material(substitutes.get(wanted) ?? wanted), key),
+      composition: (wanted, key) => inFile(path, () => this.resolve(wanted, chain, substitutes), key),
     };
     return inFile(path, () => compositionOf(file, resolveLayers(file, lookup)));
   }
@@ -145,5 +170,19 @@ class FileLibrary implements Library {
 function compositionOf(file: CompositionFile, layers: Composition["layers"]): Composition {
   const { composition: name, title, source, surface = DEFAULT_SURFACE } = file;
   const temperature = resolveTemperature(file.temperature, layers, surface.temperatureK);
-  return { name, title, ...(source && { source }), surface, layers, ...(temperature && { temperature }) };
+  return {
+    ...{ name, title, surface, layers },
+    ...(source && { source }),
+    ...(temperature && { temperature }),
+    ...(file.envelope && { envelope: envelopeOf(file.envelope) }),
+  };
+}
+
+function envelopeOf({ massFraction, fluxEarth, ageGyr, opacity }: EnvelopeEntry): GasEnvelope {
+  return {
+    massFraction,
+    opacity,
+    ...(fluxEarth !== undefined && { flux: fluxEarth * EARTH_FLUX }),
+    ...(ageGyr !== undefined && { age: ageGyr * GIGAYEAR }),
+  };
 }

@@ -16,6 +16,7 @@ export function resolveLayers(file: CompositionFile, lookup: NameLookup): Layer[
     const key = `layers[${i}]`;
     if (composition !== undefined) {
       const inner = lookup.composition(composition, `${key}.composition`);
+      if (inner.envelope !== undefined) throw envelopeInside(composition, key);
       return inner.layers.map((layer, j) => ({
         ...layer,
         massFraction: layer.massFraction * massFraction,
@@ -27,6 +28,15 @@ export function resolveLayers(file: CompositionFile, lookup: NameLookup): Layer[
     return [{ name: substance.name, material: substance, massFraction, ...heating(heat) }];
   });
   return normalised(layers.filter(({ massFraction }) => massFraction > 0));
+}
+
+function envelopeInside(composition: string, key: string): InputError {
+  return new InputError(
+    "envelope-inside",
+    `${key}.composition: "${composition}" ends in a gas envelope, and gas cannot lie inside a planet; ` +
+      "name a composition without one and give the envelope here.",
+    { column: `${key}.composition`, found: composition },
+  );
 }
 
 function heating(keys: { temperatureJumpK?: number; topTemperatureK?: number }): Pick<Layer, "heating"> {

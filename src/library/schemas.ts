@@ -42,6 +42,7 @@ export const materialSchema = strictObject({
   phases: z.array(phaseSchema).min(1).optional(),
   mantle: mantleSchema.optional(),
   water: z.literal(true).optional(),
+  alternatives: z.array(name).min(1).optional(),
   source: sourceSchema.optional(),
 }).check(({ value: { phases, mantle, water }, issues }) => {
   if ([phases, mantle, water].filter((given) => given !== undefined).length !== 1) {
@@ -105,6 +106,14 @@ const temperatureSchema = z.discriminatedUnion("mode", [
   }),
 ]);
 
+/** Gas around the layers, which share the rest of the mass; flux and age may be given with the run instead. */
+const envelopeSchema = strictObject({
+  massFraction: z.number().gt(0).lt(1),
+  fluxEarth: z.number().positive().optional(),
+  ageGyr: z.number().positive().optional(),
+  opacity: z.enum(["solar", "enhanced"]),
+});
+
 /** A composition file: layers from the centre outwards. */
 export const compositionSchema = strictObject({
   $schema: z.string().optional(),
@@ -114,12 +123,14 @@ export const compositionSchema = strictObject({
   surface: strictObject({ pressurePa: z.number().nonnegative(), temperatureK: z.number().positive() }).optional(),
   temperature: temperatureSchema.optional(),
   layers: z.array(layerSchema).min(1),
+  envelope: envelopeSchema.optional(),
 }).check(({ value: { layers }, issues }) => {
   issues.push(...sumIssue(layers, ["layers"]));
 });
 
 export type MaterialFile = z.output<typeof materialSchema>;
 export type CompositionFile = z.output<typeof compositionSchema>;
+export type EnvelopeEntry = z.output<typeof envelopeSchema>;
 export type PartEntry = z.output<typeof partSchema>;
 
 function sumIssue(parts: readonly { massFraction: number }[], path: string[]): z.core.$ZodRawIssue[] {

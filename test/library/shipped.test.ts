@@ -11,6 +11,7 @@ const names = library.materials.map(({ name }) => name);
 const compositions = library.compositions.map(({ name }) => name);
 const GPA = 1e9;
 
+const alternatives = ["magnesium-silicate-2016", "water-ice-vii-2004"];
 const defaults = ["iron-birch-2025", "magnesium-silicate", "water-ice-vii"];
 const polytropes = names.filter((name) => name.endsWith("-polytrope"));
 
@@ -21,7 +22,7 @@ test("all promised materials and compositions are there", () => {
     ...["mantle-pyrolite", "mantle-mars", "mantle-mercury", "mantle-moon", "silicate-chondritic", "water-phases"],
   ];
   const cold = ["crust-mars", "crust-moon", "serpentine-chondritic", "troilite"];
-  expect([...names].sort()).toEqual([...defaults, ...others, ...polytropes, ...warm, ...cold].sort());
+  expect([...names].sort()).toEqual([...defaults, ...alternatives, ...others, ...polytropes, ...warm, ...cold].sort());
   expect(polytropes).toHaveLength(6);
   expect([...compositions].sort()).toEqual(
     [
@@ -31,6 +32,7 @@ test("all promised materials and compositions are there", () => {
       "earth-like",
       "iron-rich",
       "coreless",
+      "earth-like-gas-2",
       "earth-like-water-10",
       "earth-like-water-30",
       "earth-like-water-50",

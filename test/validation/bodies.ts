@@ -190,7 +190,7 @@ function inertia({ composition, inertiaFactor }: Planet, bar: Bar): Check {
     body: composition.name,
     quantity: "moment of inertia factor, mean",
     unit: "",
-    computed: inertiaFactor,
+    computed: inertiaFactor ?? Number.NaN,
     ...bar,
   };
 }

@@ -40,7 +40,10 @@ function checks(name: string, core: string, independent: boolean): Check[] {
   ): Row => ({ quantity, unit, computed, reference, ...rest });
   const rows: Row[] = [
     row("radius", "km", planet.radius / 1e3, 6371.0084, { allowed: 0.005, source: JPL }),
-    row("moment of inertia factor, mean", "", planet.inertiaFactor, 0.3308, { allowed: 0.005, source: PREM }),
+    row("moment of inertia factor, mean", "", planet.inertiaFactor ?? Number.NaN, 0.3308, {
+      allowed: 0.005,
+      source: PREM,
+    }),
     row("core radius", "km", coreTop.radius / 1e3, 3480, { allowed: 0.01, source: PREM }),
     row("inner core radius", "km", innerCore.radius / 1e3, 1221.5, { source: PREM }),
     row("pressure at the centre", "GPa", planet.centralPressure / GPA, 364.09, { allowed: 0.02, source: PREM_G }),
