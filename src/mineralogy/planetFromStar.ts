@@ -1,5 +1,5 @@
 import { InputError } from "../errors.ts";
-import type { Abundances } from "./abundances.ts";
+import { type Abundances, pick } from "./abundances.ts";
 import { molarMass } from "./formula.ts";
 import type { MantleComposition } from "./mantleMineralogy.ts";
 
@@ -59,10 +59,6 @@ export function planetFromStar(abundances: Abundances, mantleIronShare = 0): Sta
     mantle: { magnesiumToSilicon: central.Mg / central.Si, ironNumber: mantleIron / (central.Mg + mantleIron) },
     magnesiumToSilicon: interval(magnesiumToSilicon, Math.exp),
   };
-}
-
-function pick(abundances: Abundances, elements: readonly string[]): Abundances {
-  return Object.fromEntries(Object.entries(abundances).filter(([element]) => elements.includes(element)));
 }
 
 type Numbers = Readonly<Record<string, number>>;
