@@ -31,12 +31,15 @@ export function liquidMetal(parameters: LiquidMetalParameters): IsentropeBasedEo
   const shift = 1.5 * gammaExponent;
   const heatAt = (density: number): IsentropeHeat => {
     const u = (density / densityZero) ** (2 / 3);
-    const thinning = gammaPerEnergy * u ** shift;
+    const shifted = u ** shift;
+    const thinning = gammaPerEnergy * shifted;
     let [excess, slope, integral] = [0, 0, 0];
-    for (let j = energy.length - 1; j >= 0; j--) {
-      excess = excess * u + energy[j];
-      slope += (2 / 3) * j * energy[j] * u ** j;
-      integral += (1.5 * energy[j] * (u ** (j + shift) - 1)) / (j + shift);
+    let power = 1;
+    for (let j = 0; j < energy.length; j++) {
+      excess += energy[j] * power;
+      slope += (2 / 3) * j * energy[j] * power;
+      integral += (1.5 * energy[j] * (shifted * power - 1)) / (j + shift);
+      power *= u;
     }
     return {
       temperature: temperatureZero * Math.exp(1.5 * gammaZero * Math.log(u) + gammaPerEnergy * integral),
