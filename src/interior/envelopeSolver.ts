@@ -76,14 +76,14 @@ function survivalNotes({ conditions, escapeParameter, massLossTime }: NonNullabl
   return [
     ...(massLossTime < conditions.age
       ? [
-          `the envelope could not survive: the star's high-energy light removes it in ${inGyr(massLossTime)}, ` +
-            `and its age is ${inGyr(conditions.age)}`,
+          "the envelope could not survive: the star's high-energy light removes it in " +
+            `${inGyr(massLossTime)} and its age is ${inGyr(conditions.age)}`,
         ]
       : []),
     ...(escapeParameter < BOUND
       ? [
-          `the envelope could not survive: its gas flows away at its own temperature (escape parameter ` +
-            `${escapeParameter.toPrecision(3)}, below ${BOUND})`,
+          "the envelope could not survive: its gas flows away at its own temperature (escape parameter " +
+            `${escapeParameter.toPrecision(3)} where ${BOUND} would hold it)`,
         ]
       : []),
   ];
