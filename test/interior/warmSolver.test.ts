@@ -223,6 +223,12 @@ describe("notes", () => {
     for (const name of ["jump", "full", "hot", "tabled", "cold"]) expect(note(name)).toEqual([]);
   });
 
+  it("say where a stated temperature is lower than that of the rock above", () => {
+    const [cold] = note("full", 20 * EARTH_MASS);
+    expect(cold).toMatch(/^core begins at 4500 K, as stated, cooler than minerals ends \(\d{4} K\): for this mass/);
+    expect(Number(/\((\d+) K\)/.exec(cold)?.[1])).toBeGreaterThan(4500);
+  });
+
   it("mark rock above its melting curve, and say what the solid costs", () => {
     const [melt, ...others] = note("magma");
     expect(others).toEqual([]);
