@@ -2,7 +2,7 @@ import { describe, expect, test } from "vitest";
 import { expectClose } from "../support/expectClose.ts";
 import { relativeDifference, within } from "./check.ts";
 import { fortneyIceRock, fortneyRockIron } from "./relations.ts";
-import { validationCsv, validationHtml } from "./report.ts";
+import { knowingly, validationCsv, validationHtml } from "./report.ts";
 import { validate } from "./validation.ts";
 
 const run = validate();
@@ -53,6 +53,11 @@ describe("the report", () => {
       expect(red).toContain(miss?.reason.replaceAll("'", "&#39;"));
     }
     expect(red).not.toContain("not looked into");
+  });
+
+  test("owns up to what was chosen knowing the result", async () => {
+    const html = await validationHtml(run);
+    for (const choice of knowingly) expect(html).toContain(choice.replaceAll("'", "&#39;"));
   });
 
   test("says of every body what its inputs rest on", () => {
