@@ -1,5 +1,6 @@
 import type { Composition } from "./composition.ts";
 import type { Library, Substitutes } from "./library.ts";
+import { materialFile } from "./materialFile.ts";
 
 /** A composition made with one of the published sets for each of its materials. */
 export interface AlternativeComposition {
@@ -16,7 +17,7 @@ export function alternativeCompositions(library: Library, name: string): Alterna
   const materials = materialsOf(library.composition(name));
   let combinations: string[][] = [[]];
   for (const material of materials) {
-    const sets = [material, ...library.alternatives(material)];
+    const sets = [material, ...(materialFile(library.materials, material).alternatives ?? [])];
     combinations = combinations.flatMap((combination) => sets.map((set) => [...combination, set]));
   }
   return combinations.map((combination) => {

@@ -5,6 +5,7 @@ import type { Composition, Layer } from "./composition.ts";
 import { describeJoins, type JoinDescription } from "./describeJoins.ts";
 import { type MineralDescription, mineralsByPhase, type Parameters, warmKeys } from "./describeWarm.ts";
 import type { Library } from "./library.ts";
+import { materialFile } from "./materialFile.ts";
 import type { PhaseEntry } from "./schemas.ts";
 
 /** Pressures at which densities are given, so that materials can be compared at a glance. */
@@ -102,7 +103,7 @@ const materialNames = ({ material }: Layer): string[] =>
 
 export function describeMaterial(library: Library, name: string): MaterialDescription {
   const material = library.material(name);
-  const { phases: entries = [], mantle } = library.materialFile(name);
+  const { phases: entries = [], mantle } = materialFile(library.materials, name);
   const minerals = mantle && mineralsByPhase(mantle);
   const { source, phases, everyPhase = phases } = material;
   return {

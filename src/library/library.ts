@@ -5,16 +5,11 @@ import { buildMaterial } from "./buildMaterial.ts";
 import type { Composition, GasEnvelope } from "./composition.ts";
 import { inFile, unknownName } from "./libraryErrors.ts";
 import { type Entry, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
+import { materialEntry, materialFile } from "./materialFile.ts";
 import { readDensityTable } from "./readDensityTable.ts";
 import { type NameLookup, resolveLayers } from "./resolveLayers.ts";
 import { resolveTemperature } from "./resolveTemperature.ts";
-import {
-  type CompositionFile,
-  compositionSchema,
-  type EnvelopeEntry,
-  type MaterialFile,
-  materialSchema,
-} from "./schemas.ts";
+import { type CompositionFile, compositionSchema, type EnvelopeEntry } from "./schemas.ts";
 import { validate } from "./validate.ts";
 
 /** A surface at vacuum and room temperature, where a composition file does not give its own. */
@@ -39,10 +34,6 @@ export interface Library {
   composition(name: string, substitutes?: Substitutes): Composition;
   /** Throws InputError `unknown-material`, or any error of its file. */
   material(name: string): Material;
-  /** Materials that hold other published sets for the same substance, as its file lists them. Throws like `material`. */
-  alternatives(material: string): readonly string[];
-  /** The file of a material, checked. Throws like `material`. */
-  materialFile(name: string): MaterialFile;
 }
 
 /**
@@ -81,22 +72,11 @@ class FileLibrary implements Library {
   material(name: string): Material {
     const known = this.builtMaterials.get(name);
     if (known !== undefined) return known;
-    const file = this.materialFile(name);
-    const path = this.materialEntry(name).path;
+    const { path } = materialEntry(this.materials, name);
+    const file = materialFile(this.materials, name);
     const material = inFile(path, () => buildMaterial(file, (table) => this.table(path, table)));
     this.builtMaterials.set(name, material);
     return material;
-  }
-
-  alternatives(name: string): readonly string[] {
-    return this.materialFile(name).alternatives ?? [];
-  }
-
-  materialFile(name: string): MaterialFile {
-    const entry = this.materialEntry(name);
-    const { value, problems } = validate(materialSchema, entry.path, entry.content);
-    if (problems) throw problems[0];
-    return value;
   }
 
   private add(entry: Entry): void {
@@ -106,12 +86,6 @@ class FileLibrary implements Library {
       this.notes.push(`${entry.kind} "${entry.name}": ${entry.path} takes the place of ${before.path}`);
     }
     entries.set(entry.name, entry);
-  }
-
-  private materialEntry(name: string): Entry {
-    const entry = this.materialEntries.get(name);
-    if (entry !== undefined) return entry;
-    throw unknownName("material", name, [...this.materialEntries.keys()]);
   }
 
   /** `above` are the compositions being resolved that led here, outermost first. */
