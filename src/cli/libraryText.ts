@@ -25,12 +25,13 @@ export function listingText({ compositions, materials, notes }: Library): string
 /** A composition with its materials, or a material, for a person to read. */
 export function descriptionText(description: CompositionDescription | MaterialDescription): string {
   if (description.kind === "material") return joinSections([materialLines(description)]);
-  const { name, title, source, surface, temperature, layers, materials } = description;
+  const { name, title, source, surface, temperature, envelope, layers, materials } = description;
   const recipe = [
     `${name}: ${title}`,
     `  surface: ${surface.pressurePa} Pa, ${surface.temperatureK} K`,
     ...(temperature ? [`  temperature: ${temperature.mode}, ${temperature.topK} K at the surface`] : []),
     ...layers.map(layerLine),
+    ...(envelope ? [`  envelope: ${keyValues(envelope)}`] : []),
     ...(source ? [`  source: ${sourceText(source)}`] : []),
   ];
   return joinSections([recipe, ...materials.map(materialLines)]);
@@ -44,11 +45,12 @@ function layerLine({ name, massFraction, heating }: LayerDescription, i: number)
 }
 
 function materialLines(material: MaterialDescription): string[] {
-  const { name, title, parameters, source, temperatureK, phases, joins, densities } = material;
+  const { name, title, parameters, alternatives, source, temperatureK, phases, joins, densities } = material;
   return [
     `${name}: ${title}`,
     ...(Object.keys(parameters).length > 0 ? [`  ${keyValues(parameters)}`] : []),
     ...(source ? [`  source: ${sourceText(source)}`] : []),
+    ...(alternatives.length > 0 ? [`  alternatives: ${alternatives.join(", ")}`] : []),
     ...(temperatureK === undefined
       ? []
       : [`  pressures and densities at ${digits(temperatureK)} K; a planet has its own temperatures`]),

@@ -1,12 +1,12 @@
 import { densityAt, type Material, type Phase, phaseAt, type Source, type TemperatureMode } from "../eos/material.ts";
 import { ModelRangeError } from "../errors.ts";
-import { GPA } from "../units/constants.ts";
-import type { Composition, Layer } from "./composition.ts";
+import { EARTH_FLUX, GIGAYEAR, GPA } from "../units/constants.ts";
+import type { Composition, GasEnvelope, Layer } from "./composition.ts";
 import { describeJoins, type JoinDescription } from "./describeJoins.ts";
 import { type MineralDescription, mineralsByPhase, type Parameters, warmKeys } from "./describeWarm.ts";
 import type { Library } from "./library.ts";
 import { materialFile } from "./materialFile.ts";
-import type { PhaseEntry } from "./schemas.ts";
+import type { EnvelopeEntry, PhaseEntry } from "./schemas.ts";
 
 /** Pressures at which densities are given, so that materials can be compared at a glance. */
 const SAMPLE_GPA = [0, 100, 1000];
@@ -38,6 +38,8 @@ export interface MaterialDescription {
   readonly source?: Source;
   /** Keys that hold for the whole material. */
   readonly parameters: Parameters;
+  /** Materials with other published sets for the same substance. */
+  readonly alternatives: readonly string[];
   /** All pressures and densities below are at this temperature; absent where the material knows none. */
   readonly temperatureK?: number;
   readonly phases: readonly PhaseDescription[];
@@ -59,6 +61,8 @@ export interface CompositionDescription {
   readonly surface: Composition["surface"];
   /** How temperature goes on from the top of the outermost layer [K]; absent for a cold planet. */
   readonly temperature?: { readonly mode: TemperatureMode["kind"]; readonly topK: number };
+  /** In the units of composition files. */
+  readonly envelope?: EnvelopeEntry;
   /** Centre to surface, nested compositions expanded. */
   readonly layers: readonly LayerDescription[];
   /** Every material of the layers, once. */
@@ -80,8 +84,17 @@ export function describe(library: Library, name: string): CompositionDescription
   return isMaterial && !isComposition ? describeMaterial(library, name) : describeComposition(library, name);
 }
 
+function describeEnvelope({ massFraction, flux, age, opacity }: GasEnvelope): EnvelopeEntry {
+  return {
+    massFraction,
+    opacity,
+    ...(flux !== undefined && { fluxEarth: flux / EARTH_FLUX }),
+    ...(age !== undefined && { ageGyr: age / GIGAYEAR }),
+  };
+}
+
 export function describeComposition(library: Library, name: string): CompositionDescription {
-  const { title, source, surface, temperature, layers } = library.composition(name);
+  const { title, source, surface, temperature, envelope, layers } = library.composition(name);
   const materials = new Set(layers.flatMap(materialNames));
   return {
     kind: "composition",
@@ -90,6 +103,7 @@ export function describeComposition(library: Library, name: string): Composition
     ...(source && { source }),
     surface,
     ...(temperature && { temperature: { mode: temperature.mode.kind, topK: temperature.top } }),
+    ...(envelope && { envelope: describeEnvelope(envelope) }),
     layers: layers.map(({ name, material, massFraction, heating }) => ({
       ...{ name, title: material.title, massFraction },
       ...(heating && { heating }),
@@ -103,7 +117,7 @@ const materialNames = ({ material }: Layer): string[] =>
 
 export function describeMaterial(library: Library, name: string): MaterialDescription {
   const material = library.material(name);
-  const { phases: entries = [], mantle } = materialFile(library.materials, name);
+  const { phases: entries = [], mantle, alternatives = [] } = materialFile(library.materials, name);
   const minerals = mantle && mineralsByPhase(mantle);
   const { source, phases, everyPhase = phases } = material;
   return {
@@ -112,6 +126,7 @@ export function describeMaterial(library: Library, name: string): MaterialDescri
     title: material.title,
     ...(source && { source }),
     parameters: mantle ?? {},
+    alternatives,
     ...(material.warmed && { temperatureK: temperatureAt(material) }),
     phases: everyPhase.map((phase, i) => ({
       name: phase.name,

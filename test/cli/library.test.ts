@@ -30,6 +30,12 @@ test("show gives layers, forms, ranges, densities at 0, 100 and 1000 GPa, and so
   expect(out).toMatch(/source: .*doi:10\./);
 });
 
+test("show tells of gas and of other published sets", async () => {
+  const { out } = await runCommand(["library", "show", "earth-like-gas-2"]);
+  expect(out).toContain("  envelope: massFraction 0.02, opacity solar, fluxEarth 10, ageGyr 5\n");
+  expect(out).toContain("  alternatives: iron-birch-2016, iron-vinet-2007, iron-vinet-2018\n");
+});
+
 test("show reads a table of the user's, says where it ends, and lets no control character through", async () => {
   const { code, out } = await runCommand(["library", "show", "slag", "--library", folder]);
   expect(code).toBe(0);
