@@ -1,12 +1,14 @@
 import type { Command } from "commander";
+import { InputError } from "../errors.ts";
 import type { Composition } from "../library/composition.ts";
 import { EARTH_FLUX, GIGAYEAR } from "../units/constants.ts";
 import { positiveNumber } from "./numberOptions.ts";
 
-/** Where a planet with a gas envelope is, in place of what its composition says or leaves open. */
+/** For planets with a gas envelope: flux and age in place of what its composition says or leaves open. */
 export interface EnvelopeOptions {
   readonly fluxEarth?: number;
   readonly ageGyr?: number;
+  readonly transitPressurePa?: number;
 }
 
 export function addEnvelopeOptions(command: Command): Command {
@@ -26,4 +28,15 @@ export function withEnvelopeOptions(composition: Composition, { fluxEarth, ageGy
       ...(ageGyr !== undefined && { age: ageGyr * GIGAYEAR }),
     },
   };
+}
+
+/** Throws InputError `envelope-options` where an option would go unheeded. */
+export function requireEnvelope(compositions: readonly Composition[], options: EnvelopeOptions): void {
+  const { fluxEarth, ageGyr, transitPressurePa } = options;
+  const given = fluxEarth ?? ageGyr ?? transitPressurePa;
+  if (given === undefined || compositions.some(({ envelope }) => envelope)) return;
+  throw new InputError(
+    "envelope-options",
+    "--flux-earth, --age-gyr and --transit-pressure-pa are for compositions that end in a gas envelope; none of these does.",
+  );
 }

@@ -191,6 +191,12 @@ describe("curve", () => {
     expect(Number(given.radius_earth_at_transit_pressure)).toBeGreaterThan(Number(given.radius_earth));
   });
 
+  test("options for gas are refused where there is none", async () => {
+    const { code, out, err } = await runCommand(["curve", "earth-like", "--masses", "1", "--flux-earth", "100"]);
+    expect({ code, out }).toEqual({ code: 2, out: "" });
+    expect(err).toContain("end in a gas envelope");
+  });
+
   test("the same command gives the same bytes", async () => {
     const args = ["curve", "earth-like", "--masses", "0.5:5:7"];
     expect(await runCommand(args)).toEqual(await runCommand(args));

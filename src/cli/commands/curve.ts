@@ -7,7 +7,7 @@ import type { CommandContext } from "../commandContext.ts";
 import { compositionNotes } from "../compositionNotes.ts";
 import { curveTable } from "../curveTable.ts";
 import { envelopeColumns, transitColumn } from "../envelopeColumns.ts";
-import { addEnvelopeOptions, type EnvelopeOptions, withEnvelopeOptions } from "../envelopeOptions.ts";
+import { addEnvelopeOptions, type EnvelopeOptions, requireEnvelope, withEnvelopeOptions } from "../envelopeOptions.ts";
 import { openLibrary } from "../libraryFolder.ts";
 import { type Curve, massRadiusPage } from "../massRadiusPage.ts";
 import { parseMasses, positiveNumber, pressurePa } from "../numberOptions.ts";
@@ -33,14 +33,13 @@ interface CurveOptions extends GlobalOptions, ResultOptions, EnvelopeOptions {
   readonly observables?: boolean;
   readonly periodDays?: number;
   readonly spread?: boolean;
-  readonly transitPressurePa?: number;
 }
 
 const defaultMasses = "0.1:20:60";
 const withoutPlanets = { title: "Mass–radius curves", planets: [], columns: [], verdicts: [], warnings: [] };
 
 export function define(command: Command, context: CommandContext): void {
-  addEnvelopeOptions(addResultOptions(command))
+  addResultOptions(command)
     .argument("<name...>", "compositions, as `bulkwright library` lists them")
     .addOption(
       new Option("--masses <list>", "in Earth masses: from:to:count, evenly spaced in the logarithm, or 0.5,1,2")
@@ -57,7 +56,6 @@ export function define(command: Command, context: CommandContext): void {
       "append what a transit shows of a planet that turns with this orbit",
       positiveNumber,
     )
-    .option("--transit-pressure-pa <pressure>", "append the radius at which a gas envelope has it", positiveNumber)
     .addHelpText(
       "after",
       "\nExamples:\n  bulkwright curve iron earth-like --masses 0.5,1,2 --out curves.csv" +
@@ -65,6 +63,11 @@ export function define(command: Command, context: CommandContext): void {
         "\n  bulkwright curve earth-like-gas-2 --masses 2:10:9 --flux-earth 50",
     )
     .action((names: string[]) => curve(names, command.optsWithGlobals<CurveOptions>(), context));
+  addEnvelopeOptions(command).option(
+    "--transit-pressure-pa <pressure>",
+    "append the radius at which gas envelopes have it",
+    positiveNumber,
+  );
 }
 
 async function curve(names: readonly string[], options: CurveOptions, { io, args }: CommandContext): Promise<void> {
@@ -74,6 +77,7 @@ async function curve(names: readonly string[], options: CurveOptions, { io, args
   const adjust = (composition: Composition): Composition =>
     withEnvelopeOptions(withSurfacePressure(composition, options.surfacePressurePa), options);
   const compositions = names.map((name) => adjust(library.composition(name)));
+  requireEnvelope(compositions, options);
   const curves = await sweepCurves(compositions, options.masses);
 
   const run = { args, earthRadius: options.earthRadiusKm };

@@ -8,7 +8,7 @@ import { EARTH_MASS, GIGAYEAR, GPA } from "../../units/constants.ts";
 import type { CommandContext } from "../commandContext.ts";
 import { compositionNotes } from "../compositionNotes.ts";
 import { parseDensityTable } from "../densityTableFile.ts";
-import { addEnvelopeOptions, type EnvelopeOptions, withEnvelopeOptions } from "../envelopeOptions.ts";
+import { addEnvelopeOptions, type EnvelopeOptions, requireEnvelope, withEnvelopeOptions } from "../envelopeOptions.ts";
 import { inputName, readText } from "../inputFile.ts";
 import { openLibrary } from "../libraryFolder.ts";
 import { pointCount, positiveNumber } from "../numberOptions.ts";
@@ -32,7 +32,7 @@ interface ProfileOptions extends GlobalOptions, ResultOptions, EnvelopeOptions {
 }
 
 export function define(command: Command, context: CommandContext): void {
-  addEnvelopeOptions(addResultOptions(command))
+  addResultOptions(command)
     .argument("[name]", "composition, as `bulkwright library` lists it")
     .option("--mass <mass>", "of the planet, in Earth masses", positiveNumber)
     .option("--points <n>", "evenly spaced in radius, centre and surface included", pointCount, 100)
@@ -53,6 +53,7 @@ export function define(command: Command, context: CommandContext): void {
       }
       return command.error("error: give either a composition with --mass, or --density-table alone");
     });
+  addEnvelopeOptions(command);
 }
 
 async function profileOfComposition(
@@ -65,6 +66,7 @@ async function profileOfComposition(
   await checkDestinations(destinations(options), inputs);
   tell(library.notes, options, io);
   const composition = withEnvelopeOptions(library.composition(name), options);
+  requireEnvelope([composition], options);
   const { planet, points } = solveProfile(composition, mass * EARTH_MASS, options.points);
   const provenance = provenanceOf({
     args,
