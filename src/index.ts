@@ -8,6 +8,9 @@ export type { PhysicalLimits, Rule } from "./crosscheck/rule.ts";
 export { rules } from "./crosscheck/rules.ts";
 export { countFindings, runRules } from "./crosscheck/runRules.ts";
 export { type CurvePoint, sweepMasses } from "./curve/sweep.ts";
+export { type CoreRadius, envelopeFraction, gasPlanetRadius, type RadiusReading } from "./envelope/gasPlanet.ts";
+export type { EnvelopeConditions } from "./envelope/lopezFortney.ts";
+export { radiusAtPressure, TRANSIT_PRESSURE, transitPressure } from "./envelope/transit.ts";
 export type { EosCurve } from "./eos/curve.ts";
 export { densityAt, type Material, type Phase, phaseAt, type Source } from "./eos/material.ts";
 export {
@@ -30,15 +33,23 @@ export {
   type Refused,
 } from "./inference/classifier.ts";
 export { type DensityTable, type DensityTableProfile, integrateDensityTable } from "./interior/densityTable.ts";
-export type { Boundary, Planet, SolverCounters } from "./interior/planet.ts";
-export { type ProfilePoint, solveProfile } from "./interior/profile.ts";
+export { type SynchronousFigure, synchronousFigure } from "./interior/distortion.ts";
+export { fluidLoveNumber } from "./interior/loveNumber.ts";
+export { coreRadiusFraction, escapeSpeed, planetLoveNumber } from "./interior/observables.ts";
+export type { Boundary, Envelope, Planet, SolidPlanet, SolverCounters } from "./interior/planet.ts";
+export { type ProfilePoint, profileOf, solveProfile } from "./interior/profile.ts";
 export { solvePlanet } from "./interior/solvePlanet.ts";
+export { type AlternativeComposition, alternativeCompositions } from "./library/alternatives.ts";
 export { checkLibrary } from "./library/checkLibrary.ts";
-export type { Composition, Layer } from "./library/composition.ts";
-export { type Library, loadLibrary } from "./library/library.ts";
+export type { Composition, GasEnvelope, Layer } from "./library/composition.ts";
+export { type Library, loadLibrary, type Substitutes } from "./library/library.ts";
 export type { Entry, LibraryFile } from "./library/libraryFiles.ts";
 export { shippedFiles } from "./library/shipped.generated.ts";
 export { sourcesOf, type UsedSource } from "./library/sources.ts";
+export { starPlanetFiles } from "./library/starPlanetFiles.ts";
+export { type Abundances, parseAbundances } from "./mineralogy/abundances.ts";
+export { type Interval, planetFromStar, type StarPlanet } from "./mineralogy/planetFromStar.ts";
+export type { SolarScaleName } from "./mineralogy/solarScales.ts";
 export type {
   LimitCoding,
   MeasuredQuantity,

@@ -1,8 +1,13 @@
 import { readdirSync, readFileSync } from "node:fs";
 import { expect, test } from "vitest";
 
-const unitSuffix = /(KgM3|PerGPa|GPa|Pa|K|SI)$/;
-const dimensionless = ["massFraction", "order", "exponent", "bulkModulusPrime", "bulkModulusPrimeInfinite"];
+const unitSuffix = /(KgM3|PerGPa|GPa|MPaPerK|Pa|K|Earth|Gyr|SI|KgJ|JKgK2?)$/;
+const dimensionless = [
+  ...["massFraction", "order", "exponent", "bulkModulusPrime", "bulkModulusPrimeInfinite"],
+  ...["gammaZero", "gammaInfinity", "beta", "q", "qZero", "gammaExponent"],
+  ...["nickel", "sulphur", "silicon", "oxygen", "densityDeficit", "ironMoleFraction"],
+  ...["magnesiumToSilicon", "ironNumber"],
+];
 
 const files = ["compositions", "compositions/materials"].flatMap((folder) =>
   readdirSync(folder)

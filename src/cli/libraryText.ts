@@ -1,5 +1,11 @@
-import type { CompositionDescription, MaterialDescription, PhaseDescription } from "../library/describe.ts";
+import type {
+  CompositionDescription,
+  LayerDescription,
+  MaterialDescription,
+  PhaseDescription,
+} from "../library/describe.ts";
 import type { JoinDescription } from "../library/describeJoins.ts";
+import type { Parameters } from "../library/describeWarm.ts";
 import type { Library } from "../library/library.ts";
 import type { Entry } from "../library/libraryFiles.ts";
 import { sourceText } from "./provenance.ts";
@@ -19,21 +25,35 @@ export function listingText({ compositions, materials, notes }: Library): string
 /** A composition with its materials, or a material, for a person to read. */
 export function descriptionText(description: CompositionDescription | MaterialDescription): string {
   if (description.kind === "material") return joinSections([materialLines(description)]);
-  const { name, title, source, surface, layers, materials } = description;
+  const { name, title, source, surface, temperature, envelope, layers, materials } = description;
   const recipe = [
     `${name}: ${title}`,
     `  surface: ${surface.pressurePa} Pa, ${surface.temperatureK} K`,
-    ...layers.map(
-      (layer, i) => `  layer ${i + 1} from the centre: ${layer.name}, mass fraction ${digits(layer.massFraction)}`,
-    ),
+    ...(temperature ? [`  temperature: ${temperature.mode}, ${temperature.topK} K at the surface`] : []),
+    ...layers.map(layerLine),
+    ...(envelope ? [`  envelope: ${keyValues(envelope)}`] : []),
     ...(source ? [`  source: ${sourceText(source)}`] : []),
   ];
   return joinSections([recipe, ...materials.map(materialLines)]);
 }
 
-function materialLines({ name, title, phases, joins, densities }: MaterialDescription): string[] {
+function layerLine({ name, massFraction, heating }: LayerDescription, i: number): string {
+  const fraction = `  layer ${i + 1} from the centre: ${name}, mass fraction ${digits(massFraction)}`;
+  if (heating === undefined) return fraction;
+  const top = "top" in heating ? `${heating.top} K at its top` : `${heating.jump} K warmer than the layer above`;
+  return `${fraction}, ${top}`;
+}
+
+function materialLines(material: MaterialDescription): string[] {
+  const { name, title, parameters, alternatives, source, temperatureK, phases, joins, densities } = material;
   return [
     `${name}: ${title}`,
+    ...(Object.keys(parameters).length > 0 ? [`  ${keyValues(parameters)}`] : []),
+    ...(source ? [`  source: ${sourceText(source)}`] : []),
+    ...(alternatives.length > 0 ? [`  alternatives: ${alternatives.join(", ")}`] : []),
+    ...(temperatureK === undefined
+      ? []
+      : [`  pressures and densities at ${digits(temperatureK)} K; a planet has its own temperatures`]),
     ...densities.map(
       ({ pressureGPa, densityKgM3 }) =>
         `  density at ${pressureGPa} GPa: ${densityKgM3 === undefined ? "none, outside the form's range" : `${digits(densityKgM3)} kg/m3`}`,
@@ -44,19 +64,31 @@ function materialLines({ name, title, phases, joins, densities }: MaterialDescri
 }
 
 function phaseLines(phase: PhaseDescription): string[] {
-  const { name, form, parameters, fromGPa, untilGPa, calibratedToGPa, formEndsGPa, source } = phase;
-  const values = Object.entries(parameters).map(([key, value]) => `${key} ${value}`);
-  const range = [
-    untilGPa === undefined ? `from ${digits(fromGPa)} GPa on` : `from ${digits(fromGPa)} to ${digits(untilGPa)} GPa`,
-    ...(calibratedToGPa === undefined ? [] : [`data to ${digits(calibratedToGPa)} GPa`]),
-    ...(formEndsGPa === undefined ? [] : [`the form ends at ${digits(formEndsGPa)} GPa`]),
-  ];
+  const { name, form, parameters, warmKeys = {}, minerals = [], source } = phase;
   return [
-    `  phase ${name}: ${[form, ...values].join(", ")}`,
-    `    ${range.join(", ")}`,
+    `  phase ${name}: ${[form, keyValues(parameters)].filter(Boolean).join(", ")}`,
+    ...Object.entries(warmKeys).map(([group, keys]) => `    ${group}: ${keyValues(keys)}`),
+    ...minerals.map(
+      (mineral) => `    ${percent(mineral.massFraction)} ${mineral.name} (${sourceText(mineral.source)})`,
+    ),
+    `    ${rangeText(phase)}`,
     `    source: ${sourceText(source)}`,
   ];
 }
+
+function rangeText({ fromGPa, untilGPa, calibratedToGPa, formEndsGPa }: PhaseDescription): string {
+  if (fromGPa === undefined) return "not stable at this temperature";
+  return [
+    untilGPa === undefined ? `from ${digits(fromGPa)} GPa on` : `from ${digits(fromGPa)} to ${digits(untilGPa)} GPa`,
+    ...(calibratedToGPa === undefined ? [] : [`data to ${digits(calibratedToGPa)} GPa`]),
+    ...(formEndsGPa === undefined ? [] : [`the form ends at ${digits(formEndsGPa)} GPa`]),
+  ].join(", ");
+}
+
+const keyValues = (keys: Parameters): string =>
+  Object.entries(keys)
+    .map(([key, value]) => `${key} ${value}`)
+    .join(", ");
 
 function joinLine(join: JoinDescription): string {
   const from = `  ${join.lower} to ${join.upper}`;

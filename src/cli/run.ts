@@ -9,8 +9,8 @@ import { version } from "./version.ts";
 
 const nominalRadiusKm = "6378.1";
 
-/** Errors that an option mends, found only once the list is open. */
-const usageErrors = ["ambiguous-column", "unknown-column-choice", "unknown-unit"];
+/** Errors that an option mends, found only once the list or the compositions are open. */
+const usageErrors = ["ambiguous-column", "unknown-column-choice", "unknown-unit", "envelope-options"];
 
 /**
  * Runs one command line. Resolves to the exit code: 0 a result was produced, 1 nothing could be read, solved or

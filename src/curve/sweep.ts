@@ -1,6 +1,6 @@
 import { BulkwrightError } from "../errors.ts";
 import type { Planet } from "../interior/planet.ts";
-import { StructureSolver } from "../interior/structureSolver.ts";
+import { planetSolver } from "../interior/planetSolver.ts";
 import type { Composition } from "../library/composition.ts";
 import { polynomialThrough } from "../numerics/extrapolate.ts";
 
@@ -19,7 +19,7 @@ const NEAR = 0.7;
  * with its error; the sweep goes on. Neighbouring masses help each other, so sorted masses are fastest.
  */
 export function* sweepMasses(composition: Composition, masses: Iterable<number>): Generator<CurvePoint> {
-  const solver = new StructureSolver(composition);
+  const solver = planetSolver(composition);
   const logMasses: number[] = [];
   const logPressures: number[] = [];
   for (const mass of masses) {

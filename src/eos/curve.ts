@@ -13,6 +13,8 @@ export interface EosCurve {
   readonly minPressure: number;
   /** Pressure where the form itself breaks, e.g. turns over [Pa]; Infinity if it never does. */
   readonly maxPressure: number;
+  /** Temperature [K], where the curve follows one. */
+  temperature?(y: number): number;
   /** Pressure [Pa]. */
   pressure(y: number): number;
   /** Density [kg m^-3]. */

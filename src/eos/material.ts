@@ -23,12 +23,38 @@ export interface Phase {
   readonly components?: readonly { readonly material: string; readonly phase: Phase }[];
 }
 
+/** Where rock melts. Molten rock has no equation of state here: the solid's goes on, and a planet gets a note. */
+export interface RockMelting {
+  /** Name of the published curve. */
+  readonly curve: string;
+  /** Where that curve begins [Pa]; nothing is said below. */
+  readonly fromPressure: number;
+  /** Melting temperature [K] at a pressure [Pa]. */
+  readonly temperatureAt: (pressure: number) => number;
+}
+
 /** A substance as a stack of phases, lowest pressure first, without gaps. */
 export interface Material {
   readonly name: string;
   readonly title: string;
   readonly phases: readonly Phase[];
+  /** Where what it is made of comes from, if its phases do not say. */
+  readonly source?: Source;
+  /** What it can be at one temperature or another, where that is more than `phases`. */
+  readonly everyPhase?: readonly Pick<Phase, "name" | "form" | "source" | "components">[];
+  readonly melting?: RockMelting;
+  /**
+   * For a substance whose equation of state knows temperature: its phases in a layer whose top is at this pressure
+   * [Pa] and temperature [K], in the given mode. `phases` are then those of a cold planet.
+   */
+  readonly warmed?: (mode: TemperatureMode, topPressure: number, topTemperature: number) => readonly Phase[];
 }
+
+/** How temperature goes on below the top of a layer. */
+export type TemperatureMode =
+  | { readonly kind: "isothermal" | "adiabatic" }
+  /** Given as a function of pressure [Pa → K], smooth between the pressures listed in `kinks`. */
+  | { readonly kind: "table"; readonly temperatureAt: (pressure: number) => number; readonly kinks: readonly number[] };
 
 /** The phase stable at a pressure [Pa]; on a boundary the denser one, above it. */
 export function phaseAt({ phases }: Material, pressure: number): Phase {

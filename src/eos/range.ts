@@ -5,7 +5,11 @@ import type { EosCurve } from "./curve.ts";
 const inGPa = (pressure: number): string => `${Number((pressure / GPA).toPrecision(6))} GPa`;
 
 /** Throws ModelRangeError `eos-pressure-range` unless the form can be evaluated at this pressure [Pa]. */
-export function checkPressure(form: string, curve: EosCurve, pressure: number): void {
+export function checkPressure(
+  form: string,
+  curve: Pick<EosCurve, "minPressure" | "maxPressure">,
+  pressure: number,
+): void {
   const { minPressure, maxPressure } = curve;
   if (pressure >= minPressure && pressure <= maxPressure && pressure < Number.POSITIVE_INFINITY) return;
   const top = maxPressure === Number.POSITIVE_INFINITY ? "any finite pressure" : inGPa(maxPressure);

@@ -3,8 +3,9 @@ import { RungeKutta8 } from "../numerics/rungeKutta8.ts";
 import { G } from "../units/constants.ts";
 import { CentralBall } from "./centralBall.ts";
 import type { Planet } from "./planet.ts";
+import { planetSolver } from "./planetSolver.ts";
 import { CONTROLLED, STATE_SIZE, StructureEquations } from "./structureEquations.ts";
-import { DEFAULT_TOLERANCE, StructureSolver } from "./structureSolver.ts";
+import { DEFAULT_TOLERANCE } from "./structureSolver.ts";
 import { type Stretch, TrialIntegration } from "./trialIntegration.ts";
 
 /** A place inside a planet. SI. */
@@ -14,6 +15,8 @@ export interface ProfilePoint {
   readonly pressure: number;
   readonly density: number;
   readonly gravity: number;
+  /** Absent where the equation of state follows no temperature. */
+  readonly temperature?: number;
   readonly layer: string;
   readonly phase: string;
 }
@@ -31,8 +34,8 @@ const LANDED = 1e-14;
 
 /**
  * The interior of a planet of `mass` [kg]: `count` points evenly spaced in radius from the centre to the surface, and
- * both sides of every layer and phase boundary. Points between the integrator's own steps are integrated, not
- * interpolated, so they are as good as the rest.
+ * both sides of every layer and phase boundary; with a gas envelope they end where the gas begins. Points between the
+ * integrator's own steps are integrated, not interpolated, so they are as good as the rest.
  * Throws as StructureSolver.solve
  * Checked hydrostatic balance by differences, both sides of boundaries, mass and radius: test/interior/profile.test.ts
  */
@@ -41,10 +44,16 @@ export function solveProfile(
   mass: number,
   count: number,
 ): { planet: Planet; points: ProfilePoint[] } {
-  const planet = new StructureSolver(composition).solve(mass);
-  const waypoints = record(composition, mass, planet.centralPressure);
+  const planet = planetSolver(composition).solve(mass);
+  return { planet, points: profileOf(planet, count) };
+}
+
+/** As `solveProfile`, of a planet already solved. */
+export function profileOf(whole: Planet, count: number): ProfilePoint[] {
+  const planet = whole.envelope?.core ?? whole;
+  const waypoints = record(planet.composition, planet.mass, planet.centralPressure);
   const radii = Array.from({ length: count }, (_, i) => (planet.radius * i) / (count - 1));
-  const sampler = new Sampler(composition, planet.centralPressure);
+  const sampler = new Sampler(planet.composition, planet.centralPressure);
   const points: ProfilePoint[] = [sampler.centre(waypoints[0].stretch)];
   let next = 1;
   for (; next < count - 1 && radii[next] < radiusOf(waypoints[0]); next++) {
@@ -60,7 +69,7 @@ export function solveProfile(
     for (; next < count - 1 && radii[next] <= radiusOf(to); next++) points.push(sampler.between(from, to, radii[next]));
   }
   points.push(sampler.at(waypoints[waypoints.length - 1]));
-  return { planet, points };
+  return points;
 }
 
 /** All points the integration with this central pressure passes through. */
@@ -99,13 +108,11 @@ class Sampler {
 
   at({ x, state, stretch, byMass }: Waypoint): ProfilePoint {
     const y = byMass ? state[1] : x;
-    const { curve } = stretch.phase;
-    return point(stretch, byMass ? x : state[0], state[byMass ? 0 : 1], curve.pressure(y), curve.density(y));
+    return point(stretch, byMass ? x : state[0], state[byMass ? 0 : 1], stretch.phase.curve.pressure(y), y);
   }
 
   centre(stretch: Stretch): ProfilePoint {
-    const { curve } = stretch.phase;
-    return point(stretch, 0, 0, this.centralPressure, curve.density(curve.coordinate(this.centralPressure)));
+    return point(stretch, 0, 0, this.centralPressure, stretch.phase.curve.coordinate(this.centralPressure));
   }
 
   /** A point nearer to the centre than the integration itself begins: a ball that ends there. */
@@ -120,7 +127,7 @@ class Sampler {
       if (Math.abs(miss - 1) < LANDED) break;
       target = s * miss;
     }
-    return point(stretch, s, this.state[0], curve.pressure(this.state[1]), curve.density(this.state[1]));
+    return point(stretch, s, this.state[0], curve.pressure(this.state[1]), this.state[1]);
   }
 
   /** The point at `radius` inside the step from one waypoint to the next: Newton on the length of a part step. */
@@ -143,14 +150,16 @@ class Sampler {
   }
 }
 
-function point(stretch: Stretch, s: number, v: number, pressure: number, density: number): ProfilePoint {
+function point({ layer, phase }: Stretch, s: number, v: number, pressure: number, y: number): ProfilePoint {
+  const temperature = phase.curve.temperature?.(y);
   return {
     radius: Math.sqrt(v),
     enclosedMass: s ** 1.5,
     pressure,
-    density,
+    density: phase.curve.density(y),
+    ...(temperature !== undefined && { temperature }),
     gravity: s === 0 ? 0 : (G * s ** 1.5) / v,
-    layer: stretch.layer.name,
-    phase: stretch.phase.name,
+    layer: layer.name,
+    phase: phase.name,
   };
 }

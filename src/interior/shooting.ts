@@ -12,7 +12,7 @@ export type Shot =
 const COARSE_TOLERANCE = 1e-6;
 /** Below this Newton step the coarse tolerance would only waste a round. */
 const NEARLY_THERE = 1e-3;
-/** A Newton step below this in ln P_c ends the search. */
+/** A Newton step below this in ln P_c, or below the tolerance of an integration step, ends the search. */
 const ACCEPTED_STEP = 1e-9;
 const MAX_ROUNDS = 200;
 /** A mass excess below this many times the summed error estimate has no trustworthy sign. */
@@ -48,11 +48,12 @@ export function shoot(
   trial.brokenPhase = undefined;
   let x = start;
   let fine = warm;
+  const accepted = Math.max(ACCEPTED_STEP, tolerance);
   for (let round = 0; round < MAX_ROUNDS; round++) {
     trial.integrator.tolerance = fine ? tolerance : COARSE_TOLERANCE;
     const held = trial.run(mass, Math.exp(x)) === "surface";
     const step = held ? -trial.logMassExcess / trial.logMassExcessSlope : Number.NaN;
-    if (held && fine && Math.abs(step) <= ACCEPTED_STEP) return { outcome: "found", logPressure: x, lastStep: step };
+    if (held && fine && Math.abs(step) <= accepted) return { outcome: "found", logPressure: x, lastStep: step };
     if (held && round === 0 && Math.abs(trial.logMassExcessSlope) < NO_RESPONSE) {
       return { outcome: "independent", excess: trial.logMassExcess };
     }

@@ -9,7 +9,7 @@ import {
   massOutOfRange,
   noCentralPressure,
 } from "./massErrors.ts";
-import type { Planet } from "./planet.ts";
+import type { Planet, SolidPlanet } from "./planet.ts";
 import { type Shot, shoot } from "./shooting.ts";
 import { type Stretch, TrialIntegration } from "./trialIntegration.ts";
 
@@ -53,7 +53,7 @@ export class StructureSolver {
    *         for a polytrope of index 3; `no-central-pressure`. ConvergenceError `structure-not-converged`.
    * Checked test/interior/structureReference.test.ts, polytropes.test.ts, maximumMass.test.ts
    */
-  solve(mass: number, guess?: number): Planet {
+  solve(mass: number, guess?: number): SolidPlanet {
     const { trial } = this;
     if (!(mass >= MASS_RANGE.minimum * (1 - 1e-12) && mass <= MASS_RANGE.maximum * (1 + 1e-12))) {
       throw massOutOfRange(mass);
@@ -71,7 +71,7 @@ export class StructureSolver {
    * The planet that a central pressure [Pa] holds up; the only way to ask for a body whose mass does not depend on it.
    * Throws  ConvergenceError `structure-not-converged` where that pressure makes no planet of this composition.
    */
-  fromCentralPressure(centralPressure: number): Planet {
+  fromCentralPressure(centralPressure: number): SolidPlanet {
     const { trial } = this;
     const before = { integrations: trial.runs, rightHandSides: trial.evaluations };
     trial.integrator.tolerance = this.tolerance;
@@ -94,7 +94,7 @@ export class StructureSolver {
     return shoot(this.trial, mass, start, { tolerance: this.tolerance, warm: guess !== undefined });
   }
 
-  private planet(mass: number, logPressure: number, lastStep: number, before: Planet["counters"]): Planet {
+  private planet(mass: number, logPressure: number, lastStep: number, before: Planet["counters"]): SolidPlanet {
     const { trial, composition } = this;
     // The last Newton step is not integrated again: its first-order effect is enough at this size.
     const radiusSquared = trial.radiusSquared + trial.radiusSquaredSlope * lastStep;
@@ -114,6 +114,7 @@ export class StructureSolver {
       boundaries: trial.boundaries,
       radiusRelativeError: integrationError + ROUND_OFF,
       extrapolatedLayers: trial.extrapolated,
+      notes: [],
       counters: {
         integrations: trial.runs - before.integrations,
         rightHandSides: trial.evaluations - before.rightHandSides,

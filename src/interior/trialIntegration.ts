@@ -196,13 +196,16 @@ export class TrialIntegration {
   }
 
   private boundary(kind: Boundary["kind"], at: Stretch, mass: number, radiusSquared: number, pressure: number): void {
+    const { name, curve } = at.phase;
+    const temperature = curve.temperature?.(curve.coordinate(pressure));
     this.boundaries.push({
       kind,
       layer: at.layer.name,
-      phase: at.phase.name,
+      phase: name,
       enclosedMass: mass,
       radius: Math.sqrt(radiusSquared),
       pressure,
+      ...(temperature !== undefined && { temperature }),
     });
   }
 }

@@ -1,6 +1,7 @@
 import { InputError } from "../errors.ts";
 import { type Library, loadLibrary } from "./library.ts";
 import { type Entry, entryOf, isJson, type LibraryFile } from "./libraryFiles.ts";
+import { materialFile } from "./materialFile.ts";
 import { compositionSchema, materialSchema } from "./schemas.ts";
 import { validate } from "./validate.ts";
 
@@ -32,6 +33,9 @@ export function checkLibrary(files: readonly LibraryFile[], base: readonly Libra
 function build(library: Library, { kind, name }: Entry): InputError[] {
   try {
     library[kind](name);
+    if (kind === "material") {
+      for (const other of materialFile(library.materials, name).alternatives ?? []) library.material(other);
+    }
     return [];
   } catch (error) {
     return [asProblem(error)];

@@ -1,16 +1,24 @@
 import type { Material } from "../eos/material.ts";
 import { InputError } from "../errors.ts";
+import { EARTH_FLUX, GIGAYEAR } from "../units/constants.ts";
 import { buildMaterial } from "./buildMaterial.ts";
-import type { Composition } from "./composition.ts";
+import type { Composition, GasEnvelope } from "./composition.ts";
 import { inFile, unknownName } from "./libraryErrors.ts";
 import { type Entry, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
+import { materialEntry, materialFile } from "./materialFile.ts";
 import { readDensityTable } from "./readDensityTable.ts";
-import { resolveLayers } from "./resolveLayers.ts";
-import { type CompositionFile, compositionSchema, type MaterialFile, materialSchema } from "./schemas.ts";
+import { type NameLookup, resolveLayers } from "./resolveLayers.ts";
+import { resolveTemperature } from "./resolveTemperature.ts";
+import { type CompositionFile, compositionSchema, type EnvelopeEntry } from "./schemas.ts";
 import { validate } from "./validate.ts";
 
 /** A surface at vacuum and room temperature, where a composition file does not give its own. */
 const DEFAULT_SURFACE = { pressurePa: 0, temperatureK: 300 };
+
+/** Names of materials by the names of those they replace. */
+export type Substitutes = ReadonlyMap<string, string>;
+
+const NO_SUBSTITUTES: Substitutes = new Map();
 
 /** Compositions and materials by name. Each is read, checked and built when first asked for. */
 export interface Library {
@@ -19,14 +27,13 @@ export interface Library {
   /** What a user should know, e.g. that a file of theirs took the place of a shipped one. */
   readonly notes: readonly string[];
   /**
-   * The composition of that name, or a planet of the material of that name alone.
+   * The composition of that name, or a planet of the material of that name alone; `substitutes` stand in for the
+   * materials they are filed under.
    * Throws InputError `unknown-composition`, `composition-cycle`, or any error of the files it is made from.
    */
-  composition(name: string): Composition;
+  composition(name: string, substitutes?: Substitutes): Composition;
   /** Throws InputError `unknown-material`, or any error of its file. */
   material(name: string): Material;
-  /** The form of every phase with its keys, as in the material's file. Throws like `material`. */
-  formKeys(name: string): readonly Readonly<Record<string, number | string>>[];
 }
 
 /**
@@ -58,29 +65,18 @@ class FileLibrary implements Library {
     return [...this.materialEntries.values()];
   }
 
-  composition(name: string): Composition {
-    return this.resolve(name, []);
+  composition(name: string, substitutes = NO_SUBSTITUTES): Composition {
+    return this.resolve(name, [], substitutes);
   }
 
   material(name: string): Material {
     const known = this.builtMaterials.get(name);
     if (known !== undefined) return known;
-    const file = this.materialFile(name);
-    const path = this.materialEntry(name).path;
+    const { path } = materialEntry(this.materials, name);
+    const file = materialFile(this.materials, name);
     const material = inFile(path, () => buildMaterial(file, (table) => this.table(path, table)));
     this.builtMaterials.set(name, material);
     return material;
-  }
-
-  formKeys(name: string): readonly Readonly<Record<string, number | string>>[] {
-    return this.materialFile(name).phases.map(({ eos }) => eos);
-  }
-
-  private materialFile(name: string): MaterialFile {
-    const entry = this.materialEntry(name);
-    const { value, problems } = validate(materialSchema, entry.path, entry.content);
-    if (problems) throw problems[0];
-    return value;
   }
 
   private add(entry: Entry): void {
@@ -92,31 +88,31 @@ class FileLibrary implements Library {
     entries.set(entry.name, entry);
   }
 
-  private materialEntry(name: string): Entry {
-    const entry = this.materialEntries.get(name);
-    if (entry !== undefined) return entry;
-    throw unknownName("material", name, [...this.materialEntries.keys()]);
-  }
-
   /** `above` are the compositions being resolved that led here, outermost first. */
-  private resolve(name: string, above: readonly string[]): Composition {
-    const known = this.builtCompositions.get(name);
+  private resolve(name: string, above: readonly string[], substitutes: Substitutes): Composition {
+    const known = substitutes.size === 0 ? this.builtCompositions.get(name) : undefined;
     if (known !== undefined) return known;
     const entry = this.compositionEntries.get(name);
-    const composition = entry === undefined ? this.pure(name) : this.resolveEntry(entry, above);
-    this.builtCompositions.set(name, composition);
+    const composition =
+      entry === undefined ? this.pure(name, substitutes) : this.resolveEntry(entry, above, substitutes);
+    if (substitutes.size === 0) this.builtCompositions.set(name, composition);
     return composition;
   }
 
-  private pure(name: string): Composition {
+  private pure(name: string, substitutes: Substitutes): Composition {
     if (!this.materialEntries.has(name)) {
       throw unknownName("composition", name, [...this.compositionEntries.keys(), ...this.materialEntries.keys()]);
     }
-    const material = this.material(name);
-    return { name, title: material.title, surface: DEFAULT_SURFACE, layers: [{ name, material, massFraction: 1 }] };
+    const material = this.material(substitutes.get(name) ?? name);
+    const layers = [{ name: material.name, material, massFraction: 1 }];
+    return { name, title: material.title, surface: DEFAULT_SURFACE, layers };
   }
 
-  private resolveEntry({ name, path, content }: Entry, above: readonly string[]): Composition {
+  private resolveEntry(
+    { name, path, content }: Entry,
+    above: readonly string[],
+    substitutes: Substitutes,
+  ): Composition {
     const chain = [...above, name];
     if (above.includes(name)) {
       throw new InputError(
@@ -127,11 +123,11 @@ class FileLibrary implements Library {
     }
     const { value: file, problems } = validate(compositionSchema, path, content);
     if (problems) throw problems[0];
-    const layers = resolveLayers(file, {
-      material: (wanted, key) => inFile(path, () => this.material(wanted), key),
-      composition: (wanted, key) => inFile(path, () => this.resolve(wanted, chain), key),
-    });
-    return compositionOf(file, layers);
+    const lookup: NameLookup = {
+      material: (wanted, key) => inFile(path, () => this.material(substitutes.get(wanted) ?? wanted), key),
+      composition: (wanted, key) => inFile(path, () => this.resolve(wanted, chain, substitutes), key),
+    };
+    return inFile(path, () => compositionOf(file, resolveLayers(file, lookup)));
   }
 
   private table(materialPath: string, name: string): ReturnType<typeof readDensityTable> {
@@ -147,5 +143,20 @@ class FileLibrary implements Library {
 
 function compositionOf(file: CompositionFile, layers: Composition["layers"]): Composition {
   const { composition: name, title, source, surface = DEFAULT_SURFACE } = file;
-  return { name, title, ...(source && { source }), surface, layers };
+  const temperature = resolveTemperature(file.temperature, layers, surface.temperatureK);
+  return {
+    ...{ name, title, surface, layers },
+    ...(source && { source }),
+    ...(temperature && { temperature }),
+    ...(file.envelope && { envelope: envelopeOf(file.envelope) }),
+  };
+}
+
+function envelopeOf({ massFraction, fluxEarth, ageGyr, opacity }: EnvelopeEntry): GasEnvelope {
+  return {
+    massFraction,
+    opacity,
+    ...(fluxEarth !== undefined && { flux: fluxEarth * EARTH_FLUX }),
+    ...(ageGyr !== undefined && { age: ageGyr * GIGAYEAR }),
+  };
 }

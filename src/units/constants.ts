@@ -47,4 +47,7 @@ export const EARTH_RADIUS = constants.earthRadius.value;
 export const JUPITER_RADIUS = constants.jupiterRadius.value;
 export const SUN_RADIUS = constants.sunRadius.value;
 
+export const EARTH_FLUX = constants.solarIrradiance.value;
+
 export const GPA = 1e9;
+export const GIGAYEAR = 1e9 * constants.julianYear.value;

@@ -126,6 +126,100 @@ describe("curve", () => {
     expect(rows[1].radius_m).toBeNull();
   });
 
+  test("--observables, --period-days and --spread append columns and change none", async () => {
+    const args = ["curve", "earth-like", "--masses", "1,1e6"];
+    const plain = readRows((await runCommand(args)).out);
+    const more = [
+      ...["fluid_love_number", "core_radius_fraction", "escape_speed_m_s", "binding_energy_j"],
+      ...["radius_earth_distorted_transit", "radius_earth_substellar"],
+      ...["radius_earth_spread_low", "radius_earth_spread_high", "spread_low_materials", "spread_high_materials"],
+    ];
+    const { out } = await runCommand([...args, "--observables", "--period-days", "0.5", "--spread"]);
+    expect(out.split("\n")).toContain([columns, ...more].join(","));
+    const [row, unsolved] = readRows(out);
+    expect(row).toMatchObject(plain[0]);
+    expect(more.map((column) => unsolved[column]).join("")).toBe("");
+    // A planet that yields to the tide: flattened as seen by the star's light, drawn out towards the star.
+    const radius = Number(row.radius_earth);
+    expect(Number(row.radius_earth_distorted_transit)).toBeLessThan(radius);
+    expect(Number(row.radius_earth_substellar)).toBeGreaterThan(radius);
+    // (7/6) / (7/12) = 2 to first order.
+    const stretch = Number(row.radius_earth_substellar) / radius - 1;
+    expectClose(stretch / (1 - Number(row.radius_earth_distorted_transit) / radius), 2, {
+      rel: 0.01,
+      because: "second order in a distortion of 0.05",
+    });
+  });
+
+  test("a period at which the planet is torn apart leaves its columns empty and says why", async () => {
+    const { code, out } = await runCommand(["curve", "earth-like", "--masses", "1", "--period-days", "0.2"]);
+    expect(code).toBe(0);
+    const [row] = readRows(out);
+    expect(row.radius_earth_distorted_transit).toBe("");
+    expect(row.note).toContain("h2 q");
+  });
+
+  test("the spread holds the curves of the alternative irons, and names the sets at its ends", async () => {
+    const { out } = await runCommand(["curve", "earth-like", "--masses", "1,8", "--spread"]);
+    const irons = ["iron-birch-2016", "iron-vinet-2007", "iron-vinet-2018"].map((iron) => `earth-like-${iron}`);
+    const others = readRows((await runCommand(["curve", ...irons, "--masses", "1,8"])).out);
+    for (const row of readRows(out)) {
+      const [low, high] = [Number(row.radius_earth_spread_low), Number(row.radius_earth_spread_high)];
+      const same = others.filter(({ mass_earth }) => mass_earth === row.mass_earth);
+      for (const { radius_earth } of [row, ...same]) {
+        expect(Number(radius_earth)).toBeGreaterThanOrEqual(low);
+        expect(Number(radius_earth)).toBeLessThanOrEqual(high);
+      }
+      expect(row.spread_low_materials).toMatch(/^iron-[\w-]+;magnesium-silicate/);
+    }
+    expect(out).toContain("# note: spread of earth-like over 8 sets: iron-birch-2025 with magnesium-silicate; ");
+    expect(out).toMatch(/# source: iron-vinet-2007, /);
+  });
+
+  test("there is no spread where the materials list no alternatives", async () => {
+    const { out } = await runCommand(["curve", "iron-polytrope", "--masses", "1", "--spread"]);
+    expect(readRows(out)[0].radius_earth_spread_low).toBe("");
+    expect(out).toContain("# note: iron-polytrope: its materials list no alternatives");
+  });
+
+  test("a gas envelope appends its columns; outside the published grid are rows with the reason", async () => {
+    const { code, out } = await runCommand(["curve", "earth-like-gas-2", "earth-like", "--masses", "0.5,5"]);
+    expect(code).toBe(0);
+    const gas = "envelope_mass_fraction,flux_earth,age_gyr,core_radius_earth,radius_earth_convective";
+    expect(out.split("\n")).toContain(`${columns},${gas},escape_parameter,mass_loss_time_gyr`);
+    const [tooLight, gaseous, , rocky] = readRows(out);
+    expect(tooLight.note).toContain("Lopez & Fortney 2014 cover 1 to 20");
+    expect(tooLight.radius_earth).toBe("");
+    expect(Number(gaseous.radius_earth)).toBeGreaterThan(Number(gaseous.radius_earth_convective));
+    // Lopez & Fortney 2014, equation 4, at solar opacity, where the factor of the age is 1.
+    const thickness = 2.06 * 5 ** -0.21 * 0.4 ** 0.59 * 10 ** 0.044;
+    expectClose(Number(gaseous.radius_earth_convective) - Number(gaseous.core_radius_earth), thickness, {
+      rel: 1e-10,
+      because: "12 digits are printed",
+    });
+    expect(gaseous.inertia_factor).toBe("");
+    expect(rocky.envelope_mass_fraction).toBe("");
+    expect(out).toContain("# note: the radius of earth-like-gas-2 (radius_earth) is that of a transit");
+    expect(out).toMatch(/# source: earth-like-gas-2, gas envelope: Lopez & Fortney 2014/);
+  });
+
+  test("flux, age and transit pressure are the run's where given", async () => {
+    const args = ["curve", "earth-like-gas-2", "--masses", "10"];
+    const [own] = readRows((await runCommand([...args, "--transit-pressure-pa", "2000"])).out);
+    expect(own.radius_earth_at_transit_pressure).toBe(own.radius_earth);
+    const more = ["--flux-earth", "100", "--age-gyr", "1", "--transit-pressure-pa", "100"];
+    const [given] = readRows((await runCommand([...args, ...more])).out);
+    expect([given.flux_earth, given.age_gyr].map(Number)).toEqual([100, 1]);
+    expect(Number(given.radius_earth)).toBeGreaterThan(Number(own.radius_earth));
+    expect(Number(given.radius_earth_at_transit_pressure)).toBeGreaterThan(Number(given.radius_earth));
+  });
+
+  test("options for gas are refused where there is none", async () => {
+    const { code, out, err } = await runCommand(["curve", "earth-like", "--masses", "1", "--flux-earth", "100"]);
+    expect({ code, out }).toEqual({ code: 2, out: "" });
+    expect(err).toContain("end in a gas envelope");
+  });
+
   test("the same command gives the same bytes", async () => {
     const args = ["curve", "earth-like", "--masses", "0.5:5:7"];
     expect(await runCommand(args)).toEqual(await runCommand(args));

@@ -30,6 +30,12 @@ test("show gives layers, forms, ranges, densities at 0, 100 and 1000 GPa, and so
   expect(out).toMatch(/source: .*doi:10\./);
 });
 
+test("show tells of gas and of other published sets", async () => {
+  const { out } = await runCommand(["library", "show", "earth-like-gas-2"]);
+  expect(out).toContain("  envelope: massFraction 0.02, opacity solar, fluxEarth 10, ageGyr 5\n");
+  expect(out).toContain("  alternatives: iron-birch-2016, iron-vinet-2007, iron-vinet-2018\n");
+});
+
 test("show reads a table of the user's, says where it ends, and lets no control character through", async () => {
   const { code, out } = await runCommand(["library", "show", "slag", "--library", folder]);
   expect(code).toBe(0);
@@ -47,4 +53,45 @@ test("show of an unknown name ends with 1 and the nearest", async () => {
   const { code, err } = await runCommand(["library", "show", "earthlike"]);
   expect(code).toBe(1);
   expect(err).toContain('Did you mean "earth-like"?');
+});
+
+test("--from-abundances writes a planet of the star's iron and rock that curve can use", async () => {
+  const mine = join(folder, "from-star");
+  const ratios = "Fe/Mg=0.81+-0.04,Si/Mg=0.91+-0.03";
+  const { code, out } = await runCommand(["library", "--from-abundances", ratios, "--out", mine, "--name", "tau"]);
+  expect(code).toBe(0);
+  // Solar ratios give 0.3226 with Mg, Si, Fe and O alone, 0.307 with Al and Ca (Asplund et al. 2021).
+  expect(out).toMatch(/^core mass fraction 0\.32\d+ \(68 % between 0\.31\d+ and 0\.33\d+\)$/m);
+  expect(out).toMatch(/with Al and Ca 0\.30[67]\d* \(Al and Ca in the Sun's proportion to Mg\)$/m);
+  expect(out).toContain(join(mine, "materials", "tau-mantle.json"));
+  expect(await runCommand(["library", "check", mine])).toMatchObject({ code: 0 });
+  const curve = await runCommand(["curve", "tau", "--library", mine, "--masses", "1"]);
+  expect(curve.code).toBe(0);
+  expect(curve.out).toMatch(/^tau,1\.00000000000,0\.9/m);
+  expect(curve.out).toContain(`abundances as given: ${ratios}`);
+});
+
+test("--from-abundances without a folder prints both files, and what they mean beside", async () => {
+  const solar = await runCommand(["library", "--from-abundances", "Fe/Mg=0.81,Si/Mg=0.91"]);
+  const files = JSON.parse(solar.out);
+  expect(Object.keys(files)).toEqual(["star-planet.json", "materials/star-planet-mantle.json"]);
+  expect(files["star-planet.json"].layers[0].massFraction).toBeCloseTo(0.3226, 4);
+  expect(solar.err).toContain("core mass fraction 0.3226\n");
+  const dex = ["library", "--from-abundances", "[Fe/H]=0,[Mg/H]=0,[Si/H]=0"];
+  const scaled = await runCommand([...dex, "--solar-scale", "asplund2021", "--mantle-iron-share", "0.1"]);
+  expect(scaled.code).toBe(0);
+  expect(scaled.err).toMatch(/Fe\/\(Mg \+ Fe\) 0\.07\d+$/m);
+});
+
+test.each([
+  ["no scale for dex", ["--from-abundances", "[Fe/H]=0,[Mg/H]=0,[Si/H]=0"], 1, "asplund2021"],
+  ["a ratio that is none", ["--from-abundances", "Fe/Mg=iron,Si/Mg=1"], 1, "Fe/Mg=iron"],
+  ["a scale that is none", ["--from-abundances", "Fe/Mg=1,Si/Mg=1", "--solar-scale", "mine"], 2, "lodders2003"],
+  ["all iron in the mantle", ["--from-abundances", "Fe/Mg=1,Si/Mg=1", "--mantle-iron-share", "1"], 2, "below 1"],
+  ["a name that is a path", ["--from-abundances", "Fe/Mg=1,Si/Mg=1", "--name", "../x"], 1, "a name is made of"],
+  ["an unknown subcommand", ["lst"], 2, 'Did you mean "list"?'],
+])("%s is refused", async (_, args, expected, message) => {
+  const { code, out, err } = await runCommand(["library", ...args]);
+  expect({ code, out }).toEqual({ code: expected, out: "" });
+  expect(err).toContain(message);
 });

@@ -3,7 +3,7 @@ import { describe, expect, test } from "vitest";
 import { expectClose } from "../support/expectClose.ts";
 import { runCommand } from "./runCommand.ts";
 
-const columns = "radius_km,enclosed_mass_earth,pressure_gpa,density_kg_m3,gravity_m_s2,layer,phase";
+const columns = "radius_km,enclosed_mass_earth,pressure_gpa,density_kg_m3,gravity_m_s2,layer,phase,temperature_k";
 
 const readRows = (csv: string) =>
   parse<Record<string, string>, Record<string, string>>(csv, { columns: true, comment: "#" });
@@ -37,6 +37,46 @@ describe("profile of a composition", () => {
     const { code, out, err } = await runCommand(["profile", "iron", "--mass", "1e5"]);
     expect({ code, out }).toEqual({ code: 1, out: "" });
     expect(err).toContain("0.001 to 1000 Earth masses");
+  });
+});
+
+describe("temperature in a profile", () => {
+  test("stands in the last column, with its mode in a note", async () => {
+    const { out } = await runCommand(["profile", "earth", "--mass", "1", "--points", "5"]);
+    expect(out).toContain(
+      "# note: temperature of earth: adiabatic from 1600 K at the surface; core-earth begins at 4505 K",
+    );
+    const rows = readRows(out);
+    expect(Number(rows[rows.length - 1].temperature_k)).toBe(1600);
+    const coreTop = rows.findLast(({ layer }) => layer === "core-earth");
+    expectClose(Number(coreTop?.temperature_k), 4505, { rel: 1e-6, because: "pressure there found by iteration" });
+    const { rows: sameRows } = JSON.parse(
+      (await runCommand(["profile", "earth", "--mass", "1", "--points", "5", "--format", "json"])).out,
+    );
+    expect(sameRows.map((row: Record<string, number>) => row.temperature_k)).toEqual(
+      rows.map(({ temperature_k }) => Number(temperature_k)),
+    );
+  });
+
+  test("is empty in a cold planet, and none in JSON", async () => {
+    const args = ["profile", "earth-like", "--mass", "1", "--points", "3"];
+    const { out } = await runCommand(args);
+    expect(out).toContain("# note: earth-like is cold");
+    expect(new Set(readRows(out).map(({ temperature_k }) => temperature_k))).toEqual(new Set([""]));
+    const { rows } = JSON.parse((await runCommand([...args, "--format", "json"])).out);
+    expect(rows[0].temperature_k).toBeNull();
+  });
+});
+
+describe("profile of a planet with a gas envelope", () => {
+  test("ends where the gas begins, and its notes tell of the whole", async () => {
+    const { code, out } = await runCommand(["profile", "earth-like-gas-2", "--mass", "5", "--age-gyr", "1"]);
+    expect(code).toBe(0);
+    const rows = readRows(out);
+    expectClose(Number(rows[rows.length - 1].enclosed_mass_earth), 0.98 * 5, { rel: 1e-11, because: "12 digits" });
+    expect(out).toContain("# note: mass 5.00000000000 Earth masses, radius 3.");
+    expect(out).toMatch(/# note: the gas begins at 1\.52\d+ Earth radii/);
+    expect(out).not.toContain("I / (M R²)");
   });
 });
 

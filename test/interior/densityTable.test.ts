@@ -1,25 +1,8 @@
-import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { integrateDensityTable } from "../../src/interior/densityTable.ts";
 import { G, GPA } from "../../src/units/constants.ts";
 import { expectClose } from "../support/expectClose.ts";
-
-const prem = JSON.parse(readFileSync(new URL("../fixtures/interior/prem.json", import.meta.url), "utf8"));
-
-/** The polynomials of PREM sampled every `stepKm`, both sides of every discontinuity. */
-function samplePrem(stepKm: number): { radius: number[]; density: number[] } {
-  const radius: number[] = [];
-  const density: number[] = [];
-  for (const [, bottom, top, coefficients] of prem.layers as [string, number, number, number[]][]) {
-    const count = Math.ceil((top - bottom) / stepKm);
-    for (let i = 0; i <= count; i++) {
-      const km = bottom + ((top - bottom) * i) / count;
-      radius.push(km * 1e3);
-      density.push(1e3 * coefficients.reduce((sum, c, k) => sum + c * (km / prem.radiusKm) ** k, 0));
-    }
-  }
-  return { radius, density };
-}
+import { prem, samplePrem } from "../support/samplePrem.ts";
 
 describe("PREM", () => {
   const profile = integrateDensityTable(samplePrem(10));

@@ -36,8 +36,14 @@ describe("60 invented planets", () => {
       expect(error).toBeLessThan(planet.radiusRelativeError);
       expect(planet.radiusRelativeError).toBeLessThan(1e-7);
       expectClose(planet.centralPressure, exact.centralPressure, { rel: 1e-7, because: "promised" });
-      expectClose(planet.inertiaFactor, exact.inertiaFactor, { rel: 1e-7, because: "integrated alongside" });
-      expectClose(planet.bindingEnergy, exact.bindingEnergy, { rel: 1e-7, because: "integrated alongside" });
+      expectClose(planet.inertiaFactor ?? Number.NaN, exact.inertiaFactor, {
+        rel: 1e-7,
+        because: "integrated alongside",
+      });
+      expectClose(planet.bindingEnergy ?? Number.NaN, exact.bindingEnergy, {
+        rel: 1e-7,
+        because: "integrated alongside",
+      });
     }
   });
 

@@ -22,8 +22,8 @@ describe("a uniform sphere", () => {
     expectClose(planet.radius, radius, closed);
     // P = 3GM²/8πR⁴, U = 3GM²/5R
     expectClose(planet.centralPressure, (3 * G * EARTH_MASS ** 2) / (8 * Math.PI * radius ** 4), closed);
-    expectClose(planet.inertiaFactor, 0.4, closed);
-    expectClose(planet.bindingEnergy, (0.6 * G * EARTH_MASS ** 2) / radius, closed);
+    expectClose(planet.inertiaFactor ?? Number.NaN, 0.4, closed);
+    expectClose(planet.bindingEnergy ?? Number.NaN, (0.6 * G * EARTH_MASS ** 2) / radius, closed);
     expectClose(planet.bulkDensity, 5500, closed);
   });
 });
@@ -49,7 +49,7 @@ describe("two uniform layers", () => {
     expectClose(planet.boundaries[0].pressure, boundary, closed);
     expectClose(planet.centralPressure, boundary + (2 / 3) * Math.PI * G * core ** 2 * r ** 2, closed);
     const inertia = ((8 * Math.PI) / 15) * (core * r ** 5 + mantle * (R ** 5 - r ** 5));
-    expectClose(planet.inertiaFactor, inertia / (EARTH_MASS * R * R), closed);
+    expectClose(planet.inertiaFactor ?? Number.NaN, inertia / (EARTH_MASS * R * R), closed);
   });
 });
 
@@ -89,7 +89,7 @@ describe.each([
   it("has the binding energy 3/(5 - n) G M²/R", () => {
     // Chandrasekhar 1939, ch. IV, eq. 90.
     const { bindingEnergy, mass, radius } = planet;
-    expectClose(bindingEnergy, ((3 / (5 - index)) * G * mass * mass) / radius, closed);
+    expectClose(bindingEnergy ?? Number.NaN, ((3 / (5 - index)) * G * mass * mass) / radius, closed);
   });
 });
 

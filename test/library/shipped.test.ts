@@ -11,12 +11,18 @@ const names = library.materials.map(({ name }) => name);
 const compositions = library.compositions.map(({ name }) => name);
 const GPA = 1e9;
 
+const alternatives = ["magnesium-silicate-2016", "water-ice-vii-2004"];
 const defaults = ["iron-birch-2025", "magnesium-silicate", "water-ice-vii"];
 const polytropes = names.filter((name) => name.endsWith("-polytrope"));
 
 test("all promised materials and compositions are there", () => {
   const others = ["iron-vinet-2007", "iron-vinet-2018", "iron-birch-2016", "earth-mantle-birch", "earth-core-birch"];
-  expect([...names].sort()).toEqual([...defaults, ...others, ...polytropes].sort());
+  const warm = [
+    ...["core-earth", "core-earth-cosmochemical", "core-mars", "core-mercury", "core-moon", "core-chondritic"],
+    ...["mantle-pyrolite", "mantle-mars", "mantle-mercury", "mantle-moon", "silicate-chondritic", "water-phases"],
+  ];
+  const cold = ["crust-mars", "crust-moon", "serpentine-chondritic", "troilite"];
+  expect([...names].sort()).toEqual([...defaults, ...alternatives, ...others, ...polytropes, ...warm, ...cold].sort());
   expect(polytropes).toHaveLength(6);
   expect([...compositions].sort()).toEqual(
     [
@@ -26,12 +32,15 @@ test("all promised materials and compositions are there", () => {
       "earth-like",
       "iron-rich",
       "coreless",
+      "earth-like-gas-2",
       "earth-like-water-10",
       "earth-like-water-30",
       "earth-like-water-50",
       "earth-like-iron-vinet-2007",
       "earth-like-iron-vinet-2018",
       "earth-like-iron-birch-2016",
+      ...["earth", "earth-cosmochemical-core", "venus", "mars", "mercury", "moon", "io", "europa", "ganymede"],
+      ...["callisto", "callisto-hydrated", "titan", "titan-hydrated"],
     ].sort(),
   );
 });
@@ -57,9 +66,10 @@ describe.each(names)("%s", (name) => {
   });
 });
 
-/** Pressures from 1e5 to 1e16 Pa, with both sides of every phase boundary. */
+/** Pressures from 1e5 to 1e16 Pa, or to where the last form ends, with both sides of every phase boundary. */
 function ladder({ phases }: Material): number[] {
-  const steps = Array.from({ length: 2201 }, (_, i) => 10 ** (5 + i / 200));
+  const end = phases[phases.length - 1].curve.maxPressure;
+  const steps = Array.from({ length: 2201 }, (_, i) => 10 ** (5 + i / 200)).filter((pressure) => pressure <= end);
   const boundaries = phases.slice(1).flatMap(({ fromPressure: p }) => [p * (1 - 1e-12), p, p * (1 + 1e-12)]);
   return [...steps, ...boundaries].sort((a, b) => a - b);
 }

@@ -1,10 +1,14 @@
 import type { Command } from "commander";
 import { integrateDensityTable } from "../../interior/densityTable.ts";
+import { fluidLoveNumber } from "../../interior/loveNumber.ts";
+import { coreRadiusFraction, escapeSpeed, planetLoveNumber } from "../../interior/observables.ts";
 import type { Planet } from "../../interior/planet.ts";
 import { solveProfile } from "../../interior/profile.ts";
-import { EARTH_MASS, GPA } from "../../units/constants.ts";
+import { EARTH_MASS, GIGAYEAR, GPA } from "../../units/constants.ts";
 import type { CommandContext } from "../commandContext.ts";
+import { compositionNotes } from "../compositionNotes.ts";
 import { parseDensityTable } from "../densityTableFile.ts";
+import { addEnvelopeOptions, type EnvelopeOptions, requireEnvelope, withEnvelopeOptions } from "../envelopeOptions.ts";
 import { inputName, readText } from "../inputFile.ts";
 import { openLibrary } from "../libraryFolder.ts";
 import { pointCount, positiveNumber } from "../numberOptions.ts";
@@ -20,7 +24,7 @@ import {
   tell,
 } from "../resultOptions.ts";
 
-interface ProfileOptions extends GlobalOptions, ResultOptions {
+interface ProfileOptions extends GlobalOptions, ResultOptions, EnvelopeOptions {
   readonly mass?: number;
   readonly points: number;
   readonly library?: string;
@@ -49,6 +53,7 @@ export function define(command: Command, context: CommandContext): void {
       }
       return command.error("error: give either a composition with --mass, or --density-table alone");
     });
+  addEnvelopeOptions(command);
 }
 
 async function profileOfComposition(
@@ -60,31 +65,72 @@ async function profileOfComposition(
   const { library, inputs } = await openLibrary(options.library, io);
   await checkDestinations(destinations(options), inputs);
   tell(library.notes, options, io);
-  const composition = library.composition(name);
+  const composition = withEnvelopeOptions(library.composition(name), options);
+  requireEnvelope([composition], options);
   const { planet, points } = solveProfile(composition, mass * EARTH_MASS, options.points);
   const provenance = provenanceOf({
     args,
     earthRadius: options.earthRadiusKm,
     compositions: [composition],
-    notes: [...library.notes, ...planetNotes(planet, options)],
+    notes: [...library.notes, ...compositionNotes(composition), ...planetNotes(planet, options)],
   });
   await emitTable(profileTable(points), provenance, options, io);
 }
 
 async function profileOfTable(file: string, options: ProfileOptions, { io, args }: CommandContext): Promise<void> {
   await checkDestinations(destinations(options), [file]);
-  const planet = integrateDensityTable(parseDensityTable(await readText(file, io), inputName(file)));
+  const table = parseDensityTable(await readText(file, io), inputName(file));
+  const planet = integrateDensityTable(table);
   const provenance = provenanceOf({
     args,
     earthRadius: options.earthRadiusKm,
-    notes: [bulkNote(planet, options), `density as given in ${inputName(file)}, linear between its rows`],
+    notes: [
+      bulkNote(planet, options),
+      loveNote(fluidLoveNumber(table)),
+      `density as given in ${inputName(file)}, linear between its rows`,
+    ],
   });
   await emitTable(profileTable(planet.points), provenance, options, io);
 }
 
 function planetNotes(planet: Planet, options: ProfileOptions): string[] {
   const extrapolated = planet.extrapolatedLayers.map((layer) => `${layer} is used beyond the data behind it`);
-  return [bulkNote(planet, options), `radius good to ${planet.radiusRelativeError.toExponential(1)}`, ...extrapolated];
+  const accuracy = `radius good to ${planet.radiusRelativeError.toExponential(1)}`;
+  return [
+    bulkNote(planet, options),
+    observableNote(planet),
+    accuracy,
+    ...envelopeNote(planet, options),
+    ...extrapolated,
+    ...planet.notes,
+  ];
+}
+
+function observableNote(planet: Planet): string {
+  const loveNumber = planetLoveNumber(planet);
+  const coreRadius = coreRadiusFraction(planet);
+  return [
+    ...(loveNumber === undefined ? [] : [loveNote(loveNumber)]),
+    ...(coreRadius === undefined ? [] : [`core radius ${coreRadius.toPrecision(6)} of the planet's`]),
+    `escape speed ${escapeSpeed(planet).toPrecision(6)} m/s`,
+    ...(planet.bindingEnergy === undefined ? [] : [`binding energy ${planet.bindingEnergy.toPrecision(6)} J`]),
+  ].join(", ");
+}
+
+function loveNote(loveNumber: number): string {
+  return `fluid Love number k2 ${loveNumber.toPrecision(4)}`;
+}
+
+/** The rows end where the gas begins, and the bulk values are those of the whole. */
+function envelopeNote({ envelope }: Planet, { earthRadiusKm }: ProfileOptions): string[] {
+  if (envelope === undefined) return [];
+  const { core, convectiveRadius, escapeParameter, massLossTime } = envelope;
+  const inRadii = (radius: number): string => `${(radius / earthRadiusKm.value).toPrecision(12)} Earth radii`;
+  return [
+    `the gas begins at ${inRadii(core.radius)}, where these rows end, and convects up to ${inRadii(convectiveRadius)}; ` +
+      `escape parameter ${escapeParameter.toPrecision(4)}, lost in ${(massLossTime / GIGAYEAR).toPrecision(3)} Gyr ` +
+      "at the present rate",
+  ];
 }
 
 function bulkNote(
@@ -95,6 +141,6 @@ function bulkNote(
     `mass ${(bulk.mass / EARTH_MASS).toPrecision(12)} Earth masses`,
     `radius ${(bulk.radius / earthRadiusKm.value).toPrecision(12)} Earth radii`,
     `central pressure ${(bulk.centralPressure / GPA).toPrecision(12)} GPa`,
-    `I / (M R²) ${bulk.inertiaFactor.toPrecision(12)}`,
+    ...(bulk.inertiaFactor === undefined ? [] : [`I / (M R²) ${bulk.inertiaFactor.toPrecision(12)}`]),
   ].join(", ");
 }
