@@ -1,6 +1,8 @@
+import { readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
 import { expectClose } from "../support/expectClose.ts";
 import { relativeDifference, within } from "./check.ts";
+import { readmeTable } from "./readmeTable.ts";
 import { fortneyIceRock, fortneyRockIron } from "./relations.ts";
 import { knowingly, validationCsv, validationHtml } from "./report.ts";
 import { validate } from "./validation.ts";
@@ -33,6 +35,10 @@ describe("bars", () => {
       "Earth's materials",
     ]);
   });
+});
+
+test("the README shows every check that has a bar", () => {
+  expect(readFileSync("README.md", "utf8")).toContain(readmeTable(run));
 });
 
 describe("the report", () => {
