@@ -1,6 +1,6 @@
 import { BulkwrightError } from "../errors.ts";
 import type { Planet } from "../interior/planet.ts";
-import { planetSolver } from "../interior/planetSolver.ts";
+import { planetSolver, type SolverOptions } from "../interior/planetSolver.ts";
 import type { Composition } from "../library/composition.ts";
 import { polynomialThrough } from "../numerics/extrapolate.ts";
 
@@ -18,8 +18,12 @@ const NEAR = 0.7;
  * Planets of one composition at the given masses [kg], in their order. A mass that cannot be solved becomes a point
  * with its error; the sweep goes on. Neighbouring masses help each other, so sorted masses are fastest.
  */
-export function* sweepMasses(composition: Composition, masses: Iterable<number>): Generator<CurvePoint> {
-  const solver = planetSolver(composition);
+export function* sweepMasses(
+  composition: Composition,
+  masses: Iterable<number>,
+  options: SolverOptions = {},
+): Generator<CurvePoint> {
+  const solver = planetSolver(composition, options);
   const logMasses: number[] = [];
   const logPressures: number[] = [];
   for (const mass of masses) {

@@ -9,17 +9,22 @@ export interface PlanetSolver {
   solve(mass: number, guess?: number): Planet;
 }
 
+export interface SolverOptions {
+  /** Allowed relative error of one integration step; by default good for 1e-8 in radius. */
+  readonly tolerance?: number;
+}
+
 /**
  * The solver a composition needs: a cold planet pays nothing for the physics of warm ones.
  * Throws  InputError `envelope-conditions`
  */
-export function planetSolver(composition: Composition): PlanetSolver {
+export function planetSolver(composition: Composition, options: SolverOptions = {}): PlanetSolver {
   const { envelope } = composition;
-  const solid = solidSolver(composition);
+  const solid = solidSolver(composition, options);
   return envelope === undefined ? solid : new EnvelopeSolver({ ...composition, envelope }, solid);
 }
 
-function solidSolver(composition: Composition): SolidSolver {
+function solidSolver(composition: Composition, options: SolverOptions): SolidSolver {
   const warm = composition.temperature !== undefined && composition.layers.some(({ material }) => material.warmed);
-  return warm ? new WarmSolver(composition) : new StructureSolver(composition);
+  return warm ? new WarmSolver(composition, options) : new StructureSolver(composition, options);
 }
