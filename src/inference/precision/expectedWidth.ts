@@ -37,7 +37,9 @@ export function expectedLearning(
   family: PlanetFamily,
   range: MassRange,
 ): ExpectedLearning {
-  const futures = futureValues(present.mass, planned.mass).flatMap((mass) =>
+  // A mass that no model describes is not among those to come.
+  const masses = futureValues(present.mass, planned.mass).filter(({ quantity: { mode } }) => isWithin(range, mode));
+  const futures = masses.flatMap((mass) =>
     futureValues(present.radius, planned.radius).map((radius) => {
       const measurement = { mass: mass.quantity, radius: radius.quantity };
       const posterior = fractionPosterior(measurement, family, range);
@@ -70,6 +72,10 @@ function futureValues(present: SplitNormal, planned: SplitNormal): FutureValue[]
     const probability = errorOnThisSide * Math.exp(-(z ** 2) / 2);
     return { quantity: { ...planned, mode: atDeviation(wide, z) }, probability };
   });
+}
+
+function isWithin({ lightest, heaviest }: MassRange, mass: number): boolean {
+  return mass >= lightest && mass <= heaviest;
 }
 
 /** -∫ p ln p df [nat]. */

@@ -39,6 +39,14 @@ describe("expectedLearning", () => {
     expect(informationBits).toBe(0);
   });
 
+  test("leaves out masses to come that are none", () => {
+    const present = measurement(quoted(5, 3), quoted(1.1, 0.03));
+    const planned = withErrors(present, { mass: 0.05, radius: 0.03 });
+    const { width68, informationBits } = expectedLearning(present, planned, straightFamily(0.02), wholeRange);
+    expect(width68).toBeLessThan(0.3);
+    expect(informationBits).toBeGreaterThan(0);
+  });
+
   test("weighs values to come by how probable the present data and the family make them", () => {
     // The radius is quoted outside the family, whose largest is 1.1: most values to come lie nearer.
     const [quotedRadius, now, then] = [1.2, 0.12, 0.06];
