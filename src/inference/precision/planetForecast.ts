@@ -3,8 +3,8 @@ import type { PlanetFamily } from "../fractionPosterior.ts";
 import type { Measurement } from "../measurement.ts";
 import { type ExpectedEvidence, expectedEvidence } from "./expectedEvidence.ts";
 import { type ExpectedLearning, expectedLearning } from "./expectedWidth.ts";
-import { type ImprovementStep, improvementSteps } from "./improvementSteps.ts";
-import { isMeasured, withErrors } from "./plannedMeasurement.ts";
+import { type Improved, type ImprovementStep, improvementSteps } from "./improvementSteps.ts";
+import { errorSizes, isMeasured, withErrors } from "./plannedMeasurement.ts";
 import {
   type Contrast,
   type CurvePair,
@@ -23,9 +23,11 @@ export interface PrecisionModels extends CurvePair {
   readonly range: MassRange;
 }
 
-/** A step and what it buys. */
+/** A step and what it buys; a step that leads nowhere has `atMost` alone. */
 export interface StepForecast extends ImprovementStep {
   readonly separation?: number;
+  /** What the separation stays below, however small the improved error. */
+  readonly atMost?: number;
   readonly limiting?: LimitingError;
   readonly massShare?: number;
   /** Without the assumptions of `separation`; only for finite errors. */
@@ -42,8 +44,9 @@ export function forecastSteps(
   plan: { readonly levels: readonly number[]; readonly massPerRadius: number },
 ): StepForecast[] {
   const isWhole = isMeasured(present.mass) && isMeasured(present.radius);
+  const now = errorSizes(present);
   return improvementSteps(present, contrast, plan.levels, plan.massPerRadius).map((step) => {
-    if (step.errors === undefined) return step;
+    if (step.errors === undefined) return { ...step, atMost: separation(contrast, without(now, step.improved)) };
     const planned = withErrors(present, step.errors);
     return {
       ...step,
@@ -54,6 +57,10 @@ export function forecastSteps(
       learning: isWhole ? expectedLearning(present, planned, models.family, models.range) : undefined,
     };
   });
+}
+
+function without({ mass, radius }: ErrorSizes, improved?: Improved): ErrorSizes {
+  return { mass: improved === "radius" ? mass : 0, radius: improved === "mass" ? radius : 0 };
 }
 
 function hasBoth({ mass, radius }: ErrorSizes): boolean {

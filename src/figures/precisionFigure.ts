@@ -1,0 +1,61 @@
+import { formatValue, plainNumber } from "./formatValue.ts";
+import { logRange } from "./logRange.ts";
+import type { PrecisionInput, PrecisionSpec, SeparationGrid } from "./precisionSpec.ts";
+import { separationContour } from "./separationContour.ts";
+
+/** From this separation down, in sigma, two compositions are degenerate; always drawn. */
+const degenerate = 1;
+
+/**
+ * The map of how far apart two compositions are for errors of mass and radius, as data.
+ * Checked by test/figures/precisionFigure.test.ts.
+ */
+export function precisionFigure(input: PrecisionInput): PrecisionSpec {
+  const { massErrors, radiusErrors, present, labels } = input;
+  const axes = {
+    massError: {
+      title: "Relative error of the mass",
+      unit: "%",
+      range: logRange([...massErrors, ...(present ? [present.massError] : [])]),
+    },
+    radiusError: {
+      title: "Relative error of the radius",
+      unit: "%",
+      range: logRange([...radiusErrors, ...(present ? [present.radiusError] : [])]),
+    },
+  };
+  const levels = [...new Set([degenerate, ...input.levels])].sort((p, q) => p - q);
+  return {
+    kind: "precision",
+    title: input.title,
+    summary: summary(input),
+    axes,
+    contours: levels.map((sigma) => separationContour(input, sigma, axes)),
+    present,
+    grid: separationGrid(input),
+    steps: input.steps,
+    caption: { ...input.caption, notes: notes(labels, present !== null) },
+  };
+}
+
+function separationGrid({ massErrors, radiusErrors, gap, slope }: PrecisionInput): SeparationGrid {
+  const separation = massErrors.map((mass) => radiusErrors.map((radius) => gap / Math.hypot(radius, slope * mass)));
+  return { massErrors, radiusErrors, separation };
+}
+
+function summary({ labels, gap, slope, mass, radius }: PrecisionInput): string {
+  return (
+    `How far apart ${labels[0]} and ${labels[1]} are, in sigma, for a planet of ${formatValue(mass)} Earth masses and ` +
+    `${formatValue(radius)} Earth radii. The two radii differ by ${plainNumber(gap, 3)} % of the planet's; ` +
+    `1 % of the mass changes them by ${plainNumber(slope, 3)} %.`
+  );
+}
+
+function notes([a, b]: readonly [string, string], hasPresent: boolean): string[] {
+  return [
+    "Each line joins the errors that give one separation; the darker the ground, the larger it is. Above and right of the " +
+      `line of ${degenerate} sigma ${a} and ${b} are degenerate: such errors do not tell them apart.`,
+    "Where a line runs level the radius error limits, and a better mass buys nothing; where it falls steeply the mass error does.",
+    ...(hasPresent ? ["The filled circle marks today's errors."] : []),
+  ];
+}
