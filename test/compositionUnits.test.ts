@@ -4,7 +4,7 @@ import { expect, test } from "vitest";
 const unitSuffix = /(KgM3|PerGPa|GPa|Pa|K|SI)$/;
 const dimensionless = ["massFraction", "order", "exponent", "bulkModulusPrime", "bulkModulusPrimeInfinite"];
 
-const files = ["compositions", "compositions/materials"].flatMap((folder) =>
+const files = ["compositions", "compositions/materials", "compositions/families"].flatMap((folder) =>
   readdirSync(folder)
     .filter((name) => name.endsWith(".json"))
     .map((name) => `${folder}/${name}`),

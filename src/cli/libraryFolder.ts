@@ -22,10 +22,13 @@ export async function openLibrary(folder: string | undefined, io: Io): Promise<O
 
 /**
  * The files of a folder laid out like `compositions/`: JSON files and the CSV tables they name, there and in
- * `materials/`. Throws InputError `unreadable`, or `empty-library` if there are none.
+ * `materials/` and `families/`. Throws InputError `unreadable`, or `empty-library` if there are none.
  */
 export async function readLibraryFolder(folder: string, io: Io): Promise<LibraryFile[]> {
-  const paths = [...(await filesIn(folder)), ...(await filesIn(join(folder, "materials"), { mayBeMissing: true }))];
+  const inside = await Promise.all(
+    ["materials", "families"].map((name) => filesIn(join(folder, name), { mayBeMissing: true })),
+  );
+  const paths = [...(await filesIn(folder)), ...inside.flat()];
   const files = await Promise.all(paths.map(async (path) => ({ path, text: await readText(path, io) })));
   if (files.length > 0) return files;
   throw new InputError(

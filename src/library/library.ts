@@ -2,8 +2,10 @@ import type { Material } from "../eos/material.ts";
 import { InputError } from "../errors.ts";
 import { buildMaterial } from "./buildMaterial.ts";
 import type { Composition } from "./composition.ts";
+import type { Family, FamilyComponent } from "./family.ts";
+import { type FamilyFile, familySchema } from "./familySchema.ts";
 import { inFile, unknownName } from "./libraryErrors.ts";
-import { type Entry, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
+import { type Entry, type EntryKind, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
 import { readDensityTable } from "./readDensityTable.ts";
 import { resolveLayers } from "./resolveLayers.ts";
 import { type CompositionFile, compositionSchema, type MaterialFile, materialSchema } from "./schemas.ts";
@@ -16,6 +18,7 @@ const DEFAULT_SURFACE = { pressurePa: 0, temperatureK: 300 };
 export interface Library {
   readonly compositions: readonly Entry[];
   readonly materials: readonly Entry[];
+  readonly families: readonly Entry[];
   /** What a user should know, e.g. that a file of theirs took the place of a shipped one. */
   readonly notes: readonly string[];
   /**
@@ -23,6 +26,8 @@ export interface Library {
    * Throws InputError `unknown-composition`, `composition-cycle`, or any error of the files it is made from.
    */
   composition(name: string): Composition;
+  /** Throws InputError `unknown-family`, or any error of the files it is made from. */
+  family(name: string): Family;
   /** Throws InputError `unknown-material`, or any error of its file. */
   material(name: string): Material;
   /** The form of every phase with its keys, as in the material's file. Throws like `material`. */
@@ -40,8 +45,11 @@ export function loadLibrary(files: readonly LibraryFile[]): Library {
 class FileLibrary implements Library {
   readonly notes: string[] = [];
   private readonly files: ReadonlyMap<string, string>;
-  private readonly compositionEntries = new Map<string, Entry>();
-  private readonly materialEntries = new Map<string, Entry>();
+  private readonly entries = {
+    composition: new Map<string, Entry>(),
+    material: new Map<string, Entry>(),
+    family: new Map<string, Entry>(),
+  };
   private readonly builtCompositions = new Map<string, Composition>();
   private readonly builtMaterials = new Map<string, Material>();
 
@@ -51,11 +59,15 @@ class FileLibrary implements Library {
   }
 
   get compositions(): readonly Entry[] {
-    return [...this.compositionEntries.values()];
+    return [...this.entries.composition.values()];
   }
 
   get materials(): readonly Entry[] {
-    return [...this.materialEntries.values()];
+    return [...this.entries.material.values()];
+  }
+
+  get families(): readonly Entry[] {
+    return [...this.entries.family.values()];
   }
 
   composition(name: string): Composition {
@@ -66,25 +78,42 @@ class FileLibrary implements Library {
     const known = this.builtMaterials.get(name);
     if (known !== undefined) return known;
     const file = this.materialFile(name);
-    const path = this.materialEntry(name).path;
+    const { path } = this.entry("material", name);
     const material = inFile(path, () => buildMaterial(file, (table) => this.table(path, table)));
     this.builtMaterials.set(name, material);
     return material;
+  }
+
+  family(name: string): Family {
+    const { path, content } = this.entry("family", name);
+    const { value: file, problems } = validate(familySchema, path, content);
+    if (problems) throw problems[0];
+    const components = file.components.map((component, k) =>
+      inFile(path, () => this.component(component), `components[${k}]`),
+    );
+    return { name, title: file.title, components, prior: file.prior };
   }
 
   formKeys(name: string): readonly Readonly<Record<string, number | string>>[] {
     return this.materialFile(name).phases.map(({ eos }) => eos);
   }
 
+  private component({ name, material, composition }: FamilyFile["components"][number]): FamilyComponent {
+    return {
+      name,
+      composition: material === undefined ? this.composition(composition as string) : this.pure(material),
+    };
+  }
+
   private materialFile(name: string): MaterialFile {
-    const entry = this.materialEntry(name);
+    const entry = this.entry("material", name);
     const { value, problems } = validate(materialSchema, entry.path, entry.content);
     if (problems) throw problems[0];
     return value;
   }
 
   private add(entry: Entry): void {
-    const entries = entry.kind === "material" ? this.materialEntries : this.compositionEntries;
+    const entries = this.entries[entry.kind];
     const before = entries.get(entry.name);
     if (before !== undefined) {
       this.notes.push(`${entry.kind} "${entry.name}": ${entry.path} takes the place of ${before.path}`);
@@ -92,25 +121,25 @@ class FileLibrary implements Library {
     entries.set(entry.name, entry);
   }
 
-  private materialEntry(name: string): Entry {
-    const entry = this.materialEntries.get(name);
+  private entry(kind: EntryKind, name: string): Entry {
+    const entry = this.entries[kind].get(name);
     if (entry !== undefined) return entry;
-    throw unknownName("material", name, [...this.materialEntries.keys()]);
+    throw unknownName(kind, name, [...this.entries[kind].keys()]);
   }
 
   /** `above` are the compositions being resolved that led here, outermost first. */
   private resolve(name: string, above: readonly string[]): Composition {
     const known = this.builtCompositions.get(name);
     if (known !== undefined) return known;
-    const entry = this.compositionEntries.get(name);
+    const entry = this.entries.composition.get(name);
     const composition = entry === undefined ? this.pure(name) : this.resolveEntry(entry, above);
     this.builtCompositions.set(name, composition);
     return composition;
   }
 
   private pure(name: string): Composition {
-    if (!this.materialEntries.has(name)) {
-      throw unknownName("composition", name, [...this.compositionEntries.keys(), ...this.materialEntries.keys()]);
+    if (!this.entries.material.has(name)) {
+      throw unknownName("composition", name, [...this.entries.composition.keys(), ...this.entries.material.keys()]);
     }
     const material = this.material(name);
     return { name, title: material.title, surface: DEFAULT_SURFACE, layers: [{ name, material, massFraction: 1 }] };

@@ -20,7 +20,7 @@ export function define(command: Command, { io }: CommandContext): void {
 
   command.addHelpText("after", "\nExamples:\n  bulkwright library list\n  bulkwright library show earth-like");
   withFolder(
-    subcommand("list", "names and titles of all compositions and materials", "bulkwright library list"),
+    subcommand("list", "names and titles of all compositions, materials and families", "bulkwright library list"),
   ).action((options: LibraryOptions) => list(options, io));
   withFolder(subcommand("show", "layers, forms, ranges, densities and sources", "bulkwright library show earth-like"))
     .argument("<name>", "of a composition or material")
@@ -43,6 +43,7 @@ async function show(name: string, options: LibraryOptions, io: Io): Promise<void
 async function check(folder: string, io: Io): Promise<void> {
   const files = await readLibraryFolder(folder, io);
   const problems = checkLibrary(files, shippedFiles);
-  if (problems.length === 0) io.out(escapeControls(`No problem found in ${files.map(({ path }) => path).join(", ")}\n`));
+  if (problems.length === 0)
+    io.out(escapeControls(`No problem found in ${files.map(({ path }) => path).join(", ")}\n`));
   else throw new InputError("library-problems", problems.map(({ message }) => message).join("\n"), { file: folder });
 }
