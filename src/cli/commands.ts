@@ -15,6 +15,11 @@ export const commands: readonly CommandEntry[] = [
     load: () => import("./commands/profile.ts"),
   },
   { name: "classify", summary: "what measured planets can be made of", load: () => import("./commands/classify.ts") },
+  {
+    name: "precision",
+    summary: "what to measure next, and how well",
+    load: () => import("./commands/precision.ts"),
+  },
   { name: "library", summary: "the compositions and materials at hand", load: () => import("./commands/library.ts") },
   { name: "demo", summary: "classify an invented survey and draw it", load: () => import("./commands/demo.ts") },
 ];

@@ -1,6 +1,6 @@
 import type { PlanetRow } from "../planets/quantity.ts";
 import { EARTH_MASS } from "../units/constants.ts";
-import { geometricMasses } from "./numberOptions.ts";
+import { geometricPoints } from "./numberOptions.ts";
 
 /** What the curves of a figure span without planets, and what the solver can do [Earth masses]. */
 const usual = { lightest: 0.1, heaviest: 20 };
@@ -15,5 +15,5 @@ export function figureMasses(rows: readonly PlanetRow[]): number[] {
     if (mass < lightest) lightest = Math.max(mass, possible.lightest);
     if (mass > heaviest) heaviest = Math.min(mass, possible.heaviest);
   }
-  return geometricMasses(lightest, heaviest, Math.ceil(pointsPerDecade * Math.log10(heaviest / lightest)));
+  return geometricPoints(lightest, heaviest, Math.ceil(pointsPerDecade * Math.log10(heaviest / lightest)));
 }

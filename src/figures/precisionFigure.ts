@@ -34,7 +34,7 @@ export function precisionFigure(input: PrecisionInput): PrecisionSpec {
     present,
     grid: separationGrid(input),
     steps: input.steps,
-    caption: { ...input.caption, notes: notes(labels, present !== null) },
+    caption: { ...input.caption, notes: [...notes(labels, present !== null), ...input.caption.notes] },
   };
 }
 

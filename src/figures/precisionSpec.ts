@@ -59,5 +59,6 @@ export interface PrecisionInput {
   readonly radiusErrors: readonly number[];
   readonly levels: readonly number[];
   readonly steps: PrecisionSpec["steps"];
-  readonly caption: Omit<FigureCaption, "notes">;
+  /** Its notes come after those on how the map is read. */
+  readonly caption: FigureCaption;
 }

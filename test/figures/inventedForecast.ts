@@ -27,6 +27,7 @@ export const inventedForecast: PrecisionInput = {
   },
   caption: {
     warnings: [],
+    notes: [],
     compositions: [],
     sources: inventedSurvey.sources,
     earthRadius: "1 Earth radius = 6378.1 km",

@@ -1,5 +1,5 @@
 import type { Measurement } from "../measurement.ts";
-import { errorSizes } from "./plannedMeasurement.ts";
+import { errorSizes, isMeasured } from "./plannedMeasurement.ts";
 import { requiredMassError, requiredRadiusError, requiredTogether } from "./requiredErrors.ts";
 import type { Contrast, ErrorSizes } from "./separation.ts";
 
@@ -19,8 +19,8 @@ export interface ImprovementStep {
 const IMPROVED: readonly Improved[] = ["mass", "radius", "both"];
 
 /**
- * Today's errors, halved ones, and for each level of sigma those that just reach it: each alone with the other as it is,
- * and both together in the proportion `massPerRadius`, relative mass error over relative radius error.
+ * Today's errors; halved ones, if both are there; and for each level of sigma those that just reach it: each alone with
+ * the other as it is, and both together in the proportion `massPerRadius`, relative mass error over relative radius error.
  */
 export function improvementSteps(
   present: Measurement,
@@ -42,7 +42,8 @@ export function improvementSteps(
   const halved = IMPROVED.map(
     (improved): ImprovementStep => ({ kind: "halved", improved, errors: halve(now, improved) }),
   );
-  return [{ kind: "now", errors: now }, ...halved, ...levels.flatMap(required)];
+  const isWhole = isMeasured(present.mass) && isMeasured(present.radius);
+  return [{ kind: "now", errors: now }, ...(isWhole ? halved : []), ...levels.flatMap(required)];
 }
 
 /** The proportion of the present relative errors, and 3 where one is missing: both then blur the density alike. */

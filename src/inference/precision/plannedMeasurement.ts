@@ -1,4 +1,4 @@
-import type { RadiusCurve } from "../../curve/radiusCurve.ts";
+import type { MassRange, RadiusCurve } from "../../curve/radiusCurve.ts";
 import { InputError } from "../../errors.ts";
 import { EARTH_MASS } from "../../units/constants.ts";
 import type { Measurement } from "../measurement.ts";
@@ -12,22 +12,16 @@ export interface KnownQuantities {
 }
 
 /**
- * The measurement to improve. A quantity that is missing gets the value it has on `curve`, the composition supposed, and
- * an infinite error. Throws InputError `nothing-known`, `radius-beyond-models` or `mass-beyond-models`.
+ * The measurement to improve. A quantity that is missing gets the value it has for composition `a`, and an infinite error.
+ * Throws InputError `nothing-known`, `radius-beyond-models`, or `mass-beyond-models` for a mass outside `range`.
  */
-export function presentMeasurement({ mass, radius }: KnownQuantities, curve: RadiusCurve): Measurement {
-  if (mass !== undefined) {
-    checkMass(mass.mode, curve);
-    return { mass, radius: radius ?? unmeasured(curve.radius(mass.mode)) };
-  }
-  if (radius === undefined)
-    throw new InputError("nothing-known", "Neither mass nor radius is given. Give at least one.");
-  const supposed = curve.massWithRadius(radius.mode);
-  if (supposed !== undefined) return { mass: unmeasured(supposed), radius };
-  throw new InputError(
-    "radius-beyond-models",
-    `No planet of the first composition has a radius of ${(radius.mode / 1e3).toPrecision(5)} km. Give the mass too.`,
-  );
+export function presentMeasurement(
+  { mass, radius }: KnownQuantities,
+  { a, range }: { readonly a: RadiusCurve; readonly range: MassRange },
+): Measurement {
+  const value = mass?.mode ?? massFromRadius(radius, a);
+  if (!(value >= range.lightest && value <= range.heaviest)) throw massBeyondModels(value, range);
+  return { mass: mass ?? unmeasured(value), radius: radius ?? unmeasured(a.radius(value)) };
 }
 
 export function isMeasured({ minus, plus }: SplitNormal): boolean {
@@ -54,11 +48,21 @@ function unmeasured(value: number): SplitNormal {
   return { mode: value, minus: Number.POSITIVE_INFINITY, plus: Number.POSITIVE_INFINITY };
 }
 
-function checkMass(mass: number, { lightest, heaviest }: RadiusCurve): void {
-  if (mass >= lightest && mass <= heaviest) return;
-  const [value, low, high] = [mass, lightest, heaviest].map((m) => (m / EARTH_MASS).toPrecision(4));
+function massFromRadius(radius: SplitNormal | undefined, a: RadiusCurve): number {
+  if (radius === undefined)
+    throw new InputError("nothing-known", "Neither mass nor radius is given. Give at least one.");
+  const mass = a.massWithRadius(radius.mode);
+  if (mass !== undefined) return mass;
   throw new InputError(
+    "radius-beyond-models",
+    `No planet of the first composition has a radius of ${(radius.mode / 1e3).toPrecision(5)} km. Give the mass too.`,
+  );
+}
+
+function massBeyondModels(mass: number, { lightest, heaviest }: MassRange): InputError {
+  const [value, low, high] = [mass, lightest, heaviest].map((m) => (m / EARTH_MASS).toPrecision(4));
+  return new InputError(
     "mass-beyond-models",
-    `A mass of ${value} Earth masses is outside the first composition's curve, ${low} to ${high} Earth masses.`,
+    `A mass of ${value} Earth masses is outside the compositions' common range, ${low} to ${high} Earth masses.`,
   );
 }

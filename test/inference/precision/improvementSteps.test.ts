@@ -8,9 +8,10 @@ import {
 } from "../../../src/inference/precision/plannedMeasurement.ts";
 import { separation } from "../../../src/inference/precision/separation.ts";
 import { thrownBy } from "../../support/thrownBy.ts";
-import { measurement, powerLaw, quoted } from "../powerLaws.ts";
+import { measurement, powerLaw, quoted, range } from "../powerLaws.ts";
 
 const contrast = { gap: 0.1, slope: 0.05 };
+const on = (a: number) => ({ a: powerLaw(a), range });
 const present = measurement(quoted(5, 1), quoted(1.6, 0.04));
 
 describe("improvementSteps", () => {
@@ -52,27 +53,27 @@ describe("improvementSteps", () => {
 
   test("keep today's proportion of the relative errors, 3 where one of them is missing", () => {
     expect(presentProportion(present)).toBeCloseTo(0.2 / 0.025, 12);
-    expect(presentProportion(presentMeasurement({ mass: quoted(5, 1) }, powerLaw(1)))).toBe(3);
+    expect(presentProportion(presentMeasurement({ mass: quoted(5, 1) }, on(1)))).toBe(3);
   });
 });
 
 describe("presentMeasurement", () => {
   test("takes what is missing from the curve, with no error to rely on", () => {
-    const massAlone = presentMeasurement({ mass: quoted(5, 1) }, powerLaw(1.1));
+    const massAlone = presentMeasurement({ mass: quoted(5, 1) }, on(1.1));
     expect(massAlone.radius.mode).toBeCloseTo(1.1 * 5 ** 0.27, 12);
     expect(isMeasured(massAlone.radius)).toBe(false);
-    const radiusAlone = presentMeasurement({ radius: quoted(1.6, 0.1) }, powerLaw(1.1));
+    const radiusAlone = presentMeasurement({ radius: quoted(1.6, 0.1) }, on(1.1));
     expect(radiusAlone.mass.mode).toBeCloseTo((1.6 / 1.1) ** (1 / 0.27), 12);
     expect(isMeasured(radiusAlone.mass)).toBe(false);
   });
 
   test("refuses what no planet of the curve has", () => {
-    expect(thrownBy(() => presentMeasurement({}, powerLaw(1)))).toMatchObject({ code: "nothing-known" });
-    expect(thrownBy(() => presentMeasurement({ mass: quoted(2e3, 1) }, powerLaw(1)))).toMatchObject({
+    expect(thrownBy(() => presentMeasurement({}, on(1)))).toMatchObject({ code: "nothing-known" });
+    expect(thrownBy(() => presentMeasurement({ mass: quoted(2e3, 1) }, on(1)))).toMatchObject({
       code: "mass-beyond-models",
     });
     const flat = { ...powerLaw(1), massWithRadius: () => undefined };
-    expect(thrownBy(() => presentMeasurement({ radius: quoted(9, 1) }, flat))).toMatchObject({
+    expect(thrownBy(() => presentMeasurement({ radius: quoted(9, 1) }, { a: flat, range }))).toMatchObject({
       code: "radius-beyond-models",
     });
   });
