@@ -1,5 +1,3 @@
-import { readFileSync } from "node:fs";
-import { createRequire } from "node:module";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { massRadiusFigure } from "../../src/figures/massRadiusFigure.ts";
@@ -8,6 +6,7 @@ import { visibleText } from "../../src/figures/visibleText.ts";
 import { hostileNames, hostileSurvey, inventedSurvey } from "../figures/inventedSurvey.ts";
 import { findBrowser, launchBrowser, type OpenPage, openPage } from "./openPage.ts";
 import { plotlySource } from "./plotlySource.ts";
+import { seriousFaults } from "./seriousFaults.ts";
 
 const executable = findBrowser();
 
@@ -138,18 +137,6 @@ async function hoverEveryPlanet(): Promise<string[]> {
     shown.push(diagram.querySelector(".hovertext .line")?.textContent ?? "");
   }
   return shown;
-}
-
-/** Rules that axe-core, the reference implementation of accessibility checks, rates serious or critical. */
-async function seriousFaults(page: Page): Promise<string[]> {
-  const axe = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
-  await page.evaluate(axe);
-  return page.evaluate(async () => {
-    const { violations } = await (globalThis as unknown as { axe: typeof import("axe-core") }).axe.run();
-    return violations
-      .filter(({ impact }) => impact === "serious" || impact === "critical")
-      .map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html.slice(0, 120)).join(" | ")}`);
-  });
 }
 
 const boxes = (page: Page, selector: string): Promise<DOMRect[]> =>
