@@ -26,7 +26,7 @@ export function planetWarnings(present: Measurement, steps: readonly StepForecas
     ...(isDegenerate ? [stepStatement(now, 0, labels)] : []),
     ...(steps.some(isNonlinear)
       ? [
-          "separation_sigma is off by more than 10 % in places, as the curves bend within the mass error or differ in slope; go by separation_sigma_nonlinear there",
+          "separation_sigma, and a map of it, is off by more than 10 % in places, as the curves bend within the mass error or differ in slope; go by separation_sigma_nonlinear there",
         ]
       : []),
   ];

@@ -53,8 +53,8 @@ export async function precisionPage(
     levels: part.levels,
     steps: figureSteps(part.steps),
     caption: {
-      warnings: part.warnings,
-      notes: part.notes,
+      warnings: part.warnings.map(sentence),
+      notes: part.notes.map(sentence),
       compositions: compositions.map(({ name, title, layers }) => ({ name, title, layers: layersInWords(layers) })),
       sources: sourcesOf(compositions),
       earthRadius: `1 Earth radius = ${run.earthRadius.value / 1e3} km`,
@@ -87,4 +87,8 @@ function figureSteps({ columns, rows }: Table) {
     columns: columns.map((column) => ({ title: column.replaceAll("_", " ") })),
     rows: rows.map((row) => row.map((cell): FigureValue => cell ?? null)),
   };
+}
+
+function sentence(note: string): string {
+  return `${note.charAt(0).toUpperCase()}${note.slice(1)}.`;
 }

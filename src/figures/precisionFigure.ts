@@ -1,6 +1,6 @@
 import { formatValue, plainNumber } from "./formatValue.ts";
 import { logRange } from "./logRange.ts";
-import type { PrecisionInput, PrecisionSpec, SeparationGrid } from "./precisionSpec.ts";
+import type { PrecisionInput, PrecisionSpec, SeparationContour, SeparationGrid } from "./precisionSpec.ts";
 import { separationContour } from "./separationContour.ts";
 
 /** From this separation down, in sigma, two compositions are degenerate; always drawn. */
@@ -25,16 +25,17 @@ export function precisionFigure(input: PrecisionInput): PrecisionSpec {
     },
   };
   const levels = [...new Set([degenerate, ...input.levels])].sort((p, q) => p - q);
+  const contours = levels.map((sigma) => separationContour(input, sigma, axes));
   return {
     kind: "precision",
     title: input.title,
     summary: summary(input),
     axes,
-    contours: levels.map((sigma) => separationContour(input, sigma, axes)),
+    contours,
     present,
     grid: separationGrid(input),
     steps: input.steps,
-    caption: { ...input.caption, notes: [...notes(labels, present !== null), ...input.caption.notes] },
+    caption: { ...input.caption, notes: [...readingNotes(labels, contours, present !== null), ...input.caption.notes] },
   };
 }
 
@@ -51,11 +52,24 @@ function summary({ labels, gap, slope, mass, radius }: PrecisionInput): string {
   );
 }
 
-function notes([a, b]: readonly [string, string], hasPresent: boolean): string[] {
+function readingNotes(
+  labels: PrecisionInput["labels"],
+  contours: readonly SeparationContour[],
+  hasPresent: boolean,
+): string[] {
   return [
-    "Each line joins the errors that give one separation; the darker the ground, the larger it is. Above and right of the " +
-      `line of ${degenerate} sigma ${a} and ${b} are degenerate: such errors do not tell them apart.`,
+    "Each line joins the errors that give one separation; the stronger the shading, the larger it is. " +
+      degeneracyNote(labels, contours),
     "Where a line runs level the radius error limits, and a better mass buys nothing; where it falls steeply the mass error does.",
     ...(hasPresent ? ["The filled circle marks today's errors."] : []),
   ];
+}
+
+function degeneracyNote([a, b]: PrecisionInput["labels"], contours: readonly SeparationContour[]): string {
+  const boundary = contours.find(({ sigma }) => sigma === degenerate);
+  const meaning = `${a} and ${b} are degenerate: such errors do not tell them apart.`;
+  if (boundary && boundary.line.length > 0) return `Above and right of the line of ${boundary.label} ${meaning}`;
+  if (boundary && boundary.region.length > 0)
+    return `All errors of this map separate the two by more than ${boundary.label}.`;
+  return `On all of this map ${meaning}`;
 }

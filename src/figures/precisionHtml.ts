@@ -1,5 +1,6 @@
 import { compactHeight, type DiagramAxes, diagramLayout, type PlotlyLayout, wideHeight } from "./diagramLayout.ts";
 import { figurePage } from "./figurePage.ts";
+import type { LogAxis } from "./figureSpec.ts";
 import { plotlyText } from "./plotlyText.ts";
 import type { ErrorPair, PrecisionSpec, SeparationContour } from "./precisionSpec.ts";
 import { gridTable, stepTable } from "./precisionTables.ts";
@@ -45,7 +46,7 @@ function layout(spec: PrecisionSpec, plot: { width: number; height: number }): P
   const labels = spec.contours.filter(({ line }) => line.length > 0).map(contourLabel);
   return {
     ...diagramLayout(axes, plot),
-    annotations: [...labels, ...(spec.present ? [presentLabel(spec.present)] : [])],
+    annotations: [...labels, ...(spec.present ? [presentLabel(spec.present, axes.x)] : [])],
   };
 }
 
@@ -59,8 +60,11 @@ function contourLabel({ label, line }: SeparationContour): PlotlyLayout {
   };
 }
 
-function presentLabel(present: ErrorPair): PlotlyLayout {
-  return { ...placed(present), text: "today", xanchor: "left", xshift: 10, bgcolor: "var(--paper)", borderpad: 1 };
+/** Beside the mark, on the side where there is room. */
+function presentLabel(present: ErrorPair, { range: [left, right] }: LogAxis): PlotlyLayout {
+  const side =
+    present.massError ** 2 < left * right ? { xanchor: "left", xshift: 10 } : { xanchor: "right", xshift: -10 };
+  return { ...placed(present), ...side, text: "today", bgcolor: "var(--paper)", borderpad: 1 };
 }
 
 function placed({ massError, radiusError }: ErrorPair): PlotlyLayout {

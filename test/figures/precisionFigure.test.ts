@@ -40,6 +40,14 @@ describe("precisionFigure", () => {
     expect(far.map(({ line, region }) => [line.length, region.length])).toEqual(Array(4).fill([0, 4]));
   });
 
+  it.each([
+    [0.3, "On all of this map fudge and toffee are degenerate"],
+    [10, "Above and right of the line of 1 sigma fudge and toffee are degenerate"],
+    [1000, "All errors of this map separate the two by more than 1 sigma"],
+  ])("says where a gap of %d %% is degenerate", (gap, words) => {
+    expect(precisionFigure({ ...inventedForecast, gap }).caption.notes[0]).toContain(words);
+  });
+
   it("holds the same separations as numbers", () => {
     expectClose(spec.grid.separation[2][1], 10 / Math.SQRT2, { rel: 1e-14, because: "round-off" });
     expect(spec.grid.separation.map((row) => row.length)).toEqual(Array(6).fill(6));
