@@ -14,9 +14,13 @@ export interface OpenLibrary {
   readonly inputs: readonly string[];
 }
 
-/** The shipped compositions and materials with those of a folder, if one is given; the folder's win. */
-export async function openLibrary(folder: string | undefined, io: Io): Promise<OpenLibrary> {
-  const own = folder === undefined ? [] : await readLibraryFolder(folder, io);
+/** The shipped compositions, materials and families with those of a folder, if one is given, and `more` files; the later win. */
+export async function openLibrary(
+  folder: string | undefined,
+  io: Io,
+  more: readonly LibraryFile[] = [],
+): Promise<OpenLibrary> {
+  const own = [...(folder === undefined ? [] : await readLibraryFolder(folder, io)), ...more];
   return { library: loadLibrary([...shippedFiles, ...own]), inputs: own.map(({ path }) => path) };
 }
 
