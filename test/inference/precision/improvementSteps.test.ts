@@ -51,6 +51,12 @@ describe("improvementSteps", () => {
     expect(separation(contrast, both)).toBeCloseTo(3, 12);
   });
 
+  test("halve only what is measured", () => {
+    const radiusAlone = presentMeasurement({ radius: quoted(1.6, 0.04) }, on(1.1));
+    const kinds = improvementSteps(radiusAlone, contrast, [2], 3).map(({ kind }) => kind);
+    expect(kinds).toEqual(["now", "required", "required", "required"]);
+  });
+
   test("keep today's proportion of the relative errors, 3 where one of them is missing", () => {
     expect(presentProportion(present)).toBeCloseTo(0.2 / 0.025, 12);
     expect(presentProportion(presentMeasurement({ mass: quoted(5, 1) }, on(1)))).toBe(3);

@@ -33,6 +33,11 @@ describe("planetWorth", () => {
       radius: quantity(1, { minus: 0.1, plus: 0.1 }),
     });
     expect(planetWorth(heavy, models, ["mass"])).toEqual({ row: heavy, reasons: ["mass-beyond-models"] });
+    const blurred = rowWith({
+      mass: quantity(500, { minus: 300, plus: 300 }),
+      radius: quantity(1, { minus: 0.1, plus: 0.1 }),
+    });
+    expect(planetWorth(blurred, models, ["mass"])).toMatchObject({ reasons: ["mass-beyond-models"] });
   });
 });
 
