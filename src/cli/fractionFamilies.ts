@@ -18,7 +18,7 @@ const families = {
     parts: ["iron", "silicate"],
     make: innerFractionFamily,
   },
-  "water-on-earth-like": {
+  "earth-like-water": {
     title: "water mass fraction, if on an Earth-like interior",
     column: "water_mass_fraction",
     parts: ["earth-like", "water"],

@@ -155,7 +155,7 @@ Invented d,,,,1.38,0.05,0.05,Three
       "--halve",
       "both",
       "--family",
-      "water-on-earth-like",
+      "earth-like-water",
     ];
     const { out } = await runCommand([...args, "--format", "json"], { stdin: list });
     const { rows } = JSON.parse(out);
