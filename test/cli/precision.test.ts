@@ -147,16 +147,7 @@ Invented d,,,,1.38,0.05,0.05,Three
   });
 
   test("ranks by the error and the family asked for", async () => {
-    const args = [
-      "precision",
-      "-",
-      "--between",
-      "silicate,water",
-      "--halve",
-      "both",
-      "--family",
-      "earth-like-water",
-    ];
+    const args = ["precision", "-", "--between", "silicate,water", "--halve", "both", "--family", "earth-like-water"];
     const { out } = await runCommand([...args, "--format", "json"], { stdin: list });
     const { rows } = JSON.parse(out);
     expect(rows.map(({ halve }: { halve: string }) => halve)).toEqual(["both", "both", null]);
