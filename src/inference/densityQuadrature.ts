@@ -40,17 +40,36 @@ export function densityQuadrature(
 
 /** The `logIntegral` of `densityQuadrature` alone, for inner loops. */
 export function logIntegral(logDensity: (x: number) => number, edges: readonly number[], rule = DEFAULT_RULE): number {
+  return logIntegralAndMean(logDensity, edges, () => 0, rule).logIntegral;
+}
+
+/** The same with ln of the mean, weighted by the density, of something given by its logarithm at the x last asked for. */
+export function logIntegralAndMean(
+  logDensity: (x: number) => number,
+  edges: readonly number[],
+  logOf: (x: number, logDensity: number) => number,
+  { nodes, weights } = DEFAULT_RULE,
+): { logIntegral: number; logMean: number } {
   const { panels, peak } = resolvedPanels(logDensity, edges);
   let total = 0;
+  let moment = 0;
+  let scale = Number.NEGATIVE_INFINITY;
   for (const { from, to } of panels) {
     const half = (to - from) / 2;
-    let sum = 0;
-    for (let i = 0; i < rule.nodes.length; i++) {
-      sum += rule.weights[i] * Math.exp(logDensity(from + half * (1 + rule.nodes[i])) - peak);
+    for (let i = 0; i < nodes.length; i++) {
+      const x = from + half * (1 + nodes[i]);
+      const log = logDensity(x);
+      const probability = half * weights[i] * Math.exp(log - peak);
+      const logValue = logOf(x, log);
+      if (logValue > scale) {
+        moment *= Math.exp(scale - logValue);
+        scale = logValue;
+      }
+      total += probability;
+      moment += probability * Math.exp(logValue - scale);
     }
-    total += half * sum;
   }
-  return peak + Math.log(total);
+  return { logIntegral: peak + Math.log(total), logMean: scale + Math.log(moment / total) };
 }
 
 function resolvedPanels(
