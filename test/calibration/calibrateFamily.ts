@@ -8,9 +8,9 @@ import { familyModel } from "../../src/inference/composition/familyModel.ts";
 import type { PlanetLikelihood } from "../../src/inference/composition/likelihood.ts";
 import { measuredLikelihood } from "../../src/inference/composition/measuredLikelihood.ts";
 import { marginal } from "../../src/inference/composition/simplexIntegral.ts";
+import { FINE } from "../../src/inference/densityQuadrature.ts";
 import { solvePlanet } from "../../src/interior/solvePlanet.ts";
 import { type Family, familyMember } from "../../src/library/family.ts";
-import { gaussLegendre } from "../../src/numerics/gaussLegendre.ts";
 import { EARTH_MASS, EARTH_RADIUS } from "../../src/units/constants.ts";
 import { type RandomNumbers, randomNumbers } from "../support/randomNumbers.ts";
 import { drawFractions } from "./drawFractions.ts";
@@ -23,7 +23,6 @@ const MASSES: MassRange = { lightest: 2 * EARTH_MASS, heaviest: 16 * EARTH_MASS 
 /** Errors are drawn log-uniformly between these: from the best measured planets to hardly measured ones. */
 const MASS_ERRORS = [0.1 * EARTH_MASS, 0.5 * EARTH_MASS] as const;
 const RADIUS_ERRORS = [0.02 * EARTH_RADIUS, 0.2 * EARTH_RADIUS] as const;
-const RULE = gaussLegendre(10);
 /** Pieces of a panel between which a marginal distribution is cubic. */
 const PIECES = 16;
 
@@ -101,7 +100,7 @@ function rankedTruth(truth: number, k: number, posterior: CompositionPosterior, 
     logDensity: (fractions: ArrayLike<number>) => posterior.logDensity(fractions) - logPrior(prior, fractions),
     logWeight: () => 0,
   };
-  const { density, coordinate } = marginal(likelihood, prior, k, RULE);
+  const { density, coordinate } = marginal(likelihood, prior, k, FINE);
   const distribution = new Distribution(density.tabulated(PIECES));
   const { within68, within95 } = posterior.fractions[k];
   return {
