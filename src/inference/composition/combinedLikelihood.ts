@@ -1,4 +1,5 @@
 import type { MassRange, RadiusCurve } from "../../curve/radiusCurve.ts";
+import { normalBelow } from "../normal.ts";
 import { atDeviation, deviation, type SplitNormal } from "../splitNormal.ts";
 import type { PlanetLikelihood } from "./likelihood.ts";
 import { minimumMassLikelihood } from "./minimumMassLikelihood.ts";
@@ -29,10 +30,13 @@ interface Term {
 }
 
 const FARTHEST = 9;
+/** Of a limit, relative. */
+const LIMIT_WIDTH = 0.01;
 
 /**
  * Likelihood of a planet's mass, radius and bulk density, whichever are given, independent of each other:
- *   measured  split-normal        limit  1 on the allowed side, 0 beyond: the limit is taken at its word
+ *   measured  split-normal
+ *   limit     probability that a measurement with an error of 1 % of the limit falls on its allowed side: nearly a step
  *   minimum   M sin i split-normal with cos i uniform (orbits in all directions alike), i integrated out
  * Checked test/inference/composition/combinedLikelihood.test.ts
  */
@@ -81,19 +85,26 @@ function termOf(datum: Datum | undefined): Term {
       isMeasured: true,
     };
   }
+  const width = LIMIT_WIDTH * datum.limit;
   const isUpper = datum.kind === "upper-limit";
   return {
     ...unknown,
-    log: (x) => ((isUpper ? x <= datum.limit : x >= datum.limit) ? 0 : Number.NEGATIVE_INFINITY),
-    lowest: isUpper ? 0 : datum.limit,
-    highest: isUpper ? datum.limit : Number.POSITIVE_INFINITY,
-    bends: [datum.limit],
+    log: (x) => logNormalBelow((isUpper ? datum.limit - x : x - datum.limit) / width),
+    lowest: isUpper ? 0 : datum.limit - FARTHEST * width,
+    highest: isUpper ? datum.limit + FARTHEST * width : Number.POSITIVE_INFINITY,
+    bends: [-2, 0, 2].map((k) => datum.limit + k * width),
   };
 }
 
 function minimumTerm(value: SplitNormal): Term {
   const { log, bends } = minimumMassLikelihood(value);
   return { log, lowest: atDeviation(value, -FARTHEST), highest: Number.POSITIVE_INFINITY, bends, isMeasured: true };
+}
+
+/** ln of the probability that a standard normal variable lies below z, also where that leaves the double range. */
+function logNormalBelow(z: number): number {
+  // The asymptotic form is right to 1/z².
+  return z > -30 ? Math.log(normalBelow(z)) : -0.5 * z * z - Math.log(-z * Math.sqrt(2 * Math.PI));
 }
 
 function bulkDensity(mass: number, radius: number): number {

@@ -1,6 +1,6 @@
 import type { CompositionTable } from "../../curve/familyTable.ts";
 import type { MassRange } from "../../curve/radiusCurve.ts";
-import { gaussLegendre } from "../../numerics/gaussLegendre.ts";
+import { COARSE, FINE } from "../densityQuadrature.ts";
 import { type CompositionPrior, logPrior } from "./compositionPrior.ts";
 import { type FractionSummary, fractionSummary } from "./distribution.ts";
 import type { MassPrior, PlanetLikelihood } from "./likelihood.ts";
@@ -39,14 +39,13 @@ export interface CompositionPosterior {
 
 export interface PosteriorOptions {
   readonly massPrior?: MassPrior;
-  /** Of ln L between the places where it is integrated; quantiles are met to about a tenth of it. */
+  /** Of the deviation √(-2 ln L) between the places where it is known; quantiles are met to about a hundredth of it. */
   readonly tolerance?: number;
 }
 
-/** Nodes of a panel for tolerances below `FINE` and above. */
-const FINE_RULE = gaussLegendre(10);
-const COARSE_RULE = gaussLegendre(7);
-const FINE = 1e-4;
+const DEFAULT_TOLERANCE = 1e-2;
+/** From this tolerance on the coarser quadrature will do. */
+const COARSE_FROM = 1e-3;
 
 /**
  * The posterior of a family's mass fractions f and a planet's mass M, integrated over M in `range`:
@@ -60,17 +59,17 @@ export function compositionPosterior(
   data: PlanetLikelihood,
   family: FamilyModel,
   range: MassRange,
-  { massPrior = "flat", tolerance = 1e-3 }: PosteriorOptions = {},
+  { massPrior = "flat", tolerance = DEFAULT_TOLERANCE }: PosteriorOptions = {},
 ): CompositionPosterior | undefined {
   const window = data.massWindow(range);
   if (!(window.lightest < window.heaviest)) return undefined;
   const { table, prior } = family;
-  const rule = tolerance < FINE ? FINE_RULE : COARSE_RULE;
-  const fit = (fractions: ArrayLike<number>) =>
-    massIntegral(data, table.member(fractions, window), window, massPrior, rule);
+  const how = tolerance < COARSE_FROM ? FINE : COARSE;
+  const fitOf = (fractions: ArrayLike<number>) =>
+    massIntegral(data, table.member(fractions, window), window, massPrior, how);
   const unit = logBestIntegral(data, window, massPrior) + family.logPriorIntegral;
   if (table.componentCount === 1) {
-    const { logLikelihood, logWorse } = fit([1]);
+    const { logLikelihood, logWorse } = fitOf([1]);
     const only = { median: 1, mean: 1, within68: { lower: 1, upper: 1 }, within95: { lower: 1, upper: 1 } };
     return {
       fractions: [only],
@@ -79,9 +78,9 @@ export function compositionPosterior(
       logDensity: () => 0,
     };
   }
-  const surface = new LikelihoodSurface(table.componentCount, fit, tolerance);
+  const surface = new LikelihoodSurface(table.componentCount, fitOf, tolerance);
   const marginals = family.components.map((_, k) =>
-    marginal(k === 0 ? surface : withoutWeight(surface), prior, k, rule),
+    marginal(k === 0 ? surface : withoutWeight(surface), prior, k, how),
   );
   const [{ density, logMeanWeight }] = marginals;
   return {
@@ -95,7 +94,7 @@ export function compositionPosterior(
 /** ln of the integral of a prior over all fractions. */
 export function logPriorIntegral(prior: CompositionPrior): number {
   if (prior.componentCount === 1) return 0;
-  return marginal({ logDensity: () => 0, logWeight: () => 0 }, prior, 0, FINE_RULE).density.logIntegral;
+  return marginal({ logDensity: () => 0, logWeight: () => 0 }, prior, 0, FINE).density.logIntegral;
 }
 
 function withoutWeight(density: FractionDensity): FractionDensity {

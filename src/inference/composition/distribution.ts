@@ -28,7 +28,9 @@ export function fractionSummary({ density, coordinate }: Marginal): FractionSumm
     return { lower: fractionAt(lower), upper: fractionAt(upper) };
   };
   let mean = 0;
-  density.nodes.forEach((x, i) => void (mean += density.probabilities[i] * fractionAt(x)));
+  density.nodes.forEach((x, i) => {
+    mean += density.probabilities[i] * fractionAt(x);
+  });
   return {
     median: fractionAt(known.quantile(0.5)),
     mean,

@@ -11,6 +11,8 @@ const STEPS = DEGREE * 2 ** 16;
 const SMALLEST = 2 ** 3;
 /** First cells along each angle. */
 const FIRST_CELLS = 2;
+/** Cells are left as they are once there are so many. */
+const MOST_CELLS = 4000;
 /** ln L below the peak of which nothing matters. */
 const NEGLIGIBLE = 21;
 
@@ -70,8 +72,9 @@ export class LikelihoodSurface implements FractionDensity {
     const spacing = new Array<number>(dimensions).fill(STEPS / DEGREE / FIRST_CELLS);
     let open = firstOrigins(dimensions).map((origin) => this.cell(origin, spacing));
     while (open.length > 0) {
+      const isFull = this.cells.length + open.length > MOST_CELLS;
       open = open.flatMap((cell) => {
-        const axis = this.worstAxis(cell, tolerance);
+        const axis = isFull ? undefined : this.worstAxis(cell, tolerance);
         if (axis === undefined) {
           this.cells.push(cell);
           return [];
@@ -169,9 +172,15 @@ export class LikelihoodSurface implements FractionDensity {
       const w = d * NODES;
       count /= NODES;
       for (let n = 0; n < count; n++) {
-        let sum = 0;
-        for (let k = 0; k < NODES; k++) sum += weights[w + k] * from[n * NODES + k];
-        scratch[n] = sum;
+        const at = n * NODES;
+        scratch[n] =
+          weights[w] * from[at] +
+          weights[w + 1] * from[at + 1] +
+          weights[w + 2] * from[at + 2] +
+          weights[w + 3] * from[at + 3] +
+          weights[w + 4] * from[at + 4] +
+          weights[w + 5] * from[at + 5] +
+          weights[w + 6] * from[at + 6];
       }
       from = scratch;
     }
@@ -200,17 +209,17 @@ function contains({ origin, spacing }: Cell, steps: ArrayLike<number>): boolean 
   return true;
 }
 
-const DENOMINATORS = Array.from({ length: NODES }, (_, k) => {
+const SCALES = Float64Array.from({ length: NODES }, (_, k) => {
   let product = 1;
   for (let j = 0; j < NODES; j++) if (j !== k) product *= k - j;
-  return product;
+  return 1 / product;
 });
 
 /** Weights of the nodes 0…DEGREE in the polynomial through them, at u. */
 function lagrange(u: number, weights: Float64Array, at: number): void {
   let before = 1;
   for (let k = 0; k < NODES; k++) {
-    weights[at + k] = before / DENOMINATORS[k];
+    weights[at + k] = before * SCALES[k];
     before *= u - k;
   }
   let after = 1;

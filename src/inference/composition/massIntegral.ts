@@ -1,6 +1,5 @@
 import type { MassRange, RadiusCurve } from "../../curve/radiusCurve.ts";
-import type { QuadratureRule } from "../../numerics/gaussLegendre.ts";
-import { logIntegral, logIntegralAndMean } from "../densityQuadrature.ts";
+import { logIntegral, logIntegralAndMean, type Quadrature } from "../densityQuadrature.ts";
 import { logChiSquareAbove } from "./chiSquare.ts";
 import { logMassPrior, type MassPrior, type PlanetLikelihood } from "./likelihood.ts";
 
@@ -18,14 +17,14 @@ export function massIntegral(
   curve: RadiusCurve,
   window: MassRange,
   prior: MassPrior,
-  rule: QuadratureRule,
+  how: Quadrature,
 ): Fit {
   const edges = edgesWithin(window, data.kinks(curve));
   const { logIntegral: logLikelihood, logMean } = logIntegralAndMean(
     (mass) => data.logLikelihood(mass, curve.radius(mass)) + logMassPrior(prior, mass),
     edges,
     (mass, logDensity) => logChiSquareAbove(-2 * (logDensity - logMassPrior(prior, mass)), data.dataCount),
-    rule,
+    how,
   );
   return { logLikelihood, logWorse: logMean };
 }

@@ -1,6 +1,5 @@
-import type { QuadratureRule } from "../../numerics/gaussLegendre.ts";
 import type { Density } from "../density.ts";
-import { densityQuadrature, logIntegralAndMean } from "../densityQuadrature.ts";
+import { densityQuadrature, logIntegralAndMean, type Quadrature } from "../densityQuadrature.ts";
 import { type CompositionPrior, logPrior } from "./compositionPrior.ts";
 
 /** ln of a density over mass fractions. */
@@ -36,7 +35,7 @@ export function marginal(
   density: FractionDensity,
   prior: CompositionPrior,
   component: number,
-  rule: QuadratureRule,
+  how: Quadrature,
 ): Marginal {
   const others = logUniformFirst(prior).filter((k) => k !== component);
   const fractions = new Float64Array(prior.componentCount);
@@ -53,7 +52,7 @@ export function marginal(
     }
     const coordinate = coordinateOf(prior, others[n], left);
     if (coordinate === undefined) return Number.NEGATIVE_INFINITY;
-    const result = logIntegralAndMean(along(coordinate, n, left), coordinate.edges, () => logWeight, rule);
+    const result = logIntegralAndMean(along(coordinate, n, left), coordinate.edges, () => logWeight, how);
     logWeight = result.logMean;
     return result.logIntegral;
   };
@@ -74,7 +73,7 @@ export function marginal(
       return log;
     },
     coordinate.edges,
-    rule,
+    how,
   );
   const atNodes = Array.from(over.nodes, (x) => logWeights.get(x) as number);
   const largest = Math.max(...atNodes);

@@ -1,7 +1,7 @@
 import type { MassRange, RadiusCurve } from "../../curve/radiusCurve.ts";
 import { gaussLegendre } from "../../numerics/gaussLegendre.ts";
 import type { Density } from "../density.ts";
-import { densityQuadrature } from "../densityQuadrature.ts";
+import { densityQuadrature, FINE } from "../densityQuadrature.ts";
 import { logLikelihood } from "../fractionPosterior.ts";
 import { type Measurement, massWindow } from "../measurement.ts";
 import { atDeviation, deviation, type SplitNormal } from "../splitNormal.ts";
@@ -20,7 +20,7 @@ export interface ExpectedEvidence {
 /** Data further from the truth than this many errors are left out: 7e-6 of a normal, in two panels of one rule each. */
 const FARTHEST_DATA = 4.5;
 /** ln of a Bayes factor is nearly quadratic in the data. */
-const DATA_RULE = gaussLegendre(8);
+const DATA_QUADRATURE = { ...FINE, rule: gaussLegendre(8) };
 
 /**
  * The ln Bayes factor between two compositions, averaged over the data that a planet of `planned.mass.mode` would give
@@ -63,6 +63,6 @@ function expectedValues({ mode, minus, plus }: SplitNormal): Density {
   return densityQuadrature(
     (x) => -0.5 * deviation(quoted, x) ** 2,
     [atDeviation(quoted, -FARTHEST_DATA), mode, atDeviation(quoted, FARTHEST_DATA)],
-    DATA_RULE,
+    DATA_QUADRATURE,
   );
 }
