@@ -9,7 +9,7 @@ const dimensionless = [
   ...["magnesiumToSilicon", "ironNumber"],
 ];
 
-const files = ["compositions", "compositions/materials"].flatMap((folder) =>
+const files = ["compositions", "compositions/materials", "compositions/families"].flatMap((folder) =>
   readdirSync(folder)
     .filter((name) => name.endsWith(".json"))
     .map((name) => `${folder}/${name}`),

@@ -5,6 +5,7 @@ import type { Composition } from "../library/composition.ts";
 import type { Library } from "../library/library.ts";
 import type { PlanetRow } from "../planets/quantity.ts";
 import type { ClassifiedRow } from "./classifyTable.ts";
+import type { FamilyResult } from "./familyInference.ts";
 import { interruptible } from "./interruptible.ts";
 import type { Progress } from "./progress.ts";
 
@@ -39,13 +40,15 @@ export async function classifyRows(
   rows: readonly PlanetRow[],
   { boundaryNames, ...compositions }: Comparison,
   progress: Progress,
+  inferFamilies?: (row: PlanetRow, index: number) => readonly FamilyResult[],
 ): Promise<ClassifiedRow[]> {
   await setImmediate(); // shows the bar before the models are solved
   const models = buildClassifierModels({ ...compositions, ...standardFamilies(compositions), labels: boundaryNames });
   const { classify } = classifier(models);
   const classified: ClassifiedRow[] = [];
   for await (const row of interruptible(rows)) {
-    classified.push({ row, result: classify(row) });
+    const families = inferFamilies?.(row, classified.length);
+    classified.push({ row, result: classify(row), ...(families && { families }) });
     progress.advanceTo(classified.length);
   }
   return classified;

@@ -1,8 +1,11 @@
 import type { Classification } from "../inference/classifier.ts";
+import type { FamilyModel } from "../inference/composition/compositionPosterior.ts";
 import type { FractionEstimate } from "../inference/fractionPosterior.ts";
 import type { PlanetRow } from "../planets/quantity.ts";
 import { EARTH_MASS } from "../units/constants.ts";
 import type { Cell } from "./csv.ts";
+import { familyCells, familyColumns, familyDetails } from "./familyColumns.ts";
+import type { FamilyResult } from "./familyInference.ts";
 import type { KeptColumn } from "./keptColumns.ts";
 import type { Table } from "./table.ts";
 
@@ -10,6 +13,8 @@ import type { Table } from "./table.ts";
 export interface ClassifiedRow {
   readonly row: PlanetRow;
   readonly result: Classification;
+  /** Where families were asked for. */
+  readonly families?: readonly FamilyResult[];
 }
 
 export const classifyColumns = [
@@ -41,10 +46,13 @@ export function classifyTable(
   rows: readonly ClassifiedRow[],
   earthRadius: number,
   kept: readonly KeptColumn[] = [],
+  families: readonly FamilyModel[] = [],
 ): Table {
+  const withFamilies = families.length > 0;
   return {
-    columns: [...classifyColumns, ...kept.map(({ name }) => name)],
-    rows: rows.map(({ row, result }) => [
+    columns: [...classifyColumns, ...kept.map(({ name }) => name), ...(withFamilies ? familyColumns(families) : [])],
+    ...(withFamilies && { details: rows.map((row) => ({ families: familyDetails(row.families ?? []) })) }),
+    rows: rows.map(({ row, result, families: results = [] }) => [
       row.name,
       result.verdict?.code,
       result.reasons?.join(";"),
@@ -53,6 +61,7 @@ export function classifyTable(
       ...resultCells(result, earthRadius),
       result.verdict?.statement,
       ...kept.map(({ index }) => row.cells[index]),
+      ...(withFamilies ? familyCells(families, results) : []),
     ]),
   };
 }

@@ -20,6 +20,11 @@ export const commands: readonly CommandEntry[] = [
     summary: "what is wrong with a planet list, or where lists disagree",
     load: () => import("./commands/crosscheck.ts"),
   },
+  {
+    name: "precision",
+    summary: "what to measure next, and how well",
+    load: () => import("./commands/precision.ts"),
+  },
   { name: "library", summary: "the compositions and materials at hand", load: () => import("./commands/library.ts") },
   { name: "demo", summary: "classify an invented survey and draw it", load: () => import("./commands/demo.ts") },
 ];

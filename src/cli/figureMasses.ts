@@ -1,6 +1,6 @@
 import { EARTH_MASS } from "../units/constants.ts";
 import type { ClassifiedRow } from "./classifyTable.ts";
-import { geometricMasses } from "./numberOptions.ts";
+import { geometricPoints } from "./numberOptions.ts";
 
 /** What the curves of a figure span without planets, and what the solver can do [Earth masses]. */
 const usual = { lightest: 0.1, heaviest: 20 };
@@ -16,5 +16,5 @@ export function figureMasses(rows: readonly ClassifiedRow[]): number[] {
     if (mass < lightest) lightest = Math.max(mass, possible.lightest);
     if (mass > heaviest) heaviest = Math.min(mass, possible.heaviest);
   }
-  return geometricMasses(lightest, heaviest, Math.ceil(pointsPerDecade * Math.log10(heaviest / lightest)));
+  return geometricPoints(lightest, heaviest, Math.ceil(pointsPerDecade * Math.log10(heaviest / lightest)));
 }

@@ -14,18 +14,25 @@ export interface OpenLibrary {
   readonly inputs: readonly string[];
 }
 
-/** The shipped compositions and materials with those of a folder, if one is given; the folder's win. */
-export async function openLibrary(folder: string | undefined, io: Io): Promise<OpenLibrary> {
-  const own = folder === undefined ? [] : await readLibraryFolder(folder, io);
+/** The shipped compositions, materials and families with those of a folder, if one is given, and `more` files; the later win. */
+export async function openLibrary(
+  folder: string | undefined,
+  io: Io,
+  more: readonly LibraryFile[] = [],
+): Promise<OpenLibrary> {
+  const own = [...(folder === undefined ? [] : await readLibraryFolder(folder, io)), ...more];
   return { library: loadLibrary([...shippedFiles, ...own]), inputs: own.map(({ path }) => path) };
 }
 
 /**
  * The files of a folder laid out like `compositions/`: JSON files and the CSV tables they name, there and in
- * `materials/`. Throws InputError `unreadable`, or `empty-library` if there are none.
+ * `materials/` and `families/`. Throws InputError `unreadable`, or `empty-library` if there are none.
  */
 export async function readLibraryFolder(folder: string, io: Io): Promise<LibraryFile[]> {
-  const paths = [...(await filesIn(folder)), ...(await filesIn(join(folder, "materials"), { mayBeMissing: true }))];
+  const inside = await Promise.all(
+    ["materials", "families"].map((name) => filesIn(join(folder, name), { mayBeMissing: true })),
+  );
+  const paths = [...(await filesIn(folder)), ...inside.flat()];
   const files = await Promise.all(paths.map(async (path) => ({ path, text: await readText(path, io) })));
   if (files.length > 0) return files;
   throw new InputError(

@@ -11,12 +11,13 @@ import type { Entry } from "../library/libraryFiles.ts";
 import { sourceText } from "./provenance.ts";
 
 /** The names and titles of a library, for a person to read. */
-export function listingText({ compositions, materials, notes }: Library): string {
-  const width = Math.max(...[...compositions, ...materials].map(({ name }) => name.length));
+export function listingText({ compositions, materials, families, notes }: Library): string {
+  const width = Math.max(...[...compositions, ...materials, ...families].map(({ name }) => name.length));
   const lines = (entries: readonly Entry[]) => entries.map(({ name, title }) => `  ${name.padEnd(width)}  ${title}`);
   const sections = [
     ["compositions", ...lines(compositions)],
     ["materials", ...lines(materials)],
+    ["families", ...lines(families)],
     ...(notes.length > 0 ? [notes.map((note) => `note: ${note}`)] : []),
   ];
   return joinSections(sections);

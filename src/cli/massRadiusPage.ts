@@ -1,5 +1,3 @@
-import { readFile } from "node:fs/promises";
-import { createRequire } from "node:module";
 import type { CurvePoint } from "../curve/sweep.ts";
 import { massRadiusFigure } from "../figures/massRadiusFigure.ts";
 import type { CurveInput, MassRadiusInput } from "../figures/massRadiusInput.ts";
@@ -8,6 +6,7 @@ import type { Composition } from "../library/composition.ts";
 import { sourcesOf } from "../library/sources.ts";
 import { EARTH_MASS } from "../units/constants.ts";
 import type { EarthRadius } from "./earthRadius.ts";
+import { plotlySource } from "./plotlySource.ts";
 import { reproducingCommand } from "./provenance.ts";
 import { version } from "./version.ts";
 
@@ -47,9 +46,4 @@ function curveInput({ composition, points }: Curve, earthRadius: number): CurveI
       extrapolatedLayers: planet?.extrapolatedLayers ?? [],
     })),
   };
-}
-
-/** Plotly is found by the package's own name, from the sources as from the built command. */
-function plotlySource(): Promise<string> {
-  return readFile(createRequire(import.meta.url).resolve("bulkwright/plotly.min.js"), "utf8");
 }

@@ -23,23 +23,40 @@ const maximumPoints = 1e6;
  * just these, in their order.
  */
 export function parseMasses(text: string): readonly number[] {
+  return parseList(text, { what: "masses above 0", unit: "in Earth masses", maximumCount: maximumPoints });
+}
+
+/** Percentages, written like masses. */
+export function parsePercentages(text: string): readonly number[] {
+  return parseList(text, { what: "percentages above 0", unit: "without the sign", maximumCount: 100 });
+}
+
+/** Numbers of standard errors, written like masses. */
+export function parseSigmas(text: string): readonly number[] {
+  return parseList(text, { what: "numbers above 0", unit: "in sigma", maximumCount: 20 });
+}
+
+function parseList(
+  text: string,
+  { what, unit, maximumCount }: { what: string; unit: string; maximumCount: number },
+): readonly number[] {
   const numbers = text.split(text.includes(":") ? ":" : ",").map(parseNumber);
   if (!text.includes(":")) {
-    if (numbers.every((mass) => mass > 0 && mass < Infinity)) return numbers;
-    throw new InvalidArgumentError("Give masses above 0, in Earth masses, separated by commas.");
+    if (numbers.length <= maximumCount && numbers.every((x) => x > 0 && x < Infinity)) return numbers;
+    throw new InvalidArgumentError(`Give ${what}, ${unit}, separated by commas.`);
   }
   const [first, last, count] = numbers;
   const isRange = numbers.length === 3 && first > 0 && last > 0 && first < Infinity && last < Infinity;
-  if (!isRange || !Number.isInteger(count) || !(count >= 2 && count <= maximumPoints)) {
+  if (!isRange || !Number.isInteger(count) || !(count >= 2 && count <= maximumCount)) {
     throw new InvalidArgumentError(
-      "Give from:to:count, masses above 0 and a whole number of points from 2 to 1000000.",
+      `Give from:to:count, ${what} and a whole number of points from 2 to ${maximumCount}.`,
     );
   }
-  return geometricMasses(first, last, count);
+  return geometricPoints(first, last, count);
 }
 
 /** Evenly spaced in the logarithm, both ends exactly included. */
-export function geometricMasses(first: number, last: number, count: number): number[] {
+export function geometricPoints(first: number, last: number, count: number): number[] {
   return Array.from({ length: count }, (_, i) =>
     i === count - 1 ? last : first * (last / first) ** (i / (count - 1)),
   );

@@ -4,6 +4,8 @@ import { type Provenance, provenanceLines } from "./provenance.ts";
 export interface Table {
   readonly columns: readonly string[];
   readonly rows: readonly (readonly Cell[])[];
+  /** What only JSON has room for, one a row. */
+  readonly details?: readonly object[];
 }
 
 export type TableFormat = "csv" | "json";
@@ -17,12 +19,19 @@ function toCsv({ columns, rows }: Table, provenance: Provenance): string {
   return provenanceLines(provenance) + [columns, ...rows].map(csvRecord).join("");
 }
 
-function toJson({ columns, rows }: Table, provenance: Provenance): string {
-  const objects = rows.map((row) => Object.fromEntries(columns.map((column, i) => [column, jsonValue(row[i])])));
-  return `${JSON.stringify({ provenance, rows: objects }, null, 2)}\n`;
+function toJson({ columns, rows, details }: Table, provenance: Provenance): string {
+  const objects = rows.map((row, r) => ({
+    ...Object.fromEntries(columns.map((column, i) => [column, jsonValue(row[i])])),
+    ...details?.[r],
+  }));
+  return `${JSON.stringify({ provenance, rows: objects }, roundedNumbers, 2)}\n`;
 }
 
 function jsonValue(cell: Cell): string | number | null {
-  if (typeof cell === "bigint") return Number(cell);
-  return typeof cell === "number" ? Number(cell.toPrecision(12)) : (cell ?? null);
+  return typeof cell === "bigint" ? Number(cell) : (cell ?? null);
+}
+
+/** As many digits as in CSV. */
+function roundedNumbers(_key: string, value: unknown): unknown {
+  return typeof value === "number" ? Number(value.toPrecision(12)) : value;
 }

@@ -60,6 +60,37 @@ export class Density {
     }
   }
 
+  /** Places in every panel, ends included, with the density and the share below them; gaps between panels hold nothing. */
+  tabulated(pieces: number): { x: Float64Array; density: Float64Array; below: Float64Array } {
+    const perPanel = this.rule.nodes.length;
+    const count = this.panels.length * (pieces + 1);
+    const [x, density, below] = [new Float64Array(count), new Float64Array(count), new Float64Array(count)];
+    let start = 0;
+    this.panels.forEach(({ from, to }, p) => {
+      const series = legendreSeries(this.rule, this.logDensities.subarray(p * perPanel, (p + 1) * perPanel));
+      const at = (u: number): number => Math.exp(evaluateLegendreSeries(series, u));
+      const h = (to - from) / pieces;
+      let share = start;
+      for (let k = 0; k <= pieces; k++) {
+        const n = p * (pieces + 1) + k;
+        const u = -1 + (2 * k) / pieces;
+        x[n] = k === pieces ? to : from + k * h;
+        density[n] = at(u);
+        if (k > 0) share += (h / 6) * (density[n - 1] + 4 * at(u - 1 / pieces) + density[n]);
+        below[n] = share;
+      }
+      // Simpson's rule gives the shape within a panel, the Gauss–Legendre rule what the panel holds.
+      let held = 0;
+      for (let i = 0; i < perPanel; i++) held += this.probabilities[p * perPanel + i];
+      for (let k = 0; k <= pieces; k++) {
+        const n = p * (pieces + 1) + k;
+        below[n] = start + ((below[n] - start) * held) / (share - start);
+      }
+      start += held;
+    });
+    return { x, density, below };
+  }
+
   /** Bisection; between the nodes the log-density is the polynomial through them, as it is nearly straight. */
   private quantileInPanel(p: number, wanted: number): number {
     const { nodes, weights } = this.rule;

@@ -39,6 +39,6 @@ function errorProblem({ minus, plus }: MeasuredQuantity): string {
   return isErrorSize(minus) && isErrorSize(plus) ? "error-unusable" : "error-zero";
 }
 
-function isErrorSize(size: number | undefined): boolean {
+export function isErrorSize(size: number | undefined): size is number {
   return size !== undefined && size > 0 && Number.isFinite(size);
 }

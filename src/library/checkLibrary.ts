@@ -2,7 +2,7 @@ import { InputError } from "../errors.ts";
 import { type Library, loadLibrary } from "./library.ts";
 import { type Entry, entryOf, isJson, type LibraryFile } from "./libraryFiles.ts";
 import { materialFile } from "./materialFile.ts";
-import { compositionSchema, materialSchema } from "./schemas.ts";
+import { schemas } from "./schemaFiles.ts";
 import { validate } from "./validate.ts";
 
 /**
@@ -15,10 +15,7 @@ export function checkLibrary(files: readonly LibraryFile[], base: readonly Libra
     try {
       const entry = entryOf(file);
       entries.push(entry);
-      return (
-        validate(entry.kind === "material" ? materialSchema : compositionSchema, file.path, entry.content).problems ??
-        []
-      );
+      return validate(schemas[entry.kind], file.path, entry.content).problems ?? [];
     } catch (error) {
       return [asProblem(error)];
     }

@@ -3,8 +3,10 @@ import { InputError } from "../errors.ts";
 import { EARTH_FLUX, GIGAYEAR } from "../units/constants.ts";
 import { buildMaterial } from "./buildMaterial.ts";
 import type { Composition, GasEnvelope } from "./composition.ts";
+import type { Family, FamilyComponent } from "./family.ts";
+import { type FamilyFile, familySchema } from "./familySchema.ts";
 import { inFile, unknownName } from "./libraryErrors.ts";
-import { type Entry, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
+import { type Entry, type EntryKind, entryOf, isJson, type LibraryFile, siblingPath } from "./libraryFiles.ts";
 import { materialEntry, materialFile } from "./materialFile.ts";
 import { readDensityTable } from "./readDensityTable.ts";
 import { type NameLookup, resolveLayers } from "./resolveLayers.ts";
@@ -24,6 +26,7 @@ const NO_SUBSTITUTES: Substitutes = new Map();
 export interface Library {
   readonly compositions: readonly Entry[];
   readonly materials: readonly Entry[];
+  readonly families: readonly Entry[];
   /** What a user should know, e.g. that a file of theirs took the place of a shipped one. */
   readonly notes: readonly string[];
   /**
@@ -32,6 +35,8 @@ export interface Library {
    * Throws InputError `unknown-composition`, `composition-cycle`, or any error of the files it is made from.
    */
   composition(name: string, substitutes?: Substitutes): Composition;
+  /** Throws InputError `unknown-family`, or any error of the files it is made from. */
+  family(name: string): Family;
   /** Throws InputError `unknown-material`, or any error of its file. */
   material(name: string): Material;
 }
@@ -47,8 +52,11 @@ export function loadLibrary(files: readonly LibraryFile[]): Library {
 class FileLibrary implements Library {
   readonly notes: string[] = [];
   private readonly files: ReadonlyMap<string, string>;
-  private readonly compositionEntries = new Map<string, Entry>();
-  private readonly materialEntries = new Map<string, Entry>();
+  private readonly entries = {
+    composition: new Map<string, Entry>(),
+    material: new Map<string, Entry>(),
+    family: new Map<string, Entry>(),
+  };
   private readonly builtCompositions = new Map<string, Composition>();
   private readonly builtMaterials = new Map<string, Material>();
 
@@ -58,11 +66,15 @@ class FileLibrary implements Library {
   }
 
   get compositions(): readonly Entry[] {
-    return [...this.compositionEntries.values()];
+    return [...this.entries.composition.values()];
   }
 
   get materials(): readonly Entry[] {
-    return [...this.materialEntries.values()];
+    return [...this.entries.material.values()];
+  }
+
+  get families(): readonly Entry[] {
+    return [...this.entries.family.values()];
   }
 
   composition(name: string, substitutes = NO_SUBSTITUTES): Composition {
@@ -79,8 +91,26 @@ class FileLibrary implements Library {
     return material;
   }
 
+  family(name: string): Family {
+    const { path, content } = this.entry("family", name);
+    const { value: file, problems } = validate(familySchema, path, content);
+    if (problems) throw problems[0];
+    const components = file.components.map((component, k) =>
+      inFile(path, () => this.component(component), `components[${k}]`),
+    );
+    return { name, title: file.title, components, prior: file.prior };
+  }
+
+  private component({ name, material, composition }: FamilyFile["components"][number]): FamilyComponent {
+    return {
+      name,
+      composition:
+        material === undefined ? this.composition(composition as string) : this.pure(material, NO_SUBSTITUTES),
+    };
+  }
+
   private add(entry: Entry): void {
-    const entries = entry.kind === "material" ? this.materialEntries : this.compositionEntries;
+    const entries = this.entries[entry.kind];
     const before = entries.get(entry.name);
     if (before !== undefined) {
       this.notes.push(`${entry.kind} "${entry.name}": ${entry.path} takes the place of ${before.path}`);
@@ -88,11 +118,17 @@ class FileLibrary implements Library {
     entries.set(entry.name, entry);
   }
 
+  private entry(kind: EntryKind, name: string): Entry {
+    const entry = this.entries[kind].get(name);
+    if (entry !== undefined) return entry;
+    throw unknownName(kind, name, [...this.entries[kind].keys()]);
+  }
+
   /** `above` are the compositions being resolved that led here, outermost first. */
   private resolve(name: string, above: readonly string[], substitutes: Substitutes): Composition {
     const known = substitutes.size === 0 ? this.builtCompositions.get(name) : undefined;
     if (known !== undefined) return known;
-    const entry = this.compositionEntries.get(name);
+    const entry = this.entries.composition.get(name);
     const composition =
       entry === undefined ? this.pure(name, substitutes) : this.resolveEntry(entry, above, substitutes);
     if (substitutes.size === 0) this.builtCompositions.set(name, composition);
@@ -100,8 +136,8 @@ class FileLibrary implements Library {
   }
 
   private pure(name: string, substitutes: Substitutes): Composition {
-    if (!this.materialEntries.has(name)) {
-      throw unknownName("composition", name, [...this.compositionEntries.keys(), ...this.materialEntries.keys()]);
+    if (!this.entries.material.has(name)) {
+      throw unknownName("composition", name, [...this.entries.composition.keys(), ...this.entries.material.keys()]);
     }
     const material = this.material(substitutes.get(name) ?? name);
     const layers = [{ name: material.name, material, massFraction: 1 }];

@@ -1,4 +1,5 @@
 import { InputError } from "../errors.ts";
+import type { EntryKind } from "./libraryFiles.ts";
 import { suggestion } from "./nearest.ts";
 
 /** Runs `action`; an error that does not yet say in which file it arose is given this one, and the key there. */
@@ -18,7 +19,7 @@ export function inFile<Result>(file: string, action: () => Result, key?: string)
   }
 }
 
-export function unknownName(kind: "material" | "composition", name: string, known: readonly string[]): InputError {
+export function unknownName(kind: EntryKind, name: string, known: readonly string[]): InputError {
   return new InputError(
     `unknown-${kind}`,
     `no ${kind} is named "${name}".${suggestion(name, known)} Known: ${[...known].sort().join(", ")}.`,

@@ -1,16 +1,12 @@
 import * as z from "zod";
 import { eosSchema, FORMS_WITHOUT_CALIBRATION } from "./forms.ts";
+import { nameSchema as name, textSchema as text } from "./names.ts";
 import { strictObject } from "./strictObject.ts";
 import { alloySchema, freezingSchema, mantleSchema, thermalSchema } from "./thermalSchemas.ts";
 
 /** Sums of mass fractions may miss 1 by this much, e.g. thirds written with ten digits. */
 const SUM_TOLERANCE = 1e-9;
 
-/** Names stand in file names, CSV cells and comma-separated options. */
-const name = z.string().regex(/^[A-Za-z0-9][A-Za-z0-9._-]*$/, {
-  error: "a name is made of letters, digits, dots, hyphens and underscores.",
-});
-const text = z.string().min(1);
 const fraction = z.number().min(0).max(1);
 const sourceSchema = strictObject({ citation: text, doi: text.optional(), note: text.optional() });
 

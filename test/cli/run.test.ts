@@ -40,6 +40,16 @@ describe("wrong usage ends with 2 and a message, and prints no result", () => {
     ["profile without name and table", ["profile"], "--density-table"],
     ["profile with name and no mass", ["profile", "earth-like"], "--mass"],
     ["classify without anything", ["classify"], "--mass-earth"],
+    ["precision without a pair", ["precision", "a.csv"], "--between"],
+    ["precision between one composition", ["precision", "a.csv", "--between", "iron,iron"], "two different"],
+    ["precision without anything", ["precision", "--between", "a,b"], "--mass-earth"],
+    ["a map of a list", ["precision", "a.csv", "--between", "a,b", "--html", "x.html"], "for one planet"],
+    [
+      "a ranking of one planet",
+      ["precision", "--mass-earth", "1,0.1", "--between", "a,b", "--halve", "mass"],
+      "a list",
+    ],
+    ["a percentage below 0", ["precision", "--mass-errors-percent", "-1"], "percentages above 0"],
     ["classify with a list and a planet", ["classify", "a.csv", "--mass-earth", "1,0.1"], "--mass-earth"],
   ])("%s", async (_, args, message) => {
     const { code, out, err } = await runCommand(args);

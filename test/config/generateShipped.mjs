@@ -4,7 +4,7 @@ import { readdirSync, readFileSync, writeFileSync } from "node:fs";
 import { fileURLToPath } from "node:url";
 
 const root = fileURLToPath(new URL("../../", import.meta.url));
-const files = ["compositions", "compositions/materials"].flatMap((folder) =>
+const files = ["compositions", "compositions/materials", "compositions/families"].flatMap((folder) =>
   readdirSync(root + folder, { withFileTypes: true })
     .filter((entry) => entry.isFile())
     .map(({ name }) => `${folder}/${name}`)

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { densityQuadrature, logIntegral } from "../../src/inference/densityQuadrature.ts";
+import { densityQuadrature, FINE, logIntegral } from "../../src/inference/densityQuadrature.ts";
 import { normalBelow } from "../../src/inference/normal.ts";
 import { gaussLegendre } from "../../src/numerics/gaussLegendre.ts";
 import { expectClose } from "../support/expectClose.ts";
@@ -66,7 +66,7 @@ describe("densityQuadrature", () => {
   test("converges with the number of nodes", () => {
     const exact = Math.log(Math.sqrt(2 * Math.PI) * 0.1);
     const errors = [2, 4, 6, 8].map((n) =>
-      Math.abs(densityQuadrature(normal(0.437, 0.1), [-1, 2], gaussLegendre(n)).logIntegral - exact),
+      Math.abs(densityQuadrature(normal(0.437, 0.1), [-1, 2], { ...FINE, rule: gaussLegendre(n) }).logIntegral - exact),
     );
     errors.slice(1).forEach((error, i) => {
       expect(error).toBeLessThan(errors[i] / 5);

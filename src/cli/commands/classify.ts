@@ -1,4 +1,8 @@
 import { type Command, InvalidArgumentError, Option } from "commander";
+import type { FamilyModel } from "../../inference/composition/compositionPosterior.ts";
+import type { Composition } from "../../library/composition.ts";
+import type { Family } from "../../library/family.ts";
+import type { PlanetRow } from "../../planets/quantity.ts";
 import { readPlanetList } from "../../planets/readPlanetList.ts";
 import {
   type BoundaryNames,
@@ -10,9 +14,14 @@ import {
 import { planetPart } from "../classifyPage.ts";
 import { classifyColumns, classifyTable } from "../classifyTable.ts";
 import type { CommandContext } from "../commandContext.ts";
+import { rowLikelihoods } from "../correlationColumn.ts";
 import { explainLists } from "../explainColumns.ts";
+import { type FamilyResult, familyInference } from "../familyInference.ts";
+import { addFamilyOptions, chosenFamilies, type FamilyOptions, familyFiles } from "../familyOptions.ts";
 import { figureMasses } from "../figureMasses.ts";
+import { defaultCacheFolder, fileCache } from "../fileCache.ts";
 import { allOf } from "../interruptible.ts";
+import type { Io } from "../io.ts";
 import { keptColumns } from "../keptColumns.ts";
 import { openLibrary } from "../libraryFolder.ts";
 import { addListOptions, type ListOptions, parseNames } from "../listOptions.ts";
@@ -33,7 +42,7 @@ import {
 } from "../resultOptions.ts";
 import { sweepCurves } from "../sweepCurves.ts";
 
-interface ClassifyOptions extends GlobalOptions, ResultOptions, ListOptions, OnePlanet {
+interface ClassifyOptions extends GlobalOptions, ResultOptions, ListOptions, OnePlanet, FamilyOptions {
   readonly compositions: BoundaryNames;
   readonly keep?: readonly string[];
   readonly library?: string;
@@ -46,7 +55,7 @@ Examples:
   bulkwright classify --mass-earth 4.7,0.2 --radius-earth 1.61,0.03`;
 
 export function define(command: Command, context: CommandContext): void {
-  addListOptions(addResultOptions(command))
+  addFamilyOptions(addListOptions(addResultOptions(command)))
     .argument("[list]", "planet list; `-` reads standard input")
     .option("--mass-earth <value,error>", "of one planet: VALUE,ERROR or VALUE,MINUS,PLUS", parseValueWithErrors)
     .option("--radius-earth <value,error>", "of one planet, likewise", parseValueWithErrors)
@@ -74,7 +83,8 @@ async function classify(
   options: ClassifyOptions,
   { io, args }: CommandContext,
 ): Promise<void> {
-  const { library, inputs } = await openLibrary(options.library, io);
+  const ownFamilies = await familyFiles(options, io);
+  const { library, inputs } = await openLibrary(options.library, io, ownFamilies);
   const file = path === undefined ? undefined : await planetListFile(path, options, io);
   await checkDestinations(destinations(options), [...(file?.inputs ?? []), ...inputs]);
   if (file && options.explainColumns) return explainLists([file], options, { io, args });
@@ -89,24 +99,54 @@ async function classify(
   tell(notes, options, io);
 
   const rows = await allOf(list.rows);
+  const families = chosenFamilies(options, ownFamilies, library);
+  const inference = families.length > 0 ? await inferenceFor(families, rows, header, options, io) : undefined;
+  notes.push(...(inference?.notes ?? []));
   const progress = startProgress(rows.length, io, options.quiet);
-  const classified = await classifyRows(rows, comparison, progress).finally(() => progress.stop());
+  const classified = await classifyRows(rows, comparison, progress, inference?.infer).finally(() => progress.stop());
 
-  const compositions = comparedCompositions(comparison);
+  const compositions = [...comparedCompositions(comparison), ...families.flatMap(compositionsOf)];
   const run = { args, earthRadius: options.earthRadiusKm };
   await emitTable(
-    classifyTable(classified, earthRadius, kept),
+    classifyTable(classified, earthRadius, kept, inference?.families),
     provenanceOf({ ...run, compositions, notes }),
     options,
     io,
   );
   if (options.html !== undefined) {
-    const curves = await sweepCurves(compositions, figureMasses(classified));
+    const curves = await sweepCurves(comparedCompositions(comparison), figureMasses(classified));
     await writeOutputFile(
       options.html,
       await massRadiusPage(curves, planetPart(classified, comparison, earthRadius), run),
     );
   }
+}
+
+interface RowInference {
+  readonly families: readonly FamilyModel[];
+  readonly notes: readonly string[];
+  infer(row: PlanetRow, index: number): readonly FamilyResult[];
+}
+
+async function inferenceFor(
+  families: readonly Family[],
+  rows: readonly PlanetRow[],
+  header: readonly string[],
+  options: ClassifyOptions,
+  io: Io,
+): Promise<RowInference> {
+  const planets = rowLikelihoods(rows, header, options.correlation);
+  const note = (text: string) => tell([text], options, io);
+  const folder = options.cache === true ? defaultCacheFolder() : options.cache;
+  const cache = folder === false ? undefined : fileCache(folder, note);
+  const { infer, ...rest } = await familyInference(families, planets, { massPrior: options.massPrior, cache, note });
+  tell(rest.notes, options, io);
+  return { ...rest, infer: (_, index) => infer(planets[index]) };
+}
+
+/** For the sources. */
+function compositionsOf({ components }: Family): Composition[] {
+  return components.map(({ composition }) => composition);
 }
 
 function parseBoundaries(text: string): BoundaryNames {

@@ -52,7 +52,7 @@ export function define(command: Command, context: CommandContext): void {
       return writeStarPlanet(fromAbundances, options, context);
     });
   withFolder(
-    subcommand("list", "names and titles of all compositions and materials", "bulkwright library list"),
+    subcommand("list", "names and titles of all compositions, materials and families", "bulkwright library list"),
   ).action((options: LibraryOptions) => list(options, io));
   withFolder(subcommand("show", "layers, forms, ranges, densities and sources", "bulkwright library show earth-like"))
     .argument("<name>", "of a composition or material")
