@@ -29,14 +29,19 @@ export interface ColumnPlan {
   readonly notes: readonly string[];
 }
 
+/**
+ * What a comma inside a number is: `decimal` where `5,2` and `1,234` are numbers between their neighbours; `unclear`
+ * where decimal points stand elsewhere, so that `1,234` could be a thousand and more; `none` where it is no part of one.
+ */
+export type CommaMeaning = "decimal" | "unclear" | "none";
+
 /** How the list at hand writes what lists write in different ways; found from a sample of its rows. */
 export interface ListConventions {
   /** `nan` stands for a missing value, so that as an error it cannot also mean "this is a limit". */
   readonly nanIsMissing: boolean;
   /** -1 stands for a missing value or upper error, so that as a lower error it is no signed 1. */
   readonly minusOneIsMissing: boolean;
-  /** `5,2` is a number. */
-  readonly decimalComma: boolean;
+  readonly comma: CommaMeaning;
 }
 
 /** A place where the reader could only guess. */

@@ -1,6 +1,6 @@
 import { median } from "simple-statistics";
 import { InputError } from "../errors.ts";
-import type { ColumnPlan } from "./columnPlan.ts";
+import type { ColumnPlan, QuantitySource } from "./columnPlan.ts";
 import { quantityColumns } from "./columnTable.ts";
 import type { RawColumn, RawRecord } from "./formats/rawTable.ts";
 import type { QuantityName } from "./quantity.ts";
@@ -13,13 +13,29 @@ const impossibleMedians: Readonly<Partial<Record<QuantityName, number>>> = {
   starMass: 2e32, // 100 solar masses
   starRadius: 7e10, // 100 solar radii
   density: 1e6,
+  semiMajorAxis: 1.5e15, // 10 000 au
+  period: 3e12, // 100 000 years
 };
+/** Quantities hardly ever measured to whole numbers in a whole list; temperatures, for one, are. */
+const fractional: readonly QuantityName[] = [
+  "radius",
+  "mass",
+  "minimumMass",
+  "eccentricity",
+  "starMass",
+  "starRadius",
+  "density",
+  "semiMajorAxis",
+  "period",
+  "insolation",
+];
 const SMALLEST_SAMPLE = 5;
 const FEWEST_COLUMNS = 2;
 
 /**
- * Refuses a list whose numbers are whole throughout and impossible in at least two columns, as spreadsheets with another
- * decimal mark make them: 1.234 becomes 1234. Throws `lost-decimal-points` with the evidence.
+ * Refuses a list of which several columns are whole throughout that hardly ever are, one of them impossible, as
+ * spreadsheets with another decimal mark make them: 1.234 becomes 1234. Whole numbers alone are no evidence: many honest
+ * lists round their masses. Throws `lost-decimal-points` with the evidence.
  */
 export function refuseLostDecimals(
   plan: ColumnPlan,
@@ -27,25 +43,31 @@ export function refuseLostDecimals(
   sample: readonly RawRecord[],
   file: string,
 ): void {
-  const evidence: string[] = [];
-  for (const [quantity, [source]] of plan.quantities) {
-    const limit = impossibleMedians[quantity];
-    if (limit === undefined || source === undefined) continue;
-    const cells = sample.map((record) => record.cells[source.value]?.trim() ?? "").filter((cell) => Number(cell) > 0);
-    if (cells.length < SMALLEST_SAMPLE) continue;
-    if (cells.some((cell) => !/^\d+$/.test(cell))) return;
-    const middle = median(cells.map(Number));
-    if (middle * source.unit.factor > limit) {
-      evidence.push(
-        `half of column "${columns[source.value]?.name}" (${quantityColumns[quantity].title}) is above ${middle}`,
-      );
+  const whole: string[] = [];
+  const impossible: string[] = [];
+  for (const quantity of fractional) {
+    const source = plan.quantities.get(quantity)?.[0];
+    const middle = source && wholeMedian(source, sample);
+    if (source === undefined || middle === undefined) continue;
+    const name = columns[source.value]?.name ?? "";
+    whole.push(`"${name}"`);
+    if (middle * source.factor > (impossibleMedians[quantity] ?? Infinity)) {
+      impossible.push(`half of column "${name}" (${quantityColumns[quantity].title}) is above ${middle}`);
     }
   }
-  if (evidence.length < FEWEST_COLUMNS) return;
+  if (impossible.length === 0 || whole.length < FEWEST_COLUMNS) return;
+  const evidence = `none in ${whole.join(", ")} has one, and ${impossible.join("; ")}`;
   throw new InputError(
     "lost-decimal-points",
-    `${file}: the numbers seem to have lost their decimal points: none has one, and ${evidence.join("; ")}. ` +
+    `${file}: the numbers seem to have lost their decimal points: ${evidence}. ` +
       "Fetch the list again and open it without letting a spreadsheet change the numbers",
-    { file, found: evidence.join("; ") },
+    { file, found: evidence },
   );
+}
+
+/** The median of a column whose numbers are whole without exception; undefined for other columns, and for few numbers. */
+function wholeMedian({ value }: QuantitySource, sample: readonly RawRecord[]): number | undefined {
+  const cells = sample.map((record) => record.cells[value]?.trim() ?? "").filter((cell) => Number(cell) > 0);
+  if (cells.length < SMALLEST_SAMPLE || cells.some((cell) => !/^\d+$/.test(cell))) return undefined;
+  return median(cells.map(Number));
 }

@@ -1,6 +1,6 @@
 import type { QuantitySource } from "./columnPlan.ts";
 import { quantityColumns } from "./columnTable.ts";
-import { isMissing, readPlainNumber, readTypedNumber, type TypedNumber } from "./numberCell.ts";
+import { isMissing, numberAdvice, readPlainNumber, readTypedNumber, type TypedNumber } from "./numberCell.ts";
 import type { LimitCoding, MeasuredQuantity, QuantityKind, QuantityName } from "./quantity.ts";
 import { type Errors, readErrors } from "./readErrors.ts";
 import type { RowContext } from "./rowContext.ts";
@@ -38,11 +38,15 @@ function readCell(text: string, source: QuantitySource, row: RowContext): TypedN
   if (value !== undefined) return { value };
   if (isMissing(text)) return undefined;
   if (positions.has(source.quantity)) return readPosition(text, source);
-  const typed = readTypedNumber(text, row.list.conventions.decimalComma);
+  const typed = readTypedNumber(text, row.list.conventions.comma);
   if (typed !== undefined && Number.isFinite(typed.value)) return typed;
   const { title } = quantityColumns[source.quantity];
   const found = typed === undefined ? "is not a number" : "is not finite";
-  row.report("not-a-number", source.value, `${title} "${text.trim()}" ${found}; the cell is ignored`);
+  row.report(
+    "not-a-number",
+    source.value,
+    `${title} "${text.trim()}" ${found}; the cell is ignored${numberAdvice(text)}`,
+  );
   return undefined;
 }
 
@@ -101,15 +105,18 @@ function classifyValue(
 const kindByErrors = ({ minus, plus }: Errors): QuantityKind =>
   minus !== undefined && plus !== undefined && minus > 0 && plus > 0 ? "measured" : "no-uncertainty";
 
+const upperFlag = /^(?:[<≤]|&lt;|ul?$|upper)/i;
+const lowerFlag = /^(?:[>≥]|&gt;|ll?$|lower)/i;
+
 function readFlag(source: QuantitySource, row: RowContext): "upper-limit" | "lower-limit" | "unknown" | undefined {
   if (source.limit === undefined) return undefined;
   const text = (row.cells[source.limit] ?? "").trim();
   if (text === "0" || text === "" || isMissing(text)) return undefined;
   const flag = Number(text);
   if (flag === 0) return undefined;
-  if (flag === 1 || text.startsWith("<")) return "upper-limit";
-  if (flag === -1 || text.startsWith(">")) return "lower-limit";
-  const message = `the limit flag "${text}" is neither 0, 1 (upper limit) nor -1 (lower limit); the value is not used as a measurement`;
+  if (flag === 1 || upperFlag.test(text)) return "upper-limit";
+  if (flag === -1 || lowerFlag.test(text)) return "lower-limit";
+  const message = `the limit flag "${text}" is neither 0, 1 (or <, upper) nor -1 (or >, lower); the value is not used as a measurement`;
   row.report("unknown-limit-flag", source.limit, message);
   return "unknown";
 }

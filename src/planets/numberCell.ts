@@ -1,3 +1,5 @@
+import type { CommaMeaning } from "./columnPlan.ts";
+
 /** What somebody typed into a number cell. */
 export interface TypedNumber {
   readonly value: number;
@@ -73,19 +75,22 @@ const symmetric = new RegExp(`^(${number})\\s*(?:±|\\+/-|\\+-|\\\\pm)\\s*(${siz
 const upperFirst = new RegExp(`^(${number})\\s*${upper}\\s*[,/]?\\s*${lower}$`);
 const lowerFirst = new RegExp(`^(${number})\\s*${lower}\\s*[,/]?\\s*${upper}$`);
 const inLastDigits = /^([+-]?\d+(?:\.(\d*))?)\((\d+)\)(?:[eE]([+-]?\d+))?$/;
+/** `1,234`, which is no decimal comma for certain, as `5,2` and `0,123` are. */
+const groupedDigits = /(?<![\d.,])[1-9]\d{0,2}(?:,\d{3})+(?![\d,])/;
 const infinite = /^[+-]?inf(?:inity)?$/i;
 
 /**
- * `5`, `1.2e3`, `1.2D3`, `<5`, `5±1`, `5 +1 -2`, `5.2(3)` (an error of 3 in the last digit); `inf` as an error. With
- * `decimalComma` also `5,2`. Undefined for anything else: the reader never takes a number out of a text that holds more.
+ * `5`, `1.2e3`, `1.2D3`, `<5`, `5±1`, `5 +1 -2`, `5.2(3)` (an error of 3 in the last digit); `inf` as an error. With a
+ * decimal comma also `5,2`. Undefined for anything else: the reader never takes a number out of a text that holds more.
  */
-export function readTypedNumber(text: string, decimalComma = false): TypedNumber | undefined {
+export function readTypedNumber(text: string, comma: CommaMeaning = "none"): TypedNumber | undefined {
   if (text.length > NUMBER_LIMIT) return undefined;
   let trimmed = text
     .trim()
     .replace(/^\$|\$$/g, "")
     .replace(/[−–]/g, "-");
-  if (decimalComma) trimmed = trimmed.replace(/(\d),(?=\d)/g, "$1.");
+  if (comma === "unclear" && groupedDigits.test(trimmed)) return undefined;
+  if (comma !== "none") trimmed = trimmed.replace(/(\d),(?=\d)/g, "$1.");
   if (plain.test(trimmed)) return { value: toNumber(trimmed) };
   if (infinite.test(trimmed)) return { value: trimmed.startsWith("-") ? -Infinity : Infinity };
   const limit = limited.exec(trimmed);
@@ -100,6 +105,10 @@ export function readTypedNumber(text: string, decimalComma = false): TypedNumber
     return { value: toNumber(down[1]), minus: toNumber(down[2]), plus: toNumber(down[3]) };
   return readLastDigits(trimmed);
 }
+
+/** What to do about a cell that is no number because marks stand between its thousands, or seem to; else nothing. */
+export const numberAdvice = (text: string): string =>
+  /\d[.,' ]\d{3}(?!\d)/.test(text) ? "; write it with a decimal point and no mark between thousands, e.g. 1234.5" : "";
 
 function readLastDigits(text: string): TypedNumber | undefined {
   const match = inLastDigits.exec(text);

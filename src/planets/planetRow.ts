@@ -18,13 +18,22 @@ export function readRow(record: RawRecord, row: number, list: ListContext): Plan
   const context = new RowContext(record, list);
   const { line, cells, issues } = context;
   const texts = readTexts(cells, list.plan.texts);
-  const found: FoundQuantities = { quantities: {}, twins: {} };
-  if (!isShifted(context)) {
-    for (const [name, sources] of list.plan.quantities) readQuantity(name, sources, context, found);
+  const found = readQuantities(context);
+  if (found !== undefined) {
     applyProvenance(found, texts);
     deriveQuantities(found.quantities, (name) => list.plan.quantities.has(name));
   }
-  return { row, line, name: nameOf(texts), quantities: found.quantities, twins: found.twins, texts, cells, issues };
+  return { row, line, name: nameOf(texts, list), ...(found ?? nothing), texts, cells, issues };
+}
+
+const nothing: FoundQuantities = { quantities: {}, twins: {} };
+
+/** Undefined where the row's numbers may stand in the wrong columns. */
+function readQuantities(row: RowContext): FoundQuantities | undefined {
+  if (isShifted(row)) return undefined;
+  const found: FoundQuantities = { quantities: {}, twins: {} };
+  for (const [name, sources] of row.list.plan.quantities) readQuantity(name, sources, row, found);
+  return isShiftedByBlank(row) ? undefined : found;
 }
 
 function readQuantity(
@@ -53,21 +62,39 @@ function readTexts(
   return texts;
 }
 
-/** Lists without a name column give the host and the planet's letter. */
-const nameOf = ({ name, host, letter }: PlanetRow["texts"]): string =>
-  name ?? (host !== undefined && letter !== undefined ? `${host} ${letter}` : (host ?? ""));
+/** Lists without a name column give the host and the planet's letter, or at least the host. */
+function nameOf({ name, host, letter }: PlanetRow["texts"], { plan }: ListContext): string {
+  if (name !== undefined) return name;
+  if (host !== undefined && letter !== undefined) return `${host} ${letter}`;
+  return plan.texts.has("name") ? "" : (host ?? "");
+}
 
-/** Whether the numbers may stand in the wrong columns: more cells than columns, the extra ones not empty. */
+/**
+ * Whether the numbers may stand in the wrong columns: more cells than columns, the extra ones not empty. Between blanks
+ * no cell can be empty, so that there a missing cell shifts all that follow it.
+ */
 function isShifted(row: RowContext): boolean {
   const { cells } = row;
   const width = row.list.columns.length;
   if (cells.length === width) return false;
   const hasExtra = cells.slice(width).some((cell) => cell.trim() !== "");
   if (cells.length > width && !hasExtra) return false;
-  const consequence = hasExtra ? "its numbers may be in the wrong columns and are not used" : "the rest are missing";
+  const shifted = hasExtra || row.list.format === "blank-separated";
+  const consequence = shifted ? "its numbers may be in the wrong columns and are not used" : "the rest are missing";
   const message = `the row has ${cells.length} cells, the header ${width}; ${consequence}`;
   row.report("ragged-row", Math.min(cells.length, width) - 1, message);
-  return hasExtra;
+  return shifted;
+}
+
+/** Text among the numbers of a blank-separated row comes from a blank in its name, which shifted the numbers. */
+function isShiftedByBlank(row: RowContext): boolean {
+  const text = row.issues.find((issue) => issue.code === "not-a-number");
+  if (row.list.format !== "blank-separated" || text === undefined) return false;
+  const message =
+    `"${text.found}" stands in the column of numbers "${text.origin.column}": the row seems shifted by a blank in a name, ` +
+    "and its numbers are not used; quote names that hold blanks";
+  row.issues.push({ ...text, code: "ragged-row", message });
+  return true;
 }
 
 /** What the provenance columns, and a minimum mass repeated as the mass, say about what the numbers are. */

@@ -1,5 +1,5 @@
 import type { QuantitySource } from "./columnPlan.ts";
-import { isMissing, readPlainNumber, readTypedNumber, type TypedNumber } from "./numberCell.ts";
+import { isMissing, numberAdvice, readPlainNumber, readTypedNumber, type TypedNumber } from "./numberCell.ts";
 import type { RowContext } from "./rowContext.ts";
 
 /** Errors as positive sizes; undefined where missing, infinite where the list says that there is no bound. */
@@ -50,11 +50,15 @@ function readError(index: number | undefined, row: RowContext): number | undefin
   if (index === undefined || text === undefined || text === "") return undefined;
   const value = readPlainNumber(text);
   if (value !== undefined) return value;
-  const { nanIsMissing, decimalComma } = row.list.conventions;
+  const { nanIsMissing, comma } = row.list.conventions;
   if (!nanIsMissing && /^[+-]?nan$/i.test(text.trim())) return Infinity;
   if (isMissing(text)) return undefined;
-  const typed = readTypedNumber(text, decimalComma);
+  const typed = readTypedNumber(text, comma);
   if (typed !== undefined && typed.limit === undefined) return typed.value;
-  row.report("not-a-number", index, `the error "${text.trim()}" is not a number; the cell is ignored`);
+  row.report(
+    "not-a-number",
+    index,
+    `the error "${text.trim()}" is not a number; the cell is ignored${numberAdvice(text)}`,
+  );
   return undefined;
 }

@@ -46,7 +46,7 @@ export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options:
   refuseLostDecimals(plan, table.columns, sample, file);
   requireColumns(file, table.columns, plan, options.needs ?? ["mass", "minimumMass", "radius"]);
   const conventions = findConventions(plan, sample, table.format);
-  const context: ListContext = { file, columns: table.columns, plan, conventions };
+  const context: ListContext = { file, format: table.format, columns: table.columns, plan, conventions };
   const notes = [...plan.notes, ...misspellings(explainColumns(table.columns, plan, [], sample))];
   return {
     file,

@@ -1,10 +1,11 @@
 import type { ColumnPlan, ListConventions } from "./columnPlan.ts";
-import type { RawColumn, RawRecord } from "./formats/rawTable.ts";
+import type { ListFormat, RawColumn, RawRecord } from "./formats/rawTable.ts";
 import type { Origin, RowIssue } from "./quantity.ts";
 
 /** What is the same for all rows of a list. */
 export interface ListContext {
   readonly file: string;
+  readonly format: ListFormat;
   readonly columns: readonly RawColumn[];
   readonly plan: ColumnPlan;
   readonly conventions: ListConventions;

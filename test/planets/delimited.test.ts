@@ -109,6 +109,36 @@ describe("ragged rows", () => {
   });
 });
 
+describe("blank-separated rows shifted by a blank in a name", () => {
+  const header = "name period mass_earth mass_err radius_earth radius_err\n";
+
+  test.each([
+    ["as many cells as columns", "Aster b 6.3 5.0 0.2 1.70", "b"],
+    ["fewer cells", "Aster-c 6.3 5.0 0.2 1.70", "1.70"],
+    ["more cells", "Aster b 6.3 5.0 0.2 1.70 0.1", "1.70"],
+  ])("%s: no number is used", async (_, row, found) => {
+    const { rows } = await readList(
+      `${header}Brook-b 6.3 4.7 0.2 1.61 0.03\n${row}\n${"Cedar-b 6 5 1 2 1\n".repeat(3)}`,
+    );
+    expect(rows[0]?.quantities.mass?.kind).toBe("measured");
+    expect(rows[1]?.quantities).toEqual({});
+    expect(rows[1]?.issues.find((issue) => issue.code === "ragged-row")).toMatchObject({ found });
+  });
+});
+
+test.each(["\t", ";"])("a comma in the thousands is no decimal point (separated by %j)", async (mark) => {
+  const text = "name,mass_earth,radius_earth\nAster b,1/234,11.2\nBrook c,318,11.2\n";
+  const { rows } = await readList(text.replaceAll(",", mark).replace("/", ","));
+  expect(rows[0]?.quantities.mass).toBeUndefined();
+  expect(rows[0]?.issues).toMatchObject([{ code: "not-a-number", message: /1,234.*no mark between thousands/ }]);
+});
+
+test("points between the thousands of a list with decimal commas are explained", async () => {
+  const { rows } = await readList("name;mass_earth;radius_earth\nAster b;1.234,5;11,2\n");
+  expect(rows[0]?.quantities.radius?.written).toBe("11,2");
+  expect(rows[0]?.issues).toMatchObject([{ code: "not-a-number", message: /no mark between thousands/ }]);
+});
+
 /** csv-spectrum 2.0.0, see test/fixtures/planets/README.md. */
 describe("csv-spectrum", () => {
   const folder = new URL("../fixtures/planets/csv-spectrum/", import.meta.url);

@@ -47,7 +47,17 @@ describe("numbers as people type them", () => {
   });
 
   test("a comma is a decimal mark where it cannot separate cells", () => {
-    expect(readTypedNumber("5,25 ± 0,5", true)).toEqual({ value: 5.25, minus: 0.5, plus: 0.5 });
+    expect(readTypedNumber("5,25 ± 0,5", "decimal")).toEqual({ value: 5.25, minus: 0.5, plus: 0.5 });
+  });
+
+  test("beside decimal points a comma before three digits may mark thousands", () => {
+    expect(readTypedNumber("1,234", "decimal")).toEqual({ value: 1.234 });
+    expect(["1,234", "1,234,567", "<1,234", "1,234.5"].map((text) => readTypedNumber(text, "unclear"))).toEqual(
+      Array(4).fill(undefined),
+    );
+    expect(["5,2", "0,123", "12,3456"].map((text) => readTypedNumber(text, "unclear")?.value)).toEqual([
+      5.2, 0.123, 12.3456,
+    ]);
   });
 
   test.each(["", " ", "NULL", "null", "nan", "NaN", "-", "--", '""', "N/A", "None", "..."])("%j is missing", (text) => {

@@ -252,7 +252,34 @@ describe("lists that cannot be used", () => {
       code: "lost-decimal-points",
       found: /radius_earth.*star_mass/,
     });
-    expect((await readList(text.replace("1134", "1.134"))).rows).toHaveLength(5);
+  });
+
+  const list = (header: string, row: (i: number) => string): string =>
+    `name,${header}\n${Array.from({ length: 12 }, (_, i) => `Aster ${i} b,${row(i)}\n`).join("")}`;
+
+  test.each([
+    ["masses that are possible", "mass_earth,radius_earth", (i: number) => `${470 + 13 * i},${161 + 7 * i}`],
+    ["a period", "radius_earth,period", (i: number) => `${1611 + i},${63120 + 17 * i}`],
+    [
+      "a column beside them that kept its points",
+      "mass_earth,radius_earth,semi_major_axis",
+      (i: number) => `4.${i},${161 + i},${43 + i}`,
+    ],
+  ])("also beside %s", async (_, header, row) => {
+    await expect(readList(list(header, row))).rejects.toMatchObject({
+      code: "lost-decimal-points",
+      found: /"radius_earth".*above/,
+    });
+  });
+
+  test.each([
+    ["whole masses", "mass_earth,radius_earth", (i: number) => `${i + 1},1.${i}`],
+    ["whole masses and radii", "mass_earth,radius_earth", (i: number) => `${5 * i + 1},${i + 1}`],
+    ["radii in kilometres", "mass_earth,radius_km", (i: number) => `${i + 1},${6000 + 100 * i}`],
+    ["far companions", "mass_jupiter,semi_major_axis", (i: number) => `${i + 3},${50 * i + 50}`],
+    ["one impossible column alone", "radius_earth,period", (i: number) => `${161 + i},6.3`],
+  ])("honest whole numbers stay: %s", async (_, header, row) => {
+    expect((await readList(list(header, row))).rows).toHaveLength(12);
   });
 });
 
@@ -278,6 +305,12 @@ test("every column is explained", async () => {
     "--unit radius=earth",
     "--unit radius=jupiter",
   ]);
+});
+
+test("where the list has a name column, the host does not stand in for an empty name", async () => {
+  const { rows } = await readList("name,host,mass_earth\n,Aster,1\nBrook b,Brook,2\n");
+  expect(rows.map((row) => row.name)).toEqual(["", "Brook b"]);
+  expect((await readList("host,mass_earth\nAster,1\n")).rows[0]?.name).toBe("Aster");
 });
 
 test("a list without names has host and letter", async () => {
