@@ -1,6 +1,6 @@
 import { distance } from "fastest-levenshtein";
 import { InputError } from "../errors.ts";
-import { columnKey } from "./columnKey.ts";
+import { camelKey, columnKey } from "./columnKey.ts";
 import { type QuantityMeaning, quantityMeanings, textMeaning } from "./columnMeaning.ts";
 import { quantityColumns, textColumns } from "./columnTable.ts";
 import type { QuantityName, TextName } from "./quantity.ts";
@@ -96,10 +96,15 @@ export function nearestName(wanted: string, names: readonly string[]): string | 
 }
 
 function unknownChoice(ours: string, file: string): InputError {
-  const known = [...Object.values(quantityColumns).map((columns) => columns.ownName), ...Object.keys(textColumns)];
+  const known = [
+    ...Object.values(quantityColumns).map((columns) => columns.ownName),
+    ...Object.keys(textColumns).map(camelKey),
+  ];
+  const nearest = nearestName(camelKey(ours), known);
+  const hint = nearest === undefined ? "" : ` (did you mean ${nearest}?)`;
   return new InputError(
     "unknown-column-choice",
-    `"${ours}" is no column Bulkwright knows, so no column can be chosen for it; use one of ${known.join(", ")}, ` +
+    `"${ours}" is no column Bulkwright knows, so no column can be chosen for it${hint}; use one of ${known.join(", ")}, ` +
       "with its unit, e.g. mass_earth, and with _minus or _plus for the errors",
     { file, found: ours },
   );

@@ -1,5 +1,7 @@
 const signs: readonly (readonly [RegExp, string])[] = [
   [/ρ/g, "rho"],
+  [/σ/g, "_sigma_"],
+  [/[δΔ∆]/g, "_delta_"],
   [/[⊕]/g, "_earth_"],
   [/[♃]/g, "_jupiter_"],
   [/[☉⊙]/g, "_sun_"],

@@ -280,6 +280,7 @@ export const textColumns: Readonly<Record<TextName, string>> = {
 export const ambiguousNames: Readonly<Record<string, readonly QuantityName[]>> = {
   m: ["mass", "starMass"],
   r: ["radius", "starRadius"],
+  rad: ["radius", "starRadius"],
   t: ["equilibriumTemperature", "starTemperature"],
   temp: ["equilibriumTemperature", "starTemperature"],
   temperature: ["equilibriumTemperature", "starTemperature"],

@@ -22,6 +22,11 @@ export const errorPrefixes: readonly { readonly side: ErrorSide; readonly prefix
   { side: "both", prefix: "e_" },
   { side: "both", prefix: "err_" },
   { side: "both", prefix: "sigma_" },
+  { side: "both", prefix: "delta_" },
+  { side: "both", prefix: "σ" },
+  { side: "both", prefix: "δ" },
+  { side: "both", prefix: "Δ" },
+  { side: "both", prefix: "∆" },
   { side: "both", prefix: "u" },
   { side: "both", prefix: "U" },
 ];

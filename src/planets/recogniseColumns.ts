@@ -9,7 +9,7 @@ import { type KnownList, knownLists } from "./knownLists.ts";
 import { ownColumn } from "./ownColumn.ts";
 import type { QuantityName, TextName } from "./quantity.ts";
 import { type Resolved, resolveBounds, resolveUnit } from "./resolveUnit.ts";
-import { siFactor } from "./unitTable.ts";
+import { findUnit, siFactor } from "./unitTable.ts";
 
 export interface RecogniserOptions extends ColumnChoices {
   readonly file: string;
@@ -38,7 +38,7 @@ export function recogniseColumns(
   names.forEach((name, index) => {
     if (chosen.taken.has(index)) return;
     const readings = quantityMeanings(name, known).filter((reading) => !chosen.settled.has(reading.quantity));
-    if (readings.length > 0) meanings.set(index, readings);
+    if (readings.length > 0) meanings.set(index, ofUnitsBody(readings, columns[index]?.unit));
   });
   const stems = new Map(
     [...meanings].map(([index, readings]) => [index, stemsOf(names[index] ?? "", readings)] as const),
@@ -73,6 +73,20 @@ export function knownList(names: readonly string[]): KnownList | undefined {
 /** The keys under which a column's errors may be named: its own, without a bracketed unit, without any unit. */
 function stemsOf(name: string, readings: readonly QuantityMeaning[]): string[] {
   return [columnKey(name), columnKey(splitUnitText(name).base), ...readings.map((reading) => reading.stem)];
+}
+
+/** The body whose own mass or radius is the unit; kilograms and kilometres tell nothing. */
+const bodyOfUnit: Readonly<Record<string, "planet" | "star">> = { earth: "planet", jupiter: "planet", sun: "star" };
+
+/** Of two readings, the one for the body in whose units the column is: `R [Rjup]` is a planet's. */
+function ofUnitsBody(readings: readonly QuantityMeaning[], declared: string | undefined): readonly QuantityMeaning[] {
+  if (readings.length < 2) return readings;
+  const left = readings.filter(({ quantity, unit }) => {
+    const { body, dimension } = quantityColumns[quantity];
+    const known = unit ?? findUnit(declared ?? "", dimension);
+    return known !== undefined && bodyOfUnit[known.id] === body;
+  });
+  return left.length > 0 ? left : readings;
 }
 
 /** Names with two readings lose one where another column already certainly is that quantity. */

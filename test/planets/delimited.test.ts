@@ -59,6 +59,13 @@ describe("headers", () => {
     expect(columns.map(({ name }) => name)).toEqual(["name", "mass_earth", "radius_earth"]);
   });
 
+  test("a quoted name may go on in the next line", async () => {
+    const text = 'name,"mass\n[M_earth]","radius\r\n[R_earth]"\nAster b,5±1,1.7\n';
+    const { columns, rows } = await readList(text);
+    expect(columns.map(({ name }) => name)).toEqual(["name", "mass [M_earth]", "radius [R_earth]"]);
+    expect(rows).toMatchObject([{ line: 4, quantities: { mass: { kind: "measured" }, radius: { written: "1.7" } } }]);
+  });
+
   test("names that JavaScript knows are names like any other", async () => {
     const list = await readList("name,mass_earth,__proto__,constructor,hasOwnProperty,toString\nA,1,2,3,4,5\n");
     expect(list.rows[0]?.cells).toEqual(["A", "1", "2", "3", "4", "5"]);

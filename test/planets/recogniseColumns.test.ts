@@ -307,6 +307,43 @@ test("every column is explained", async () => {
   ]);
 });
 
+test.each([
+  ["R [Rearth]", "radius"],
+  ["R [Rjup]", "radius"],
+  ["Rad (Rjup)", "radius"],
+  ["M [Mjup]", "mass"],
+  ["R [Rsun]", "starRadius"],
+])("%s is of the body whose unit it has", async (column, quantity) => {
+  const { plan } = await readList(`name,density,${column}\nA,5,1\n`, { needs: ["density"] });
+  expect([...plan.quantities.keys()]).toEqual(["density", quantity]);
+});
+
+test.each(["km", ""])("Rad in %j stays a question", async (unit) => {
+  await expect(readList(`name,density,Rad [${unit}]\nA,5,1\n`)).rejects.toMatchObject({ code: "ambiguous-column" });
+});
+
+test.each([
+  ["Mp", "σMp"],
+  ["Mass (M⊕)", "σ_Mass (M⊕)"],
+  ["Mp (M⊕)", "δMp"],
+  ["Mp (M⊕)", "ΔMp (M⊕)"],
+  ["Mp (M⊕)", "∆Mp"],
+  ["Mp [M_earth]", "Mp_σ"],
+])("the errors of %s are in %s", async (value, error) => {
+  const { rows } = await readList(`name,${value},${error}\nA,5,1\n`, { unitChoices: { mass: "earth" } });
+  expect(rows[0]?.quantities).toMatchObject({ mass: { written: "5", kind: "measured" } });
+});
+
+test("a column name that is not ours is answered with the nearest that is", async () => {
+  const choices = { columnChoices: { massProvenanc: "how" } };
+  await expect(readList("name,mass_earth,how\nA,5,Msini\n", choices)).rejects.toThrow(
+    /did you mean mass_provenance\?.*mass_provenance, radius_provenance/,
+  );
+  const [row] = (await readList("name,mass_earth,how\nA,5,Msini\n", { columnChoices: { mass_provenance: "how" } }))
+    .rows;
+  expect(row?.quantities.mass?.kind).toBe("minimum");
+});
+
 test("where the list has a name column, the host does not stand in for an empty name", async () => {
   const { rows } = await readList("name,host,mass_earth\n,Aster,1\nBrook b,Brook,2\n");
   expect(rows.map((row) => row.name)).toEqual(["", "Brook b"]);

@@ -45,7 +45,8 @@ function uncomment(text: string): string {
 
 async function takeHeader(lines: LineReader, headerComment: string, dialect: Dialect, file: string): Promise<string[]> {
   const [first] = await lines.peek(1);
-  const cells = first === undefined ? [] : splitCells(first.text, dialect);
+  const { text, lineCount } = await peekHeader(lines, dialect);
+  const cells = first === undefined ? [] : splitCells(text, dialect);
   const commented = splitCells(headerComment, dialect);
   const known = cells.filter(isKnownColumn).length;
   const numbers = cells.filter((cell) => cell.trim() !== "" && Number.isFinite(Number(cell))).length;
@@ -54,8 +55,20 @@ async function takeHeader(lines: LineReader, headerComment: string, dialect: Dia
   }
   if (first === undefined) throw emptyFile(file);
   if (numbers > 0 && numbers >= known) throw noHeader(file, first);
-  await lines.next();
+  for (let i = 0; i < lineCount; i++) await lines.next();
   return cells.map((cell) => cell.trim());
+}
+
+/** The header with the lines over which its quoted cells go on as one; where no quote ends, its first line. */
+async function peekHeader(lines: LineReader, dialect: Dialect): Promise<{ text: string; lineCount: number }> {
+  const sample = await lines.peek(SAMPLE_LINES);
+  let isOpen = false;
+  for (const [index, { text }] of sample.entries()) {
+    isOpen = dialect.endsInsideQuotes(text, isOpen);
+    const header = sample.slice(0, index + 1).map((line) => line.text);
+    if (!isOpen) return { text: header.join(" "), lineCount: index + 1 };
+  }
+  return { text: sample[0]?.text ?? "", lineCount: 1 };
 }
 
 /** The row of units under the header and the row of dashes under that, as some archives write them. */
