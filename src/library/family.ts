@@ -1,5 +1,21 @@
 import type { Composition } from "./composition.ts";
-import type { FamilyPrior } from "./familySchema.ts";
+
+/**
+ * What is thought of a family's mass fractions before the planet is measured: `logUniform` components each by
+ * themselves, the others flat over the proportions of what is left (the flat Dirichlet distribution), all of it times the
+ * `normal` densities, normalised.
+ */
+export interface FamilyPrior {
+  readonly fractions: "flat";
+  readonly logUniform: readonly { readonly component: string; readonly from: number; readonly to: number }[];
+  /** In a component's share of the mass of some components. */
+  readonly normal: readonly {
+    readonly component: string;
+    readonly among: readonly string[];
+    readonly mean: number;
+    readonly sigma: number;
+  }[];
+}
 
 /** One part of a family's planets, of any mass fraction; its layers keep their shares of it. */
 export interface FamilyComponent {

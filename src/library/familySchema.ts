@@ -80,10 +80,3 @@ export const familySchema = strictObject({
 });
 
 export type FamilyFile = z.output<typeof familySchema>;
-
-/**
- * What is thought of a family's mass fractions before the planet is measured: `logUniform` components each by
- * themselves, the others flat over the proportions of what is left (the flat Dirichlet distribution), all of it times the
- * `normal` densities, normalised.
- */
-export type FamilyPrior = z.output<typeof priorSchema>;
