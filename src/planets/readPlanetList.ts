@@ -35,12 +35,13 @@ export interface PlanetList {
 
 /**
  * Reads a planet list of any of the known formats, found from its content, in constant memory.
- * Throws InputError: `empty-file`, `no-header`, `missing-columns`, `ambiguous-column`, and those of the format's reader;
+ * Throws InputError: `empty-file`, `no-header`, `no-data`, `missing-columns`, `ambiguous-column`, and those of the format's reader;
  * what is wrong with one row only is an issue of that row.
  * Checked by test/planets/.
  */
 export async function readPlanetList(chunks: AsyncIterable<Uint8Array>, options: ListOptions): Promise<PlanetList> {
   const { file, table, sample, batches } = await openTable(chunks, options);
+  if (sample.length === 0) throw noData(file, table.columns);
   const { plan, ambiguities } = recogniseColumns(table.columns, sample, options);
   if (ambiguities.length > 0) throw ambiguousColumns(file, ambiguities);
   refuseLostDecimals(plan, table.columns, sample, file);
@@ -109,6 +110,14 @@ async function* readRows(batches: AsyncIterable<readonly RawRecord[]>, list: Lis
   let row = 0;
   for await (const batch of batches) for (const record of batch) yield readRow(record, ++row, list);
 }
+
+const noData = (file: string, columns: readonly RawColumn[]): InputError =>
+  new InputError(
+    "no-data",
+    `${file}: no row of data follows the header (${columns.map((column) => column.name).join(", ")}); ` +
+      "the list needs one line per planet",
+    { file },
+  );
 
 function requireColumns(
   file: string,

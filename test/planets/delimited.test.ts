@@ -74,6 +74,44 @@ describe("headers", () => {
   });
 });
 
+test.each([
+  ["one row", "|---|---|---|", 1],
+  ["several rows", "|------|------------|---|", 4],
+  ["aligned columns", "| :--- | ---: | :-: |", 2],
+])("a Markdown table of %s keeps them all", async (_, rule, count) => {
+  const row = "| Aster b | 5.1±0.3 | 1.7 |\n";
+  const { format, columns, rows } = await readList(
+    `| name | mass_earth | radius_earth |\n${rule}\n${row.repeat(count)}`,
+  );
+  expect(format).toBe("bar-separated");
+  expect(columns.map(({ name }) => name)).toEqual(["name", "mass_earth", "radius_earth"]);
+  expect(rows.map(({ name, quantities }) => [name, quantities.mass?.kind])).toEqual(
+    Array(count).fill(["Aster b", "measured"]),
+  );
+});
+
+describe("lines beginning with # below the header", () => {
+  const header = "name,mass_earth,radius_earth\n";
+
+  test("are rows where they have a number and a cell for every column, and that is noted", async () => {
+    const { rows, notes } = await readList(`${header}#1 Aster b,5,1.7\nBrook c,3,1.2\n`);
+    expect(rows.map(({ name, line }) => [name, line])).toEqual([
+      ["#1 Aster b", 2],
+      ["Brook c", 3],
+    ]);
+    expect(notes).toEqual([expect.stringMatching(/^1 line below .* taken for rows.* line 2$/)]);
+  });
+
+  test.each(["# a remark", "# a remark, in, three", "# padded,,", "#"])(
+    "%s is a comment, and counted",
+    async (line) => {
+      const { rows, notes } = await readList(`${header}Aster b,5,1.7\n${`${line}\n`.repeat(6)}Brook c,3,1.2\n`);
+      expect(rows.map(({ name }) => name)).toEqual(["Aster b", "Brook c"]);
+      expect(notes).toEqual([expect.stringMatching(/^6 lines .* taken for comments; see line 3, 4, 5, 6, 7, \.\.\.$/)]);
+    },
+  );
+});
+
 describe("quotes", () => {
   test("a quoted cell may hold delimiters, quotes and line ends, and lines are still counted right", async () => {
     const { records } = await readRaw('name,mass_earth\n"a, ""b""\r\nc",1\nd,2\n');

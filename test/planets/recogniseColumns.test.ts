@@ -232,6 +232,8 @@ describe("lists that cannot be used", () => {
     ["blank", "\n \n", "empty-file"],
     ["comments only", "# nothing\n# here\n", "empty-file"],
     ["without a header", "Aster b,5,1\nBrook c,6,2\n", "no-header"],
+    ["a header only", "name,mass_earth,radius_earth\n", "no-data"],
+    ["a Markdown header only", "| name | mass_earth |\n|---|---|\n", "no-data"],
     ["without mass and radius", "name,colour\nAster b,red\n", "missing-columns"],
     ["a web page", "<!DOCTYPE html><html><body>Error</body></html>", "unsupported-format"],
     ["JSON", '[{"name": "A"}]', "unsupported-format"],

@@ -4,6 +4,7 @@ import { isKnownColumn, quantityMeanings, textMeaning } from "../columnMeaning.t
 import { quantityColumns } from "../columnTable.ts";
 import { LINE_LIMIT, type Line } from "../splitLines.ts";
 import { findUnit } from "../unitTable.ts";
+import { CommentedLines, isComment } from "./commentedLines.ts";
 import { type Dialect, detectDialect } from "./dialect.ts";
 import type { LineReader } from "./lineReader.ts";
 import type { RawColumn, RawRecord, RawTable } from "./rawTable.ts";
@@ -30,11 +31,19 @@ export async function readDelimited(lines: LineReader, file: string): Promise<Ra
     const about = described.get(name);
     return { name, unit: units?.[index] || about?.unit, description: about?.description };
   });
-  return { format: dialect.format, columns, batches: parseRecords(lines.rest(), dialect, file) };
+  const commented = new CommentedLines((text) => splitCells(text, dialect), columns.length);
+  const batches = parseRecords(lines.rest(), dialect, file, (line) => commented.isComment(line));
+  return {
+    format: dialect.format,
+    columns,
+    batches,
+    get notes() {
+      return commented.notes;
+    },
+  };
 }
 
 const isBlank = (line: Line): boolean => line.text.trim() === "";
-const isComment = (text: string): boolean => /^\s*"?#/.test(text);
 
 /** A commented line without its mark, and without the delimiters that a spreadsheet pads it with. */
 function uncomment(text: string): string {
@@ -79,7 +88,7 @@ async function takeUnits(
 ): Promise<string[] | undefined> {
   const [first, second] = await lines.peek(2);
   const isDashes = (line: Line | undefined): boolean =>
-    line !== undefined && splitCells(line.text, dialect).every((cell) => /^\s*-+\s*$/.test(cell));
+    line !== undefined && splitCells(line.text, dialect).every((cell) => /^\s*:?-+:?\s*$/.test(cell));
   if (header.length > 1 && isDashes(first)) {
     await lines.next();
     return undefined;
@@ -125,13 +134,15 @@ export async function* parseRecords(
   batches: AsyncIterable<Line[]>,
   dialect: Dialect,
   file: string,
+  isSkipped = (line: Line): boolean => isComment(line.text),
 ): AsyncGenerator<RawRecord[]> {
   let open: { line: number; text: string } | undefined;
   for await (const batch of batches) {
     let block: { line: number; text: string }[] = [];
     let characters = 0;
-    for (const { number, text, ending } of batch) {
-      if (open === undefined && (text.trim() === "" || isComment(text))) continue;
+    for (const lineRead of batch) {
+      const { number, text, ending } = lineRead;
+      if (open === undefined && (isBlank(lineRead) || isSkipped(lineRead))) continue;
       const start: { line: number; text: string } = open ?? { line: number, text: "" };
       const isOpen = dialect.endsInsideQuotes(text, open !== undefined);
       open = isOpen ? { line: start.line, text: start.text + text + ending } : undefined;

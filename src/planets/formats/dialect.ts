@@ -39,6 +39,8 @@ export function dialectOf(format: ListFormat, delimiter: string, lines: readonly
   const isPadded =
     !isBlank &&
     lines.map(withoutQuoted).some((line) => line.includes(`${delimiter} `) || line.includes(` ${delimiter}`));
+  // As in Markdown, where every line begins and ends with a bar.
+  const isBoxed = delimiter === "|" && lines.length > 0 && lines.every((line) => /^\s*\|.*\|\s*$/.test(line));
   const padding = delimiter === "\t" ? " " : " \t";
   const opensCell = (text: string, quote: number): boolean => {
     let before = quote - 1;
@@ -49,7 +51,7 @@ export function dialectOf(format: ListFormat, delimiter: string, lines: readonly
     format,
     delimiter,
     isPadded,
-    prepare: isBlank ? collapseBlanks : (text) => text,
+    prepare: isBlank ? collapseBlanks : isBoxed ? withoutOuterBars : (text) => text,
     endsInsideQuotes: (text, startsInside) => endsInsideQuotes(text, startsInside, opensCell),
   };
 }
@@ -71,6 +73,8 @@ const withoutQuoted = (line: string): string => line.replace(/"(?:[^"]|"")*(?:"|
 
 const countCells = (line: string, dialect: Dialect): number =>
   dialect.prepare(withoutQuoted(line)).split(dialect.delimiter).length;
+
+const withoutOuterBars = (text: string): string => text.trim().replace(/^\||\|$/g, "");
 
 const collapseBlanks = (text: string): string =>
   text.trim().replace(/("(?:[^"]|"")*")|[ \t]+/g, (_blanks, quoted: string | undefined) => quoted ?? " ");

@@ -19,8 +19,12 @@ export function isIpac(head: string): boolean {
   const headerEnd = table.findIndex((line) => !line.startsWith("|"));
   const header = table.slice(0, headerEnd === -1 ? table.length : headerEnd);
   const isBarred = header.length >= 1 && header.length <= 4 && header.every((line) => /\|\s*$/.test(line.slice(1)));
-  return isBarred && (header[1] === undefined || header[1].split("|").every((cell) => typeWord.test(cell)));
+  if (!isBarred || header[1] === undefined) return isBarred;
+  return !markdownRule.test(header[1]) && header[1].split("|").every((cell) => typeWord.test(cell));
 }
+
+/** Markdown tables have a line of nothing but dashes where the types would stand. */
+const markdownRule = /^\|(?:\s*-+\s*\|)+\s*$/;
 
 const typeWord = /^[\s-]*(?:d|double|r|real|f|float|i|int|l|long|c|char|date)?[\s-]*$/i;
 
