@@ -65,11 +65,11 @@ export function compositionPosterior(
   if (!(window.lightest < window.heaviest)) return undefined;
   const { table, prior } = family;
   const how = tolerance < COARSE_FROM ? FINE : COARSE;
-  const fit = (fractions: ArrayLike<number>) =>
+  const fitOf = (fractions: ArrayLike<number>) =>
     massIntegral(data, table.member(fractions, window), window, massPrior, how);
   const unit = logBestIntegral(data, window, massPrior) + family.logPriorIntegral;
   if (table.componentCount === 1) {
-    const { logLikelihood, logWorse } = fit([1]);
+    const { logLikelihood, logWorse } = fitOf([1]);
     const only = { median: 1, mean: 1, within68: { lower: 1, upper: 1 }, within95: { lower: 1, upper: 1 } };
     return {
       fractions: [only],
@@ -78,7 +78,7 @@ export function compositionPosterior(
       logDensity: () => 0,
     };
   }
-  const surface = new LikelihoodSurface(table.componentCount, fit, tolerance);
+  const surface = new LikelihoodSurface(table.componentCount, fitOf, tolerance);
   const marginals = family.components.map((_, k) =>
     marginal(k === 0 ? surface : withoutWeight(surface), prior, k, how),
   );
