@@ -9,7 +9,7 @@ export interface Interval {
 export interface FractionSummary {
   readonly median: number;
   readonly mean: number;
-  /** Highest-density intervals: the shortest that hold so much, over the coordinate of the prior (ln f if log-uniform). */
+  /** Highest-density intervals: the shortest that hold so much, in the logarithm for a log-uniform component. */
   readonly within68: Interval;
   readonly within95: Interval;
 }
