@@ -99,10 +99,8 @@ class FileLibrary implements Library {
   }
 
   private component({ name, material, composition }: FamilyFile["components"][number]): FamilyComponent {
-    return {
-      name,
-      composition: material === undefined ? this.composition(composition as string) : this.pure(material),
-    };
+    if (composition !== undefined) return { name, composition: this.composition(composition) };
+    return { name, composition: planetOf(this.material(material as string)) };
   }
 
   private materialFile(name: string): MaterialFile {
@@ -141,8 +139,7 @@ class FileLibrary implements Library {
     if (!this.entries.material.has(name)) {
       throw unknownName("composition", name, [...this.entries.composition.keys(), ...this.entries.material.keys()]);
     }
-    const material = this.material(name);
-    return { name, title: material.title, surface: DEFAULT_SURFACE, layers: [{ name, material, massFraction: 1 }] };
+    return planetOf(this.material(name));
   }
 
   private resolveEntry({ name, path, content }: Entry, above: readonly string[]): Composition {
@@ -172,6 +169,12 @@ class FileLibrary implements Library {
       found: name,
     });
   }
+}
+
+/** Of one material alone. */
+function planetOf(material: Material): Composition {
+  const { name, title } = material;
+  return { name, title, surface: DEFAULT_SURFACE, layers: [{ name, material, massFraction: 1 }] };
 }
 
 function compositionOf(file: CompositionFile, layers: Composition["layers"]): Composition {
