@@ -18,8 +18,12 @@ const NEAR = 0.7;
  * Planets of one composition at the given masses [kg], in their order. A mass that cannot be solved becomes a point
  * with its error; the sweep goes on. Neighbouring masses help each other, so sorted masses are fastest.
  */
-export function* sweepMasses(composition: Composition, masses: Iterable<number>): Generator<CurvePoint> {
-  const solver = new StructureSolver(composition);
+export function* sweepMasses(
+  composition: Composition,
+  masses: Iterable<number>,
+  options: { tolerance?: number } = {},
+): Generator<CurvePoint> {
+  const solver = new StructureSolver(composition, options);
   const logMasses: number[] = [];
   const logPressures: number[] = [];
   for (const mass of masses) {
