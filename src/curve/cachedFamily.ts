@@ -1,5 +1,4 @@
 import { type Material, phaseAt } from "../eos/material.ts";
-import { DEFAULT_TOLERANCE } from "../interior/structureSolver.ts";
 import { type Family, familyMember } from "../library/family.ts";
 import { decodeFamily, encodeFamily } from "./familyBytes.ts";
 import type { MassRange } from "./radiusCurve.ts";
@@ -14,6 +13,8 @@ export interface ByteCache {
 
 /** To be raised whenever the same materials and recipe would give other radii, or the bytes another form. */
 const CODE_VERSION = 1;
+/** Of an integration step: radii are then met to some 1e-7, well below what interpolation loses. */
+const STEP_TOLERANCE = 1e-7;
 /** Densities by which a phase is told from any other. */
 const PROBES = 24;
 
@@ -36,7 +37,10 @@ export async function solvedFamily(
   const solve = () =>
     solveFamily(
       (fractions) => (masses) =>
-        Array.from(sweepMasses(familyMember(family, fractions), masses), ({ planet }) => planet?.radius),
+        Array.from(
+          sweepMasses(familyMember(family, fractions), masses, { tolerance: STEP_TOLERANCE }),
+          ({ planet }) => planet?.radius,
+        ),
       family.components.length,
       range,
       lattice,
@@ -60,7 +64,7 @@ function description({ components }: Family, range: MassRange, lattice: LatticeO
       phases: material.phases.map(probes(material)),
     })),
   }));
-  return JSON.stringify({ CODE_VERSION, DEFAULT_TOLERANCE, range, lattice, parts });
+  return JSON.stringify({ CODE_VERSION, STEP_TOLERANCE, range, lattice, parts });
 }
 
 /** A phase by its limits and the densities between them: whatever its form, no two alike give other planets. */

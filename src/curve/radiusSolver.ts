@@ -7,5 +7,6 @@ const TOLERANCE = 1e-7;
 
 /** Solves planets of one composition for their radii. */
 export function radiusSolver(composition: Composition): RadiusSolver {
-  return (masses) => Array.from(sweepMasses(composition, masses, { tolerance: TOLERANCE }), ({ planet }) => planet?.radius);
+  return (masses) =>
+    Array.from(sweepMasses(composition, masses, { tolerance: TOLERANCE }), ({ planet }) => planet?.radius);
 }

@@ -20,12 +20,22 @@ export class Density {
   /** Normalised log-density at the nodes. */
   private readonly logDensities: Float64Array;
 
+  /** ln of a factor of the density that vanishes somewhere, and is therefore not part of the polynomials. */
+  private readonly logFactor: (x: number) => number;
+
   /** `peak` is taken off the log-density before any exponential, so that none underflows. */
-  constructor(panels: readonly Panel[], logDensity: (x: number) => number, peak: number, rule: QuadratureRule) {
+  constructor(
+    panels: readonly Panel[],
+    logDensity: (x: number) => number,
+    peak: number,
+    rule: QuadratureRule,
+    logFactor: (x: number) => number = () => 0,
+  ) {
     const perPanel = rule.nodes.length;
     const count = panels.length * perPanel;
     this.panels = panels;
     this.rule = rule;
+    this.logFactor = logFactor;
     this.nodes = new Float64Array(count);
     this.logDensities = new Float64Array(count);
     this.probabilities = new Float64Array(count);
@@ -36,7 +46,7 @@ export class Density {
       const half = (to - from) / 2;
       this.nodes[at] = from + half * (1 + rule.nodes[i]);
       this.logDensities[at] = logDensity(this.nodes[at]) - peak;
-      this.probabilities[at] = half * rule.weights[i] * Math.exp(this.logDensities[at]);
+      this.probabilities[at] = half * rule.weights[i] * Math.exp(this.logDensities[at] + logFactor(this.nodes[at]));
       total += this.probabilities[at];
     }
     const logTotal = Math.log(total);
@@ -68,7 +78,10 @@ export class Density {
     let start = 0;
     this.panels.forEach(({ from, to }, p) => {
       const series = legendreSeries(this.rule, this.logDensities.subarray(p * perPanel, (p + 1) * perPanel));
-      const at = (u: number): number => Math.exp(evaluateLegendreSeries(series, u));
+      const at = (u: number): number => {
+        const x = from + ((to - from) / 2) * (1 + u);
+        return Math.exp(evaluateLegendreSeries(series, u) + this.logFactor(x));
+      };
       const h = (to - from) / pieces;
       let share = start;
       for (let k = 0; k <= pieces; k++) {
@@ -94,12 +107,15 @@ export class Density {
   /** Bisection; between the nodes the log-density is the polynomial through them, as it is nearly straight. */
   private quantileInPanel(p: number, wanted: number): number {
     const { nodes, weights } = this.rule;
-    const half = (this.panels[p].to - this.panels[p].from) / 2;
+    const { from, to } = this.panels[p];
+    const half = (to - from) / 2;
     const series = legendreSeries(this.rule, this.logDensities.subarray(p * nodes.length, (p + 1) * nodes.length));
     const shareBelow = (u: number): number => {
       let share = 0;
       for (let i = 0; i < nodes.length; i++) {
-        share += weights[i] * Math.exp(evaluateLegendreSeries(series, -1 + ((u + 1) / 2) * (1 + nodes[i])));
+        const at = -1 + ((u + 1) / 2) * (1 + nodes[i]);
+        const x = from + half * (1 + at);
+        share += weights[i] * Math.exp(evaluateLegendreSeries(series, at) + this.logFactor(x));
       }
       return (share * half * (u + 1)) / 2;
     };
@@ -110,6 +126,6 @@ export class Density {
       if (shareBelow(middle) < wanted) low = middle;
       else high = middle;
     }
-    return this.panels[p].from + half * (1 + (low + high) / 2);
+    return from + half * (1 + (low + high) / 2);
   }
 }

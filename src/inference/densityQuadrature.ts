@@ -35,11 +35,17 @@ interface SampledPanel extends Panel {
  *
  * The density may have a kink at an edge and should rise to one peak and fall again; further peaks are found if they
  * hold an edge or the middle between two. Relative error about 1e-9 for a normal density, in integral and quantiles.
+ * `logFactor` is ln of a factor like (1 - x)^n, which vanishes at an end but needs no panels of its own.
  * Checked test/inference/densityQuadrature.test.ts
  */
-export function densityQuadrature(logDensity: (x: number) => number, edges: readonly number[], how = FINE): Density {
+export function densityQuadrature(
+  logDensity: (x: number) => number,
+  edges: readonly number[],
+  how = FINE,
+  logFactor?: (x: number) => number,
+): Density {
   const { panels, peak } = resolvedPanels(logDensity, edges, how);
-  return new Density(panels, logDensity, peak, how.rule);
+  return new Density(panels, logDensity, peak, how.rule, logFactor);
 }
 
 /** The `logIntegral` of `densityQuadrature` alone, for inner loops. */
@@ -53,6 +59,7 @@ export function logIntegralAndMean(
   edges: readonly number[],
   logOf: (x: number, logDensity: number) => number,
   how = FINE,
+  logFactor?: (x: number) => number,
 ): { logIntegral: number; logMean: number } {
   const { panels, peak } = resolvedPanels(logDensity, edges, how);
   const { nodes, weights } = how.rule;
@@ -64,7 +71,8 @@ export function logIntegralAndMean(
     for (let i = 0; i < nodes.length; i++) {
       const x = from + half * (1 + nodes[i]);
       const log = logDensity(x);
-      const probability = half * weights[i] * Math.exp(log - peak);
+      const factor = logFactor === undefined ? 0 : logFactor(x);
+      const probability = half * weights[i] * Math.exp(log + factor - peak);
       const logValue = logOf(x, log);
       if (logValue > scale) {
         moment *= Math.exp(scale - logValue);

@@ -102,11 +102,8 @@ class FileLibrary implements Library {
   }
 
   private component({ name, material, composition }: FamilyFile["components"][number]): FamilyComponent {
-    return {
-      name,
-      composition:
-        material === undefined ? this.composition(composition as string) : this.pure(material, NO_SUBSTITUTES),
-    };
+    if (composition !== undefined) return { name, composition: this.composition(composition) };
+    return { name, composition: planetOf(this.material(material as string)) };
   }
 
   private add(entry: Entry): void {
@@ -139,9 +136,7 @@ class FileLibrary implements Library {
     if (!this.entries.material.has(name)) {
       throw unknownName("composition", name, [...this.entries.composition.keys(), ...this.entries.material.keys()]);
     }
-    const material = this.material(substitutes.get(name) ?? name);
-    const layers = [{ name: material.name, material, massFraction: 1 }];
-    return { name, title: material.title, surface: DEFAULT_SURFACE, layers };
+    return { ...planetOf(this.material(substitutes.get(name) ?? name)), name };
   }
 
   private resolveEntry(
@@ -175,6 +170,12 @@ class FileLibrary implements Library {
       found: name,
     });
   }
+}
+
+/** Of one material alone. */
+function planetOf(material: Material): Composition {
+  const { name, title } = material;
+  return { name, title, surface: DEFAULT_SURFACE, layers: [{ name, material, massFraction: 1 }] };
 }
 
 function compositionOf(file: CompositionFile, layers: Composition["layers"]): Composition {

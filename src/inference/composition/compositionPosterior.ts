@@ -1,6 +1,7 @@
 import type { CompositionTable } from "../../curve/familyTable.ts";
 import type { MassRange } from "../../curve/radiusCurve.ts";
-import { COARSE, FINE } from "../densityQuadrature.ts";
+import { gaussLegendre } from "../../numerics/gaussLegendre.ts";
+import { COARSE, FINE, type Quadrature } from "../densityQuadrature.ts";
 import { type CompositionPrior, logPrior } from "./compositionPrior.ts";
 import { type FractionSummary, fractionSummary } from "./distribution.ts";
 import type { MassPrior, PlanetLikelihood } from "./likelihood.ts";
@@ -44,6 +45,8 @@ export interface PosteriorOptions {
 }
 
 const DEFAULT_TOLERANCE = 1e-2;
+/** Panels of the nested integrals, whose densities are less like a normal one. */
+const FINEST: Quadrature = { ...FINE, rule: gaussLegendre(16) };
 /** From this tolerance on the coarser quadrature will do. */
 const COARSE_FROM = 1e-3;
 
@@ -64,7 +67,7 @@ export function compositionPosterior(
   const window = data.massWindow(range);
   if (!(window.lightest < window.heaviest)) return undefined;
   const { table, prior } = family;
-  const how = tolerance < COARSE_FROM ? FINE : COARSE;
+  const how = tolerance < COARSE_FROM ? FINEST : COARSE;
   const fitOf = (fractions: ArrayLike<number>) =>
     massIntegral(data, table.member(fractions, window), window, massPrior, how);
   const unit = logBestIntegral(data, window, massPrior) + family.logPriorIntegral;
@@ -94,7 +97,7 @@ export function compositionPosterior(
 /** ln of the integral of a prior over all fractions. */
 export function logPriorIntegral(prior: CompositionPrior): number {
   if (prior.componentCount === 1) return 0;
-  return marginal({ logDensity: () => 0, logWeight: () => 0 }, prior, 0, FINE).density.logIntegral;
+  return marginal({ logDensity: () => 0, logWeight: () => 0 }, prior, 0, FINEST).density.logIntegral;
 }
 
 function withoutWeight(density: FractionDensity): FractionDensity {

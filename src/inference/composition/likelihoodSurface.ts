@@ -10,7 +10,7 @@ const STEPS = DEGREE * 2 ** 16;
 /** Cells this small (1e-4 of an angle) are left as they are. */
 const SMALLEST = 2 ** 3;
 /** First cells along each angle. */
-const FIRST_CELLS = 2;
+const FIRST_CELLS = 1;
 /** Cells are left as they are once there are so many. */
 const MOST_CELLS = 4000;
 /** ln L below the peak of which nothing matters. */

@@ -1,7 +1,10 @@
 import type { RadiusCurve } from "../../curve/radiusCurve.ts";
 import { massWindow } from "../measurement.ts";
-import { deviation, type SplitNormal } from "../splitNormal.ts";
+import { atDeviation, deviation, type SplitNormal } from "../splitNormal.ts";
 import type { PlanetLikelihood } from "./likelihood.ts";
+
+/** Errors of the mass beyond which little is left: panels that end there need not be looked into. */
+const FAR = 5.3;
 
 /** Mass [kg] and radius [m] as measured; their errors may be correlated, e.g. through the star. */
 export interface CorrelatedMeasurement {
@@ -28,7 +31,12 @@ export function measuredLikelihood({ mass, radius, correlation }: CorrelatedMeas
     },
     logBest: (m) => -0.5 * deviation(mass, m) ** 2,
     massWindow: (range) => massWindow(mass, range),
-    kinks: (curve: RadiusCurve) => [mass.mode, radiusBends ? curve.massWithRadius(radius.mode) : undefined],
+    kinks: (curve: RadiusCurve) => [
+      mass.mode,
+      atDeviation(mass, -FAR),
+      atDeviation(mass, FAR),
+      radiusBends ? curve.massWithRadius(radius.mode) : undefined,
+    ],
     dataCount: 2,
   };
 }

@@ -17,19 +17,20 @@ export interface Marginal {
   readonly logMeanWeight: number;
 }
 
-/** What a component's fraction is integrated over: the fraction itself, or its logarithm. */
+/** What a component's fraction is integrated over: its share of what is left, or its logarithm. */
 export interface FractionCoordinate {
   readonly edges: readonly number[];
+  /** Whether it is the logarithm of the fraction. */
+  readonly isLogarithm: boolean;
   fractionAt(x: number): number;
-  /** ln of d fraction / dx. */
-  logSlope(x: number): number;
 }
 
 /**
  * The marginal density of a component's mass fraction under density times prior, for families of two components or
- * more. Nested Gauss–Legendre panels over the fractions: the component's own, then those of the others, each from 0 to what
- * is left, the last of them being the rest. Log-uniform components are integrated over the logarithm between their bounds.
- * Checked test/inference/composition/simplexIntegral.test.ts
+ * more. Nested Gauss–Legendre panels: over the component's own fraction, then over those of the others, each as a share of
+ * what is left, the last of them being the rest. Log-uniform components are integrated over the logarithm between their
+ * bounds. What is left is a factor of each inner integral; it is kept apart, as it vanishes where nothing is left.
+ * Checked test/inference/composition/linearRelation.test.ts, weightedDraws.test.ts
  */
 export function marginal(
   density: FractionDensity,
@@ -37,44 +38,47 @@ export function marginal(
   component: number,
   how: Quadrature,
 ): Marginal {
-  const others = logUniformFirst(prior).filter((k) => k !== component);
+  const order = [component, ...logUniformFirst(prior).filter((k) => k !== component)];
+  const isFlat = order.map((k) => prior.logUniform.every((entry) => entry.component !== k));
+  /** Powers of what is left that the integrals from a place on hold: one for each that is flat, but for the rest. */
+  const powers = order.map((_, n) => isFlat.slice(n, -1).filter(Boolean).length);
   const fractions = new Float64Array(prior.componentCount);
   const logWeights = new Map<number, number>();
   let logWeight = 0;
 
-  /** ln of the integral over the components from place n of `others` on, which share `left` of the mass. */
-  const rest = (n: number, left: number): number => {
-    if (n === others.length - 1) {
-      fractions[others[n]] = left;
+  /** ln of the integral over the components from place n on, which share `left`, without the power of `left`. */
+  const integralFrom = (n: number, left: number): number => {
+    if (n === order.length - 1) {
+      fractions[order[n]] = left;
       const log = density.logDensity(fractions) + logPrior(prior, fractions);
       logWeight = density.logWeight();
       return log;
     }
-    const coordinate = coordinateOf(prior, others[n], left);
+    const coordinate = coordinateOf(prior, order[n], left);
     if (coordinate === undefined) return Number.NEGATIVE_INFINITY;
-    const result = logIntegralAndMean(along(coordinate, n, left), coordinate.edges, () => logWeight, how);
+    const { along, logFactor } = integrand(coordinate, n, left);
+    const result = logIntegralAndMean(along, coordinate.edges, () => logWeight, how, logFactor);
     logWeight = result.logMean;
     return result.logIntegral;
   };
-  const along =
-    ({ fractionAt, logSlope }: FractionCoordinate, n: number, left: number) =>
-    (x: number): number => {
+  const integrand = ({ fractionAt, isLogarithm }: FractionCoordinate, n: number, left: number) => ({
+    along: (x: number): number => {
       const fraction = fractionAt(x);
-      fractions[n < 0 ? component : others[n]] = fraction;
-      return rest(n + 1, Math.max(0, left - fraction)) + logSlope(x);
-    };
+      fractions[order[n]] = fraction;
+      // x is ln f there, and df = f dx.
+      return integralFrom(n + 1, Math.max(0, left - fraction)) + (isLogarithm ? x : 0);
+    },
+    logFactor: powers[n + 1] === 0 ? undefined : (x: number) => powers[n + 1] * Math.log1p(-fractionAt(x) / left),
+  });
 
   const coordinate = coordinateOf(prior, component, 1) as FractionCoordinate;
-  const outer = along(coordinate, -1, 1);
-  const over = densityQuadrature(
-    (x) => {
-      const log = outer(x);
-      logWeights.set(x, logWeight);
-      return log;
-    },
-    coordinate.edges,
-    how,
-  );
+  const { along, logFactor } = integrand(coordinate, 0, 1);
+  const remembering = (x: number): number => {
+    const log = along(x);
+    logWeights.set(x, logWeight);
+    return log;
+  };
+  const over = densityQuadrature(remembering, coordinate.edges, how, logFactor);
   const atNodes = Array.from(over.nodes, (x) => logWeights.get(x) as number);
   const largest = Math.max(...atNodes);
   const mean = atNodes.reduce((sum, log, i) => sum + over.probabilities[i] * Math.exp(log - largest), 0);
@@ -88,13 +92,13 @@ function logUniformFirst({ componentCount, logUniform }: CompositionPrior): numb
   return [...first, ...all.filter((k) => !first.includes(k))];
 }
 
+const SHARES = [0, 0.5, 1];
+
 /** Undefined if not even the least fraction of the component is left. */
 function coordinateOf(prior: CompositionPrior, component: number, left: number): FractionCoordinate | undefined {
   const bounds = prior.logUniform.find((entry) => entry.component === component);
-  if (bounds === undefined) {
-    return { edges: [0, left / 2, left], fractionAt: (x) => x, logSlope: () => 0 };
-  }
+  if (bounds === undefined) return { edges: SHARES, isLogarithm: false, fractionAt: (x) => left * x };
   if (!(left > bounds.from)) return undefined;
   const [from, to] = [Math.log(bounds.from), Math.log(Math.min(bounds.to, left))];
-  return { edges: [from, (from + to) / 2, to], fractionAt: Math.exp, logSlope: (x) => x };
+  return { edges: [from, (from + to) / 2, to], isLogarithm: true, fractionAt: Math.exp };
 }
