@@ -1,12 +1,12 @@
 import type { MassRange, RadiusCurve } from "../curve/radiusCurve.ts";
 import { InputError } from "../errors.ts";
-import type { MeasuredQuantity, PlanetRow } from "../planets/quantity.ts";
+import type { PlanetRow } from "../planets/quantity.ts";
 import { EARTH_MASS } from "../units/constants.ts";
 import { classProbabilities } from "./classProbabilities.ts";
 import { type FractionEstimate, fractionEstimate, fractionPosterior, type PlanetFamily } from "./fractionPosterior.ts";
-import { type Measurement, shareOutsideRange } from "./measurement.ts";
-import { isMeasuredValue, refusalReasons } from "./refusal.ts";
-import type { SplitNormal } from "./splitNormal.ts";
+import type { Measurement } from "./measurement.ts";
+import { isMeasuredValue } from "./refusal.ts";
+import { rowMeasurement } from "./rowMeasurement.ts";
 import { type BoundaryLabels, type Verdict, verdictFor } from "./verdict.ts";
 
 /** Everything a planet is compared with. Curves densest first; no curve may cross another. */
@@ -48,11 +48,6 @@ export interface Refused {
 
 export type Classification = Classified | Refused;
 
-/**
- * Largest share of what is known about a mass that may lie outside the models: no probability can be wrong by more.
- * It is there so that a small planet with a large error, whose mass likelihood runs down to 0, still gets its verdict.
- */
-const LARGEST_SHARE_OUTSIDE = 0.01;
 /** Intervals in ln M at whose ends the order of the boundary curves is checked. */
 const ORDER_CHECKS = 200;
 
@@ -89,25 +84,11 @@ export function classifier(models: ClassifierModels): Classifier {
   };
 
   const classify = (row: PlanetRow): Classification => {
-    const { mass, radius } = row.quantities;
-    const reasons = refusalReasons(row);
-    if (reasons.length > 0) return { reasons, ...allowedByOneQuantity(row, models) };
-    const measurement = { mass: splitNormal(mass), radius: splitNormal(radius) };
-    return isWithin(range, measurement.mass) ? infer(measurement) : { reasons: ["mass-beyond-models"] };
+    const { measurement, reasons } = rowMeasurement(row, range);
+    return measurement ? infer(measurement) : { reasons, ...allowedByOneQuantity(row, models) };
   };
 
   return { range, classify };
-}
-
-/** For rows that passed `refusalReasons`. */
-function splitNormal(quantity: MeasuredQuantity | undefined): SplitNormal {
-  const { value, minus, plus } = quantity as Required<Pick<MeasuredQuantity, "value" | "minus" | "plus">>;
-  return { mode: value, minus, plus };
-}
-
-function isWithin(range: MassRange, mass: SplitNormal): boolean {
-  if (!(mass.mode >= range.lightest && mass.mode <= range.heaviest)) return false;
-  return shareOutsideRange(mass, range) <= LARGEST_SHARE_OUTSIDE;
 }
 
 /** What the curves allow a planet to be of which only radius or only mass is known. */

@@ -1,11 +1,11 @@
 import type { PlanetRow } from "../../planets/quantity.ts";
 import { fractionPosterior } from "../fractionPosterior.ts";
 import type { Measurement } from "../measurement.ts";
+import { rowMeasurement } from "../rowMeasurement.ts";
 import { type ExpectedLearning, expectedLearning, width68 } from "./expectedWidth.ts";
 import { halve, type Improved } from "./improvementSteps.ts";
 import type { PrecisionModels } from "./planetForecast.ts";
 import { errorSizes, withErrors } from "./plannedMeasurement.ts";
-import { rowMeasurement } from "./rowMeasurement.ts";
 import { type Contrast, contrastAt } from "./separation.ts";
 
 /** A planet and what halving its errors would teach. */
