@@ -1,6 +1,6 @@
-import { CsvError, parse } from "csv-parse/sync";
 import { nameKey } from "../crosscheck/planetName.ts";
 import { InputError } from "../errors.ts";
+import { parseNamedColumns } from "./namedColumns.ts";
 
 const needed = ["name", "alias"] as const;
 
@@ -10,7 +10,7 @@ const needed = ["name", "alias"] as const;
  */
 export function parseAliases(text: string, file: string): Map<string, string> {
   const aliases = new Map<string, string>();
-  for (const { name = "", alias = "" } of parseRecords(text, file)) {
+  for (const { name = "", alias = "" } of parseNamedColumns<Partial<Record<string, string>>>(text, file, needed)) {
     if (name === "" || alias === "") continue;
     const known = aliases.get(alias);
     if (known !== undefined && nameKey(known) !== nameKey(name)) {
@@ -20,24 +20,4 @@ export function parseAliases(text: string, file: string): Map<string, string> {
     aliases.set(alias, name);
   }
   return aliases;
-}
-
-function parseRecords(text: string, file: string): Partial<Record<string, string>>[] {
-  try {
-    return parse(text, {
-      bom: true,
-      trim: true,
-      skip_empty_lines: true,
-      columns: (header: string[]) => checkedHeader(header, file),
-    });
-  } catch (error) {
-    if (!(error instanceof CsvError)) throw error;
-    throw new InputError("csv-syntax", `${file}: ${error.message}.`, { file }, { cause: error });
-  }
-}
-
-function checkedHeader(header: string[], file: string): string[] {
-  if (needed.every((name) => header.includes(name))) return header;
-  const message = `${file} has the columns ${header.join(", ")}. Needed: ${needed.join(", ")}.`;
-  throw new InputError("missing-columns", message, { file });
 }

@@ -1,6 +1,6 @@
 import { birchMurnaghan } from "../eos/birchMurnaghan.ts";
 import type { Source } from "../eos/material.ts";
-import { finiteStrainGruneisen } from "../eos/thermal/gruneisenLaw.ts";
+import { finiteStrainGruneisen, type GruneisenLaw } from "../eos/thermal/gruneisenLaw.ts";
 import { IsothermBasedEos } from "../eos/thermal/isothermBasedEos.ts";
 import { debyeTerm } from "../eos/thermal/thermalTerm.ts";
 import { constants, GPA } from "../units/constants.ts";
@@ -29,19 +29,25 @@ export const REFERENCE_TEMPERATURE = 300;
  * Checked test/mineralogy/endMember.test.ts
  */
 export function endMemberEos(member: EndMember): IsothermBasedEos {
-  const mass = molarMass(member.formula);
-  const densityZero = mass / (member.volumeCm3PerMol * 1e-6);
+  const { debyeTemperatureK, gammaZero, qZero } = member;
+  return debyeSolid(member, debyeTemperatureK, finiteStrainGruneisen(gammaZero, qZero));
+}
+
+/** Third-order Birch–Murnaghan isotherm at 300 K with Debye vibrations that follow the given law. */
+export function debyeSolid(
+  solid: Pick<EndMember, "formula" | "volumeCm3PerMol" | "bulkModulusGPa" | "bulkModulusPrime">,
+  debyeTemperature: number,
+  law: GruneisenLaw,
+): IsothermBasedEos {
+  const mass = molarMass(solid.formula);
+  const densityZero = mass / (solid.volumeCm3PerMol * 1e-6);
   const cold = birchMurnaghan({
     order: 3,
     densityZero,
-    bulkModulus: member.bulkModulusGPa * GPA,
-    bulkModulusPrime: member.bulkModulusPrime,
+    bulkModulus: solid.bulkModulusGPa * GPA,
+    bulkModulusPrime: solid.bulkModulusPrime,
   });
-  const vibrations = debyeTerm({
-    densityZero,
-    gasConstant: (atomTotal(member.formula) * constants.gasConstant.value) / mass,
-    debyeTemperature: member.debyeTemperatureK,
-    law: finiteStrainGruneisen(member.gammaZero, member.qZero),
-  });
+  const gasConstant = (atomTotal(solid.formula) * constants.gasConstant.value) / mass;
+  const vibrations = debyeTerm({ densityZero, gasConstant, debyeTemperature, law });
   return new IsothermBasedEos(cold, REFERENCE_TEMPERATURE, [vibrations]);
 }

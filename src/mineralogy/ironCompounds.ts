@@ -1,11 +1,7 @@
-import { birchMurnaghan } from "../eos/birchMurnaghan.ts";
 import type { Source } from "../eos/material.ts";
 import { powerLawGruneisen } from "../eos/thermal/gruneisenLaw.ts";
-import { IsothermBasedEos } from "../eos/thermal/isothermBasedEos.ts";
-import { debyeTerm } from "../eos/thermal/thermalTerm.ts";
-import { constants, GPA } from "../units/constants.ts";
-import { REFERENCE_TEMPERATURE } from "./endMember.ts";
-import { atomTotal, molarMass } from "./formula.ts";
+import type { IsothermBasedEos } from "../eos/thermal/isothermBasedEos.ts";
+import { debyeSolid } from "./endMember.ts";
 
 /** Solid compound of iron with one light element, as published. */
 export interface IronCompound {
@@ -59,20 +55,6 @@ export const ironCompounds = {
 
 /** Third-order Birch–Murnaghan isotherm at 300 K with Debye vibrations and a power law for γ. */
 export function ironCompoundEos(compound: IronCompound): IsothermBasedEos {
-  const mass = molarMass(compound.formula);
-  const densityZero = mass / (compound.volumeCm3PerMol * 1e-6);
   const { debyeTemperatureK, gammaZero, q } = compound.vibrations ?? IRON_VIBRATIONS;
-  const cold = birchMurnaghan({
-    order: 3,
-    densityZero,
-    bulkModulus: compound.bulkModulusGPa * GPA,
-    bulkModulusPrime: compound.bulkModulusPrime,
-  });
-  const vibrations = debyeTerm({
-    densityZero,
-    gasConstant: (atomTotal(compound.formula) * constants.gasConstant.value) / mass,
-    debyeTemperature: debyeTemperatureK,
-    law: powerLawGruneisen(gammaZero, q),
-  });
-  return new IsothermBasedEos(cold, REFERENCE_TEMPERATURE, [vibrations]);
+  return debyeSolid(compound, debyeTemperatureK, powerLawGruneisen(gammaZero, q));
 }
