@@ -1,7 +1,7 @@
 #!/usr/bin/env node
 import { run } from "./run.ts";
 
-// Files appear only once they are complete (atomicFile.ts), so stopping at once leaves nothing half-written.
+// Files appear only once they are complete (outputFile.ts), so stopping at once leaves nothing half-written.
 process.once("SIGINT", () => process.exit(130));
 // The reader of a pipe has seen enough, as in `| head`.
 for (const stream of [process.stdout, process.stderr]) {

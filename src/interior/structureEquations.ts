@@ -14,7 +14,7 @@ import { G } from "../units/constants.ts";
  *                  are exact, and a density that goes to 0 at the surface does no harm
  * Source  hydrostatic equilibrium in mass, e.g. Kippenhahn, Weigert & Weiss 2012, Stellar Structure and Evolution,
  *         sections 1.2 and 2.1, transformed here
- * Checked test/interior/structureEquations.test.ts
+ * Checked test/interior/sensitivity.test.ts, invariants.test.ts
  */
 export const A = (3 * G) / (8 * Math.PI);
 export const B = 3 / (4 * Math.PI);

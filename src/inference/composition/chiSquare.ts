@@ -5,7 +5,6 @@ import { erfc } from "../normal.ts";
  *   Q(1) = erfc(√(x/2)),   Q(2) = exp(-x/2),   Q(n + 2) = Q(n) + (x/2)^(n/2) exp(-x/2) / Γ(n/2 + 1)
  * and by its leading term, right to 1/x, where it leaves the double range.
  * Source  Abramowitz & Stegun 1964, 26.4.4 and 26.4.5 (closed forms), 26.4.8 (recurrence)
- * Checked test/inference/composition/chiSquare.test.ts
  */
 export function logChiSquareAbove(x: number, n: number): number {
   if (n === 2) return -x / 2;

@@ -38,7 +38,6 @@ const LIMIT_WIDTH = 0.01;
  *   measured  split-normal
  *   limit     probability that a measurement with an error of 1 % of the limit falls on its allowed side: nearly a step
  *   minimum   M sin i split-normal with cos i uniform (orbits in all directions alike), i integrated out
- * Checked test/inference/composition/combinedLikelihood.test.ts
  */
 export function combinedLikelihood({ mass, radius, density }: IndependentData): PlanetLikelihood {
   const massTerm = mass?.kind === "minimum" ? minimumTerm(mass.value) : termOf(mass);

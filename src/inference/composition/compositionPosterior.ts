@@ -56,7 +56,7 @@ const COARSE_FROM = 1e-3;
  * by deterministic quadrature. Prior on M flat (default) or log-flat over the range. Undefined if the data leave no mass
  * of the range.
  * Source  Gelman et al. 2013, Bayesian Data Analysis, 3rd ed., section 6.3 (posterior-predictive p)
- * Checked test/inference/composition/compositionPosterior.test.ts
+ * Checked test/inference/composition/linearRelation.test.ts, weightedDraws.test.ts; test/calibration
  */
 export function compositionPosterior(
   data: PlanetLikelihood,

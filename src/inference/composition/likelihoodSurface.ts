@@ -29,7 +29,7 @@ interface Cell {
  * ln L over all mass fractions of a family, by polynomials on boxes of angles (`fractionsAt`) that are halved until each
  * meets ln L between its nodes within `tolerance`, as far as it matters: an error counts by the density it stands at.
  * Asking it costs a tenth of a microsecond, where a mass integral costs some.
- * Checked test/inference/composition/likelihoodSurface.test.ts
+ * Checked test/inference/composition/linearRelation.test.ts
  */
 export class LikelihoodSurface implements FractionDensity {
   private readonly cells: Cell[] = [];

@@ -18,7 +18,7 @@ export interface CorrelatedMeasurement {
  * Likelihood of a measured mass and radius, split-normal each, with the deviations z_M and z_R (in errors of their side)
  * correlated as those of a normal distribution of two variables:
  *   ln L = -(z_M² - 2 ρ z_M z_R + z_R²) / (2 (1 - ρ²))
- * Checked test/inference/composition/measuredLikelihood.test.ts
+ * Checked test/inference/composition/linearRelation.test.ts, weightedDraws.test.ts
  */
 export function measuredLikelihood({ mass, radius, correlation }: CorrelatedMeasurement): PlanetLikelihood {
   const scale = -0.5 / (1 - correlation * correlation);
